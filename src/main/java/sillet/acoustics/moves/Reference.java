@@ -1,0 +1,9 @@
+package sillet.acoustics.moves;
+
+/** What a fretted note was compared with. */
+public enum Reference {
+  /** The open string. */
+  OPEN,
+  /** The harmonic over fret 12. */
+  HARMONIC
+}

@@ -1,0 +1,5 @@
+/** Placeholder head of this package: SI units; cents are positive when sharp. */
+@NullMarked
+package sillet.acoustics.wire;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,43 @@
+package sillet.logbook.moves;
+
+import org.jspecify.annotations.Nullable;
+
+/**
+ * The figures of one string's move: always the best estimate, never rounded to zero or cut to the
+ * travel.
+ *
+ * @param saddleMm best move, positive away from the neck
+ * @param lowMm lower end of its 95 % interval
+ * @param highMm upper end
+ * @param turns of the screw, without sign; null where no screw pitch is known
+ * @param nutMm best nut move, positive toward the bridge; null for a fixed nut
+ * @param cents12Before fretted 12 minus its reference, as read or estimated
+ * @param cents12After the same after the move, by the model
+ * @param rmsBefore root mean square over frets 1 to 12, cents
+ * @param rmsAfter the same after the move
+ * @param centsPerMm what a millimetre away from the neck does to fret 12, negative
+ */
+public record MoveFigures(
+    double saddleMm,
+    double lowMm,
+    double highMm,
+    @Nullable Double turns,
+    @Nullable Double nutMm,
+    double cents12Before,
+    double cents12After,
+    double rmsBefore,
+    double rmsAfter,
+    double centsPerMm) {
+
+  /**
+   * Which way it goes.
+   *
+   * @return the direction of the best estimate
+   */
+  public Direction direction() {
+    if (saddleMm == 0) {
+      return Direction.STAY;
+    }
+    return saddleMm > 0 ? Direction.AWAY : Direction.TOWARD;
+  }
+}

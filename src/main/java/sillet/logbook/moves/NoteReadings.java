@@ -1,0 +1,38 @@
+package sillet.logbook.moves;
+
+import java.util.Map;
+import java.util.SortedMap;
+import java.util.TreeMap;
+import org.jspecify.annotations.Nullable;
+import sillet.acoustics.moves.Reference;
+import sillet.logbook.units.Tries;
+
+/**
+ * What the tuner said of one string.
+ *
+ * @param frets tries by fret, 1 to 24
+ * @param open what the open string itself read at that time; null means it was tuned, 0
+ * @param against what the notes were compared with
+ * @param sdCents standard deviation of one reading of the difference, the tuner's resolution
+ *     included
+ */
+public record NoteReadings(
+    SortedMap<Integer, Tries> frets, @Nullable Tries open, Reference against, double sdCents) {
+  /** Standard deviation of one reading where nothing else is said, cents. */
+  public static final double USUAL_SD_CENTS = 0.5;
+
+  /** Copies the map. */
+  public NoteReadings {
+    frets = java.util.Collections.unmodifiableSortedMap(new TreeMap<>(frets));
+  }
+
+  /**
+   * Readings against the open string with the usual scatter.
+   *
+   * @param frets tries by fret
+   * @return the readings
+   */
+  public static NoteReadings of(Map<Integer, Tries> frets) {
+    return new NoteReadings(new TreeMap<>(frets), null, Reference.OPEN, USUAL_SD_CENTS);
+  }
+}
