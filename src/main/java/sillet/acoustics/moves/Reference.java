@@ -4,6 +4,6 @@ package sillet.acoustics.moves;
 public enum Reference {
   /** The open string. */
   OPEN,
-  /** The harmonic over fret 12. */
+  /** The harmonic over fret 12, which runs sharp of the octave by the string's stiffness. */
   HARMONIC
 }
