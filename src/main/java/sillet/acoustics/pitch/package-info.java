@@ -1,4 +1,8 @@
-/** Placeholder head of this package: SI units; cents are positive when sharp. */
+/**
+ * Pitch as numbers: cents, equal temperament, and where frets stand.
+ *
+ * <p>SI units and cents, see {@link sillet.acoustics}. Uses nothing of Sillet.
+ */
 @NullMarked
 package sillet.acoustics.pitch;
 
