@@ -1,0 +1,16 @@
+package sillet.desktop.controls;
+
+import sillet.logbook.text.Texts;
+
+/**
+ * What every screen is handed.
+ *
+ * @param background where work on the logbook is done
+ * @param goTo the other places
+ * @param ask questions to the technician
+ * @param sign what is saved
+ * @param texts the words
+ * @param atBench shop, technician and clock
+ */
+public record Desk(
+    Background background, GoTo goTo, Ask ask, SaveSign sign, Texts texts, AtBench atBench) {}
