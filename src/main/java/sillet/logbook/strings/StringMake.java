@@ -2,6 +2,8 @@ package sillet.logbook.strings;
 
 import org.jspecify.annotations.Nullable;
 import sillet.acoustics.wire.Construction;
+import sillet.logbook.text.Rejection;
+import sillet.logbook.units.Figures;
 
 /**
  * How one string is made.
@@ -16,6 +18,36 @@ public record StringMake(
     Construction construction,
     @Nullable Double coreIn,
     @Nullable Double unitMassGPerM) {
+
+  /**
+   * Refuses what no string can be.
+   *
+   * @throws Rejection if a figure is not above zero, or the core does not fit the gauge
+   */
+  public StringMake {
+    aboveZero("string.gauge", gaugeIn);
+    if (unitMassGPerM != null) {
+      aboveZero("string.unit-mass", unitMassGPerM);
+    }
+    if (coreIn != null) {
+      aboveZero("string.core", coreIn);
+      boolean fits = ConstructionWords.wound(construction) ? coreIn < gaugeIn : coreIn == gaugeIn;
+      if (!fits) {
+        throw Rejection.of(
+            ConstructionWords.wound(construction)
+                ? "string.core-too-thick"
+                : "string.core-of-plain",
+            Figures.gauge(coreIn),
+            Figures.gauge(gaugeIn));
+      }
+    }
+  }
+
+  private static void aboveZero(String key, double value) {
+    if (!(value > 0) || Double.isInfinite(value)) {
+      throw Rejection.of(key, Double.toString(value));
+    }
+  }
 
   /**
    * A string of which only the packet is known.

@@ -18,7 +18,7 @@ public final class Figures {
    * @return for instance {@code -1.860}
    */
   public static String fixed(double value, int decimals) {
-    BigDecimal rounded = new BigDecimal(value).setScale(decimals, RoundingMode.HALF_EVEN);
+    BigDecimal rounded = new BigDecimal(value).setScale(decimals, RoundingMode.HALF_UP);
     return (rounded.signum() == 0 ? BigDecimal.ZERO.setScale(decimals) : rounded).toPlainString();
   }
 
@@ -34,7 +34,7 @@ public final class Figures {
     BigDecimal shown =
         exact.scale() < 3
             ? exact.setScale(3)
-            : exact.setScale(Math.min(exact.scale(), 4), RoundingMode.HALF_EVEN);
+            : exact.setScale(Math.min(exact.scale(), 4), RoundingMode.HALF_UP);
     String text = shown.toPlainString();
     return text.startsWith("0.") ? text.substring(1) : text;
   }

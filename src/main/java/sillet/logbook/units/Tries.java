@@ -30,7 +30,7 @@ public record Tries(List<Decimal> cents) {
    */
   public static Tries parse(String text) {
     List<Decimal> tries = new ArrayList<>();
-    for (String part : text.strip().split("[\\s/]+", -1)) {
+    for (String part : text.strip().split("\\s*/\\s*|\\s+", -1)) {
       Decimal one = DecimalText.parse(part);
       if (Math.abs(one.value()) > FARTHEST_CENTS) {
         throw Rejection.of("cents.too-far", part);

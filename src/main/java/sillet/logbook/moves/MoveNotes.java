@@ -1,0 +1,110 @@
+package sillet.logbook.moves;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
+import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
+import sillet.logbook.text.Message;
+import sillet.logbook.units.Figures;
+import sillet.logbook.units.Tries;
+
+/** The sentences that go with one string's figures. */
+final class MoveNotes {
+  private static final int OCTAVE = 12;
+
+  /**
+   * Beyond a couple of millimetres the string itself is suspect first (common practice, no source).
+   */
+  private static final double SUSPECT_STRING_MM = 3;
+
+  private final BenchString string;
+  private final List<Message> notes = new ArrayList<>();
+
+  MoveNotes(BenchString string) {
+    this.string = string;
+  }
+
+  List<Message> all() {
+    return List.copyOf(notes);
+  }
+
+  /** Names each try that lies apart from the others. */
+  boolean wildTries() {
+    boolean found = false;
+    for (Map.Entry<Integer, Tries> entry : string.readings().frets().entrySet()) {
+      Tries tries = entry.getValue();
+      OptionalInt wild = AcousticString.spread(tries, string.readings()).wildTry();
+      if (wild.isPresent()) {
+        var one = tries.cents().get(wild.getAsInt());
+        notes.add(
+            Message.of(
+                "move.wild-try",
+                Integer.toString(wild.getAsInt() + 1),
+                Integer.toString(entry.getKey()),
+                Figures.fixed(one.value(), one.decimals())));
+        found = true;
+      }
+    }
+    return found;
+  }
+
+  void notSolved(String because) {
+    notes.add(Message.of("move.not-solved", because));
+  }
+
+  void verdict(Verdict verdict, MoveFigures figures, @Nullable Double centsLeft) {
+    String mm = Figures.fixed(Math.abs(figures.saddleMm()), 2);
+    Double room = string.room().toward(figures.saddleMm());
+    String roomMm = room == null ? "" : Figures.fixed(room, 2);
+    String stays = centsLeft == null ? "" : Figures.fixed(centsLeft, 1);
+    boolean away = figures.direction() == Direction.AWAY;
+    switch (verdict) {
+      case LEAVE -> notes.add(Message.of("move.leave"));
+      case NO_ROOM ->
+          notes.add(
+              Message.of(away ? "move.no-room-away" : "move.no-room-toward", mm, roomMm, stays));
+      case SLOT ->
+          notes.add(Message.of(away ? "move.slot-away" : "move.slot-toward", mm, roomMm, stays));
+      case MOVE -> move(figures, mm, away);
+    }
+    unread();
+    if (verdict != Verdict.LEAVE && Math.abs(figures.saddleMm()) > SUSPECT_STRING_MM) {
+      notes.add(Message.of("move.suspect-string"));
+    }
+  }
+
+  private void move(MoveFigures figures, String mm, boolean away) {
+    Double turns = figures.turns();
+    if (string.room().onePiece()) {
+      notes.add(Message.of(away ? "move.file-away" : "move.file-toward", mm));
+    } else if (turns == null) {
+      notes.add(Message.of(away ? "move.away" : "move.toward", mm));
+    } else {
+      String turned = Figures.fixed(turns, 2);
+      notes.add(Message.of(away ? "move.away-turns" : "move.toward-turns", mm, turned));
+    }
+  }
+
+  private void unread() {
+    var read = string.readings().frets().keySet();
+    if (read.isEmpty()) {
+      notes.add(Message.of("move.unread"));
+    } else if (!read.contains(OCTAVE)) {
+      String frets = read.stream().map(f -> Integer.toString(f)).collect(Collectors.joining(", "));
+      notes.add(Message.of("move.unread-octave", frets));
+    }
+  }
+
+  void strain(OptionalDouble share, double limit) {
+    if (share.isPresent() && share.getAsDouble() > limit) {
+      notes.add(
+          Message.of(
+              "move.strain",
+              Figures.fixed(share.getAsDouble() * 100, 0),
+              Figures.fixed(limit * 100, 0)));
+    }
+  }
+}

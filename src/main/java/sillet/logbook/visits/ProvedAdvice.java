@@ -1,0 +1,83 @@
+package sillet.logbook.visits;
+
+import java.util.ArrayList;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.Set;
+import org.jspecify.annotations.Nullable;
+import sillet.acoustics.moves.PassProof;
+import sillet.acoustics.moves.SecondPass;
+import sillet.logbook.moves.Finding;
+import sillet.logbook.moves.MoveAdvice;
+import sillet.logbook.moves.MoveAdvisor;
+import sillet.logbook.moves.MoveFigures;
+import sillet.logbook.moves.Verdict;
+import sillet.logbook.text.Message;
+import sillet.logbook.units.Figures;
+
+/**
+ * The advice of a later pass: what the move before really did, taken together with what the model
+ * knows.
+ *
+ * @param advice what to do next; null while the string has not been read
+ * @param proof what the pass says of the move before; null where there is nothing to prove
+ */
+record ProvedAdvice(@Nullable MoveAdvice advice, @Nullable MoveProof proof) {
+  private static final double MM_PER_M = 1e3;
+
+  static ProvedAdvice of(@Nullable MoveAdvice now, @Nullable StringPass before) {
+    MoveFigures figures = now == null ? null : now.figures();
+    MoveFigures earlier = figuresOf(before);
+    Double made = before == null ? null : before.madeMm();
+    if (now == null || figures == null || earlier == null || made == null) {
+      return new ProvedAdvice(now, null);
+    }
+    PassProof proof =
+        SecondPass.combine(
+            earlier.cents12Before(),
+            earlier.cents12Sd(),
+            figures.cents12Before(),
+            figures.cents12Sd(),
+            made / MM_PER_M,
+            earlier.centsPerMm() * MM_PER_M);
+    MoveProof said =
+        new MoveProof(
+            earlier.cents12Before(),
+            figures.cents12Before(),
+            proof.withinOneCent(),
+            !proof.notAsPredicted());
+    return new ProvedAdvice(advice(now, figures, proof, said), said);
+  }
+
+  private static @Nullable MoveFigures figuresOf(@Nullable StringPass pass) {
+    MoveAdvice advice = pass == null ? null : pass.advice();
+    return advice == null ? null : advice.figures();
+  }
+
+  private static MoveAdvice advice(
+      MoveAdvice now, MoveFigures figures, PassProof proof, MoveProof said) {
+    MoveFigures next =
+        figures.withMove(
+            proof.nextMove() * MM_PER_M,
+            proof.nextSd() * MM_PER_M,
+            proof.combinedCentsPerMetre() / MM_PER_M,
+            now.string().room().screwMm());
+    Verdict verdict =
+        proof.withinOneCent() ? Verdict.LEAVE : MoveAdvisor.verdict(now.string(), next);
+    Set<Finding> findings = EnumSet.noneOf(Finding.class);
+    findings.addAll(now.findings());
+    List<Message> notes = new ArrayList<>();
+    String before = Figures.signed(said.centsBefore(), 1);
+    String after = Figures.signed(said.centsNow(), 1);
+    if (!said.asPredicted()) {
+      findings.add(Finding.READING);
+      notes.add(Message.of("move.not-as-predicted", before, after));
+    }
+    if (said.withinOneCent()) {
+      notes.add(Message.of("move.within-one-cent", before, after));
+    } else {
+      notes.addAll(MoveAdvisor.notes(now.string(), next, verdict));
+    }
+    return new MoveAdvice(now.string(), next, verdict, findings, notes);
+  }
+}

@@ -1,0 +1,148 @@
+package sillet.logbook.visits;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import sillet.acoustics.moves.Aim;
+import sillet.logbook.instruments.SaddleKind;
+import sillet.logbook.moves.BenchString;
+import sillet.logbook.moves.MoveAdvice;
+import sillet.logbook.moves.MoveAdvisor;
+import sillet.logbook.moves.MoveFigures;
+import sillet.logbook.moves.NutMovable;
+import sillet.logbook.moves.SaddleRoom;
+import sillet.logbook.strings.FittedString;
+
+/**
+ * A whole visit reckoned through: every pass, every string, each pass proving the moves of the one
+ * before.
+ */
+public final class VisitMoves {
+  private final VisitRecord record;
+  private final MoveAdvisor advisor;
+  private final PassReadings readings;
+
+  private VisitMoves(VisitRecord record, MoveAdvisor advisor) {
+    this.record = record;
+    this.advisor = advisor;
+    this.readings = new PassReadings(record.readings());
+  }
+
+  /**
+   * Reckons a visit, fret 12 to become true.
+   *
+   * @param record everything the logbook holds of it
+   * @param advisor with the shop's own limits
+   * @return the passes in order, at least one; in each the strings in order, string 1 first
+   */
+  public static List<List<StringPass>> of(VisitRecord record, MoveAdvisor advisor) {
+    return new VisitMoves(record, advisor).passes();
+  }
+
+  /**
+   * The frets at which a visit was read.
+   *
+   * @param record everything the logbook holds of it
+   * @return 1 to 24 in order, the open string left out
+   */
+  public static List<Integer> fretsRead(VisitRecord record) {
+    return new PassReadings(record.readings()).fretsRead();
+  }
+
+  private List<List<StringPass>> passes() {
+    List<List<StringPass>> passes = new ArrayList<>();
+    int last = readings.lastPass(record.moves());
+    for (int pass = 1; pass <= last; pass++) {
+      passes.add(strings(pass, passes.isEmpty() ? null : passes.get(passes.size() - 1)));
+    }
+    return passes;
+  }
+
+  private List<StringPass> strings(int pass, @Nullable List<StringPass> before) {
+    List<BenchString> bench = bench(pass);
+    Map<Integer, MoveAdvice> advice = advice(bench);
+    List<StringPass> result = new ArrayList<>();
+    for (int i = 0; i < bench.size(); i++) {
+      BenchString string = bench.get(i);
+      StringPass earlier = before == null ? null : before.get(i);
+      MoveAdvice first = advice.get(string.string().number());
+      ProvedAdvice proved = ProvedAdvice.of(first, earlier);
+      Double made = madeMm(pass, string.string().number());
+      MoveAdvice last = proved.advice();
+      result.add(new StringPass(pass, string, last, made, predicted(last, made), proved.proof()));
+    }
+    return result;
+  }
+
+  private Map<Integer, MoveAdvice> advice(List<BenchString> bench) {
+    List<BenchString> read = bench.stream().filter(s -> !s.readings().frets().isEmpty()).toList();
+    Map<Integer, MoveAdvice> result = new HashMap<>();
+    for (MoveAdvice one : advisor.advise(read, Aim.OCTAVE)) {
+      result.put(one.string().string().number(), one);
+    }
+    return result;
+  }
+
+  private List<BenchString> bench(int pass) {
+    StringHeights heights =
+        pass == 1 ? StringHeights.received(record.checks()) : StringHeights.left(record.checks());
+    List<BenchString> bench = new ArrayList<>();
+    for (FittedString string : record.visit().strings().strings()) {
+      int number = string.number();
+      bench.add(
+          new BenchString(
+              record.instrument().name(),
+              string,
+              heights.of(number),
+              room(pass, number),
+              readings.of(pass, number)));
+    }
+    return bench;
+  }
+
+  private SaddleRoom room(int pass, int string) {
+    double movedMm = 0;
+    for (MadeMove move : record.moves()) {
+      if (move.pass() < pass && move.string() == string) {
+        movedMm += move.saddleMm();
+      }
+    }
+    var saddle = record.instrument().saddle();
+    boolean onePiece = saddle.kind() == SaddleKind.ONE_PIECE;
+    Double screw = saddle.screwPitchMm();
+    for (Travel travel : record.visit().travel()) {
+      if (travel.string() == string) {
+        return new SaddleRoom(
+            screw,
+            shifted(travel.backMm(), -movedMm),
+            shifted(travel.forwardMm(), movedMm),
+            onePiece,
+            NutMovable.NO);
+      }
+    }
+    return new SaddleRoom(screw, null, null, onePiece, NutMovable.NO);
+  }
+
+  private static @Nullable Double shifted(@Nullable Double room, double byMm) {
+    return room == null ? null : Math.max(0, room + byMm);
+  }
+
+  private @Nullable Double madeMm(int pass, int string) {
+    Double made = null;
+    for (MadeMove move : record.moves()) {
+      if (move.pass() == pass && move.string() == string) {
+        made = move.saddleMm() + (made == null ? 0 : made);
+      }
+    }
+    return made;
+  }
+
+  private static @Nullable Double predicted(@Nullable MoveAdvice advice, @Nullable Double made) {
+    MoveFigures figures = advice == null ? null : advice.figures();
+    return figures == null || made == null
+        ? null
+        : Double.valueOf(figures.cents12Before() + made * figures.centsPerMm());
+  }
+}
