@@ -1,0 +1,131 @@
+package sillet.store;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.List;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.Test;
+import sillet.logbook.actions.AddCustomer;
+import sillet.logbook.actions.AddInstrument;
+import sillet.logbook.actions.HandOut;
+import sillet.logbook.actions.KeepStringSet;
+import sillet.logbook.actions.LogWork;
+import sillet.logbook.actions.NameShop;
+import sillet.logbook.actions.RecordChecks;
+import sillet.logbook.actions.RecordMoves;
+import sillet.logbook.actions.RecordReadings;
+import sillet.logbook.actions.TakeIn;
+import sillet.logbook.actions.WriteNote;
+import sillet.logbook.shop.Shop;
+import sillet.logbook.visits.VisitRecord;
+import sillet.store.reading.Kept;
+
+class LogbookRoundTripTest {
+  private final Logbook logbook = Logbook.inMemory();
+
+  @AfterEach
+  void close() {
+    logbook.close();
+  }
+
+  private void perform(sillet.logbook.actions.Action action) {
+    logbook.perform(action, BenchDay.TECHNICIAN);
+  }
+
+  @Test
+  void keepsTheShopWhole() {
+    assertThat(logbook.shop().shop()).isEmpty();
+    perform(new NameShop(BenchDay.shop()));
+    assertThat(logbook.shop().shop()).contains(new Kept<>(BenchDay.shop(), 1));
+    Shop later = Shop.usual("Quill & Sons", List.of("Ada Quill"));
+    perform(new NameShop(later));
+    assertThat(logbook.shop().shop()).contains(new Kept<>(later, 2));
+  }
+
+  @Test
+  void keepsCustomerAndInstrumentWhole() {
+    perform(new AddCustomer(BenchDay.customer()));
+    perform(new AddInstrument(BenchDay.instrument()));
+    perform(new AddInstrument(BenchDay.shortFifth()));
+    assertThat(logbook.shop().customer(BenchDay.CUSTOMER_ID))
+        .contains(new Kept<>(BenchDay.customer(), 1));
+    var line = logbook.instruments().instrument(BenchDay.INSTRUMENT_ID).orElseThrow();
+    assertThat(line.instrument()).isEqualTo(new Kept<>(BenchDay.instrument(), 1));
+    assertThat(line.customer()).isEqualTo(BenchDay.customer());
+    var nobodys = logbook.instruments().instrument(BenchDay.SHORT_FIFTH_ID).orElseThrow();
+    assertThat(nobodys.instrument().what()).isEqualTo(BenchDay.shortFifth());
+    assertThat(nobodys.customer()).isNull();
+  }
+
+  @Test
+  void keepsTheNewestFormOfAStringSet() {
+    perform(new KeepStringSet(BenchDay.set()));
+    perform(new KeepStringSet(BenchDay.set()));
+    assertThat(logbook.stringSets().all()).containsExactly(BenchDay.set());
+  }
+
+  @Test
+  void keepsAVisitWithEverythingThatWasAddedToIt() {
+    takeIn();
+    perform(new RecordChecks(BenchDay.VISIT_ID, BenchDay.checks()));
+    perform(new RecordReadings(BenchDay.VISIT_ID, BenchDay.readings()));
+    perform(new RecordMoves(BenchDay.VISIT_ID, BenchDay.moves()));
+    perform(new LogWork(BenchDay.VISIT_ID, BenchDay.work()));
+    perform(new WriteNote(BenchDay.VISIT_ID, BenchDay.note()));
+    VisitRecord expected =
+        new VisitRecord(
+            BenchDay.visit(),
+            BenchDay.instrument(),
+            BenchDay.customer(),
+            BenchDay.checks(),
+            BenchDay.readings(),
+            BenchDay.moves(),
+            List.of(BenchDay.work()),
+            List.of(BenchDay.note()));
+    assertThat(logbook.visits().byTicket(BenchDay.TICKET)).contains(expected);
+    assertThat(logbook.visits().byId(BenchDay.VISIT_ID)).contains(expected);
+    assertThat(logbook.visits().ofInstrument(BenchDay.INSTRUMENT_ID)).containsExactly(expected);
+  }
+
+  @Test
+  void keepsAVisitOfWhichHardlyAnythingIsKnown() {
+    perform(new AddInstrument(BenchDay.shortFifth()));
+    perform(new TakeIn(BenchDay.secondVisit()));
+    VisitRecord record = logbook.visits().byId(BenchDay.SECOND_VISIT_ID).orElseThrow();
+    assertThat(record.visit()).isEqualTo(BenchDay.secondVisit());
+    assertThat(record.customer()).isNull();
+  }
+
+  @Test
+  void countsOnFromTheHighestTicket() {
+    assertThat(logbook.visits().nextTicket()).isEqualTo(1);
+    takeIn();
+    assertThat(logbook.visits().nextTicket()).isEqualTo(BenchDay.TICKET + 1);
+  }
+
+  @Test
+  void takesAVisitOffTheBenchWhenItIsHandedOut() {
+    takeIn();
+    assertThat(logbook.visits().open())
+        .singleElement()
+        .satisfies(line -> assertThat(line.ticket()).isEqualTo(BenchDay.TICKET));
+    perform(new HandOut(BenchDay.VISIT_ID, BenchDay.DAY));
+    assertThat(logbook.visits().open()).isEmpty();
+    assertThat(logbook.visits().byId(BenchDay.VISIT_ID).orElseThrow().visit().handedOut())
+        .isEqualTo(BenchDay.DAY);
+  }
+
+  @Test
+  void numbersActionsFromOneWithoutGaps() {
+    assertThat(logbook.perform(new AddCustomer(BenchDay.customer()), "B. Rook").sequence())
+        .isEqualTo(1);
+    assertThat(logbook.perform(new AddInstrument(BenchDay.instrument()), "B. Rook").sequence())
+        .isEqualTo(2);
+  }
+
+  private void takeIn() {
+    perform(new AddCustomer(BenchDay.customer()));
+    perform(new AddInstrument(BenchDay.instrument()));
+    perform(new TakeIn(BenchDay.visit()));
+  }
+}
