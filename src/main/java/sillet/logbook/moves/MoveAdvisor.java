@@ -95,7 +95,8 @@ public final class MoveAdvisor {
         estimate.cents12After(),
         estimate.rmsBefore(),
         estimate.rmsAfter(),
-        estimate.centsPerMetre() / MM_PER_M);
+        estimate.centsPerMetre() / MM_PER_M,
+        estimate.setbackNow() * MM_PER_M);
   }
 
   /**

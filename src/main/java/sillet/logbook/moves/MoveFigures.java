@@ -17,6 +17,7 @@ import org.jspecify.annotations.Nullable;
  * @param rmsBefore root mean square over frets 1 to 12, cents
  * @param rmsAfter the same after the move
  * @param centsPerMm what a millimetre away from the neck does to fret 12, negative
+ * @param setbackMm where the readings say the saddle stands, away from its nominal place
  */
 public record MoveFigures(
     double saddleMm,
@@ -29,7 +30,8 @@ public record MoveFigures(
     double cents12After,
     double rmsBefore,
     double rmsAfter,
-    double centsPerMm) {
+    double centsPerMm,
+    double setbackMm) {
 
   /** Standard deviations on each side of the best move inside a 95 % interval. */
   public static final double SDS_IN_INTERVAL = 1.96;
@@ -57,7 +59,8 @@ public record MoveFigures(
         cents12After,
         rmsBefore,
         rmsAfter,
-        centsPerMmSeen);
+        centsPerMmSeen,
+        setbackMm);
   }
 
   /**
