@@ -1,5 +1,7 @@
 package sillet.rules;
 
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideInAnyPackage;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideOutsideOfPackage;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.classes;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 import static com.tngtech.archunit.library.Architectures.layeredArchitecture;
@@ -12,7 +14,10 @@ import org.junit.jupiter.api.Test;
 
 /** Which part of the program may know which other part. */
 class LayersTest {
-  private static final Set<String> NOT_A_SCREEN = Set.of("shell", "controls", "drawing", "theme");
+  private static final String[] SHARED = {
+    "sillet.desktop.controls..", "sillet.desktop.drawing..", "sillet.desktop.theme.."
+  };
+  private static final Set<String> NO_SCREEN = Set.of("shell", "controls", "drawing", "theme");
 
   @Test
   void everyLayerUsesOnlyLayersBelowIt() {
@@ -84,7 +89,7 @@ class LayersTest {
             .matching("sillet.desktop.(*)..")
             .that(
                 DescribedPredicate.<Slice>describe(
-                    "are screens", slice -> !NOT_A_SCREEN.contains(slice.getNamePart(1))))
+                    "are screens", slice -> !NO_SCREEN.contains(slice.getNamePart(1))))
             .should()
             .notDependOnEachOther()
             .because("a screen reaches another one only by asking the shell to go there"));
@@ -105,20 +110,16 @@ class LayersTest {
   }
 
   @Test
-  void controlsAndDrawingKnowNoScreen() {
+  void whatEveryScreenIsBuiltFromKnowsNoScreen() {
     Sillet.holds(
         classes()
             .that()
-            .resideInAnyPackage("sillet.desktop.controls..", "sillet.desktop.drawing..")
+            .resideInAnyPackage(SHARED)
             .should()
             .onlyDependOnClassesThat(
-                Sillet.describe(
-                    "belong to no screen",
-                    type ->
-                        !type.getPackageName().startsWith("sillet.desktop.")
-                            || type.getPackageName().startsWith("sillet.desktop.controls")
-                            || type.getPackageName().startsWith("sillet.desktop.drawing")
-                            || type.getPackageName().startsWith("sillet.desktop.theme")))
+                resideOutsideOfPackage(Sillet.DESKTOP)
+                    .or(resideInAnyPackage(SHARED))
+                    .as("are neither screen nor shell"))
             .because("every screen is built from them"));
   }
 }

@@ -10,6 +10,7 @@ import java.util.TreeSet;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestInstance;
 
 /**
  * The words the program says and the words it has, compared in both directions.
@@ -18,6 +19,7 @@ import org.junit.jupiter.api.Test;
  * whose first part is the first part of a key in the bundle ({@code move.away}); names of files are
  * not meant. Keys are always written out whole, so that a search finds them.
  */
+@TestInstance(TestInstance.Lifecycle.PER_CLASS)
 class TextKeysTest {
   private static final Path SOURCES = Path.of("src/main/java");
   private static final Path BUNDLE = Path.of("src/main/resources/sillet/texts.properties");
@@ -25,40 +27,47 @@ class TextKeysTest {
   private static final Pattern FILE =
       Pattern.compile(".*\\.(csv|css|db|fxml|json|log|pdf|png|properties|sql|tmp|ttf|txt|zip)");
 
+  private final SourceStrings strings;
+  private final TextBundle bundle;
+
+  TextKeysTest() throws IOException {
+    strings = SourceStrings.of(SOURCES);
+    bundle = TextBundle.read(BUNDLE);
+  }
+
   @Test
-  void everyKeyUsedHasAText() throws IOException {
-    Set<String> keys = TextBundle.read(BUNDLE).keys();
-    Set<String> missing = keysUsed(SourceStrings.of(SOURCES), keys);
+  void everyKeyUsedHasAText() {
+    Set<String> keys = bundle.keys();
+    Set<String> missing = keysUsed(keys);
     missing.removeAll(keys);
 
     assertThat(missing).as("add to %s:\n%s\n", BUNDLE, lines(missing)).isEmpty();
   }
 
   @Test
-  void everyTextIsUsed() throws IOException {
-    Set<String> unused = new TreeSet<>(TextBundle.read(BUNDLE).keys());
-    unused.removeAll(SourceStrings.of(SOURCES).all());
+  void everyTextIsUsed() {
+    Set<String> unused = new TreeSet<>(bundle.keys());
+    unused.removeAll(strings.all());
 
     assertThat(unused).as("take out of %s:\n%s\n", BUNDLE, lines(unused)).isEmpty();
   }
 
   @Test
-  void everyKeyIsWrittenOutWhole() throws IOException {
-    assertThat(SourceStrings.of(SOURCES).gluedKeys()).isEmpty();
+  void everyKeyIsWrittenOutWhole() {
+    assertThat(strings.gluedKeys()).isEmpty();
   }
 
   @Test
-  void noKeyStandsTwice() throws IOException {
-    assertThat(TextBundle.read(BUNDLE).twice()).isEmpty();
+  void noKeyStandsTwice() {
+    assertThat(bundle.twice()).isEmpty();
   }
 
   @Test
-  void everyKeyIsDottedAndLowerCase() throws IOException {
-    assertThat(TextBundle.read(BUNDLE).keys())
-        .allSatisfy(key -> assertThat(key).matches(KEY).doesNotMatch(FILE));
+  void everyKeyIsDottedAndLowerCase() {
+    assertThat(bundle.keys()).allSatisfy(key -> assertThat(key).matches(KEY).doesNotMatch(FILE));
   }
 
-  private static Set<String> keysUsed(SourceStrings strings, Set<String> keys) {
+  private Set<String> keysUsed(Set<String> keys) {
     Set<String> openings = keys.stream().map(TextKeysTest::opening).collect(Collectors.toSet());
     Set<String> used = new TreeSet<>(strings.said());
     strings.all().stream()
