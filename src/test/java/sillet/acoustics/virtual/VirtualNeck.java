@@ -59,6 +59,16 @@ public final class VirtualNeck {
     return scale;
   }
 
+  /** Deepest gap under a straightedge laid over frets 1 and 14. */
+  double relief() {
+    double deepest = 0;
+    for (int fret = 1; fret <= 14; fret++) {
+      double along = (x[fret] - x[1]) / (x[14] - x[1]);
+      deepest = Math.max(deepest, y[1] + along * (y[14] - y[1]) - y[fret]);
+    }
+    return deepest;
+  }
+
   double x(int fret) {
     return x[fret];
   }

@@ -62,6 +62,11 @@ public final class VirtualString {
     return line - neck.y(fret);
   }
 
+  /** Depth of the neck's bow, as a straightedge over frets 1 and 14 finds it. */
+  public double relief() {
+    return neck.relief();
+  }
+
   private double cents(int fret, double setback, double nutSetback, double referenceHz) {
     double length = openLength(setback, nutSetback);
     TautPath before = nutToFinger(fret, setback, nutSetback);

@@ -1,0 +1,92 @@
+package sillet.acoustics.bench;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import sillet.acoustics.moves.FretReading;
+import sillet.acoustics.moves.Reference;
+import sillet.acoustics.neck.Clearances;
+import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.virtual.Luck;
+import sillet.acoustics.virtual.VirtualInstrument;
+import sillet.acoustics.virtual.VirtualString;
+import sillet.acoustics.wire.Construction;
+import sillet.acoustics.wire.CoreShape;
+import sillet.acoustics.wire.StringEstimate;
+import sillet.acoustics.wire.StringSpec;
+
+/** Types what can be known of a string, with the errors of rule and gauge, and reads the tuner. */
+final class Technician {
+  /** Scatter of one reading of the difference, cents. */
+  private static final double SCATTER = 0.1;
+
+  /** What the tuner shows, cents. */
+  private static final double SHOWN_TO = 0.1;
+
+  /** As found, the saddle is this far from its best place: 2 mm of 648. */
+  private static final double FOUND_SHARE = 2.0 / 648;
+
+  private final Luck luck;
+
+  Technician(Luck luck) {
+    this.luck = luck;
+  }
+
+  /** The strings of an instrument, its saddles standing where chance left them. */
+  List<BenchString> takeIn(VirtualInstrument instrument) {
+    double true0 = instrument.neck().scale();
+    double scale = Math.rint((true0 + luck.noise(3e-4)) / 5e-4) * 5e-4;
+    boolean heights = luck.chance(0.5);
+    Reference against = luck.chance(0.3) ? Reference.HARMONIC : Reference.OPEN;
+    List<BenchString> strings = new ArrayList<>();
+    for (VirtualInstrument.Course course : instrument.strings()) {
+      StringSpec spec = spec(course);
+      double hz = course.plan().hz();
+      Clearances clearances =
+          heights ? measured(course.string()) : Clearances.usual(spec.construction());
+      StringLie typed =
+          StringLie.nominal(StringEstimate.of(spec, hz, scale), hz, scale, clearances);
+      Truth truth = new Truth(course.string(), true0);
+      double found = truth.bestForOctave(against) + luck.noise(FOUND_SHARE * true0);
+      strings.add(new BenchString(instrument.kind(), truth, typed, against, found));
+    }
+    return strings;
+  }
+
+  /** One try at a fret, as the tuner shows it. */
+  FretReading read(BenchString string, int fret) {
+    double heard =
+        string.truth().cents(fret, string.against(), string.found()) + luck.noise(SCATTER);
+    double shown = Math.rint(heard / SHOWN_TO) * SHOWN_TO;
+    return new FretReading(fret, shown, Math.hypot(SCATTER, SHOWN_TO / Math.sqrt(12)));
+  }
+
+  /** Readings at several frets. */
+  List<FretReading> read(BenchString string, int... frets) {
+    List<FretReading> readings = new ArrayList<>();
+    for (int fret : frets) {
+      readings.add(read(string, fret));
+    }
+    return readings;
+  }
+
+  /** The packet; now and then a core or a unit mass is known. */
+  private StringSpec spec(VirtualInstrument.Course course) {
+    Construction construction = Construction.valueOf(course.plan().construction().name());
+    boolean core = construction.wound() && construction.steel() && luck.chance(0.25);
+    boolean mass = luck.chance(0.15);
+    @Nullable Double typedCore = core ? course.drawn().core() * (1 + luck.noise(0.01)) : null;
+    @Nullable Double typedMass =
+        mass ? course.drawn().wire().unitMass(0) * (1 + luck.noise(0.01)) : null;
+    return new StringSpec(
+        course.plan().diameter(), construction, CoreShape.ROUND, typedCore, typedMass);
+  }
+
+  /** Rule over fret 12, feelers over fret 1, a straightedge for the relief it finds there. */
+  private Clearances measured(VirtualString string) {
+    return new Clearances(
+        string.clearance(12) + luck.noise(8e-5),
+        string.clearance(1) + luck.noise(2.5e-5),
+        Math.max(0, string.relief() + luck.noise(3e-5)));
+  }
+}
