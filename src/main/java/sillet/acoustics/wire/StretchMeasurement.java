@@ -7,9 +7,9 @@ package sillet.acoustics.wire;
  * G. Beausoleil, J. Acoust. Soc. Am. 156(1), 683 (2024). The slope df/dL is the least-squares line
  * through the readings; f is the nominal pitch of the string, which is what their table follows.
  */
-public final class StretchTest {
+public final class StretchMeasurement {
 
-  private StretchTest() {}
+  private StretchMeasurement() {}
 
   /**
    * R of a string whose mark, {@code length} away from its fixed end, was pulled along.
