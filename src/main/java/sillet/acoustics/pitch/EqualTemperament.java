@@ -13,9 +13,6 @@ public final class EqualTemperament {
   /** Semitones in one octave. */
   public static final int SEMITONES = 12;
 
-  /** MIDI number of A4; MIDI counts semitones upward from C-1 = 0. */
-  private static final int MIDI_A4 = 69;
-
   private static final int TABLE_SIZE = 49;
 
   private EqualTemperament() {}
@@ -51,10 +48,5 @@ public final class EqualTemperament {
       throw new IllegalArgumentException("reference pitch must be above zero, is " + a4);
     }
     return a4 * ratio(semitonesFromA4);
-  }
-
-  /** Frequency in Hz of a note by its MIDI number (E2 40, E4 64, A4 69). */
-  public static double midiHz(int midi, double a4) {
-    return frequency(midi - MIDI_A4, a4);
   }
 }

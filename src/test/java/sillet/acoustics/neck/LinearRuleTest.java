@@ -11,8 +11,8 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 import sillet.acoustics.pitch.Cents;
-import sillet.acoustics.pitch.EqualTemperament;
 import sillet.acoustics.solve.RootSearch;
+import sillet.acoustics.tables.Notes;
 import sillet.acoustics.tables.Row;
 import sillet.acoustics.tables.Tables;
 import sillet.acoustics.wire.Construction;
@@ -129,7 +129,7 @@ class LinearRuleTest {
   }
 
   private static StringLie usual(double gauge, Construction construction, int midi) {
-    double hz = EqualTemperament.midiHz(midi, 440);
+    double hz = Notes.hz(midi);
     StringSpec spec = StringSpec.of(gauge * 0.0254, construction);
     return StringLie.nominal(
         StringEstimate.of(spec, hz, SCALE), hz, SCALE, Clearances.usual(construction));

@@ -10,7 +10,7 @@ import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
-import sillet.acoustics.pitch.EqualTemperament;
+import sillet.acoustics.tables.Notes;
 import sillet.acoustics.tables.Row;
 import sillet.acoustics.tables.Tables;
 import sillet.acoustics.wire.StringConstants;
@@ -36,7 +36,7 @@ class InharmonicityTest {
   void comesNearTheMeasuredStrings(Row row) {
     double diameter = row.number("gauge_in") * INCH;
     double length = row.number("length_mm") * 1e-3;
-    double hz = EqualTemperament.midiHz((int) row.number("midi"), 440);
+    double hz = Notes.hz((int) row.number("midi"));
     double unitMass = DENSITY * Math.PI * diameter * diameter / 4;
     double tension = unitMass * 4 * length * length * hz * hz;
     double b = 1e5 * Inharmonicity.fletcher(MODULUS, diameter, tension, length);

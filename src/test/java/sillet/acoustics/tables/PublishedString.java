@@ -2,7 +2,6 @@ package sillet.acoustics.tables;
 
 import java.util.List;
 import java.util.Map;
-import sillet.acoustics.pitch.EqualTemperament;
 
 /** One string of the 2024 table, in SI units; see setbacks-2024.csv for its source. */
 public record PublishedString(Row row) {
@@ -19,7 +18,7 @@ public record PublishedString(Row row) {
   }
 
   public static double hz(String note) {
-    return EqualTemperament.midiHz(MIDI.get(note), EqualTemperament.STANDARD_A4);
+    return Notes.hz(MIDI.get(note));
   }
 
   public double hz() {

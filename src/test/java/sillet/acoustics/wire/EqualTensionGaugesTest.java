@@ -6,7 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
-import sillet.acoustics.pitch.EqualTemperament;
+import sillet.acoustics.tables.Notes;
 
 /**
  * Common practice, no source: strings of one make, tuned in fourths at equal tension, go up in
@@ -24,8 +24,8 @@ class EqualTensionGaugesTest {
   @ParameterizedTest(name = "{0} fourths down: {1} thousandths")
   @CsvSource({"0, 45", "1, 60", "2, 80", "3, 106.7", "4, 142"})
   void goesUpInGaugeByFourThirds(int fourths, double thousandths) {
-    double hz = EqualTemperament.midiHz(43 - FOURTH * fourths, 440);
-    double unitMass = tension(FIRST_GAUGE, EqualTemperament.midiHz(43, 440)) / speedSquared(hz);
+    double hz = Notes.hz(43 - FOURTH * fourths);
+    double unitMass = tension(FIRST_GAUGE, Notes.hz(43)) / speedSquared(hz);
     assertThat(1000 * gaugeOf(unitMass)).isCloseTo(thousandths, within(1.0));
   }
 
@@ -37,8 +37,8 @@ class EqualTensionGaugesTest {
   @ParameterizedTest(name = "{1} thousandths pull as hard as 45 (within 2 %)")
   @CsvSource({"1, 60", "2, 80", "3, 106.7", "4, 142"})
   void pullsAlikeOnEveryString(int fourths, double thousandths) {
-    double lower = tension(thousandths / 1000, EqualTemperament.midiHz(43 - FOURTH * fourths, 440));
-    double first = tension(FIRST_GAUGE, EqualTemperament.midiHz(43, 440));
+    double lower = tension(thousandths / 1000, Notes.hz(43 - FOURTH * fourths));
+    double first = tension(FIRST_GAUGE, Notes.hz(43));
     assertThat(lower / first).isCloseTo(1, within(0.02));
   }
 
