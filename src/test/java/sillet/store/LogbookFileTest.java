@@ -1,7 +1,7 @@
 package sillet.store;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static sillet.store.Refusals.refuses;
 
 import java.io.IOException;
 import java.nio.file.Files;
@@ -9,13 +9,11 @@ import java.nio.file.Path;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.util.List;
 import java.util.stream.Stream;
-import org.assertj.core.api.ThrowableAssert.ThrowingCallable;
 import org.junit.jupiter.api.Assumptions;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import sillet.logbook.actions.AddCustomer;
-import sillet.store.engine.LogbookProblem;
 import sillet.store.engine.ProblemKind;
 import sillet.store.place.LogbookPlace;
 import sillet.store.reading.Kept;
@@ -27,12 +25,6 @@ class LogbookFileTest {
   @BeforeEach
   void choosePlace() {
     place = LogbookPlace.of(folder.resolve("shop/deep/logbook.mv.db").toString());
-  }
-
-  private static void refuses(ProblemKind kind, ThrowingCallable call) {
-    assertThatThrownBy(call)
-        .isInstanceOfSatisfying(
-            LogbookProblem.class, problem -> assertThat(problem.kind()).isEqualTo(kind));
   }
 
   @Test

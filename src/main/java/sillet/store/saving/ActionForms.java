@@ -53,6 +53,11 @@ public final class ActionForms {
     KNOWN.forEach(form -> readers.put(key(form.name(), form.number()), form.reader()));
   }
 
+  /** Name and number of every form, as in {@code take in 1}. */
+  static List<String> known() {
+    return KNOWN.stream().map(form -> key(form.name(), form.number())).toList();
+  }
+
   private record Form(String name, int number, Class<? extends Action> reader) {}
 
   private static String key(String name, int form) {
