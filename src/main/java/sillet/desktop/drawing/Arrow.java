@@ -19,7 +19,7 @@ public final class Arrow {
     double side = Math.signum(toX - fromX);
     double headLength = Math.min(Math.max(5, HEAD_LENGTH * stroke.width()), Math.abs(toX - fromX));
     double headHalf = Math.max(4, HEAD_HALF * stroke.width());
-    double at = Math.round(stroke.width()) % 2 == 1 ? pen.middle(y) : pen.edge(y);
+    double at = Snap.px(stroke.width()) % 2 == 1 ? pen.middle(y) : pen.edge(y);
     double neck = toX - side * headLength;
     pen.level(fromX, neck, at, stroke);
     pen.area(stroke.colour(), neck, at - headHalf, toX, at, neck, at + headHalf);

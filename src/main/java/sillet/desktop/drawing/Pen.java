@@ -48,7 +48,7 @@ public final class Pen {
 
   /** The nearest pixel edge. */
   public double edge(double at) {
-    return Math.round(at * pixelsPerUnit) / pixelsPerUnit;
+    return Snap.px(at * pixelsPerUnit) / pixelsPerUnit;
   }
 
   /** The nearest middle of a pixel. */
@@ -63,7 +63,7 @@ public final class Pen {
   }
 
   private double crisp(double at, double width) {
-    return Math.round(width * pixelsPerUnit) % 2 == 1 ? middle(at) : edge(at);
+    return Snap.px(width * pixelsPerUnit) % 2 == 1 ? middle(at) : edge(at);
   }
 
   /** A level line; widths under {@link #THIN_PX} are drawn one pixel wide or as given, crisp. */
@@ -87,24 +87,32 @@ public final class Pen {
   /** A line through the points x0, y0, x1, y1 and so on. */
   public void path(Stroke stroke, double... points) {
     take(stroke);
-    context.beginPath();
-    context.moveTo(points[0], points[1]);
-    for (int i = 2; i < points.length; i += 2) {
-      context.lineTo(points[i], points[i + 1]);
-    }
+    trace(points);
+    context.stroke();
+  }
+
+  /** A closed line through the given corners. */
+  public void outlined(Stroke stroke, double... points) {
+    take(stroke);
+    trace(points);
+    context.closePath();
     context.stroke();
   }
 
   /** A filled area with the given corners. */
   public void area(Color fill, double... points) {
     context.setFill(fill);
+    trace(points);
+    context.closePath();
+    context.fill();
+  }
+
+  private void trace(double... points) {
     context.beginPath();
     context.moveTo(points[0], points[1]);
     for (int i = 2; i < points.length; i += 2) {
       context.lineTo(points[i], points[i + 1]);
     }
-    context.closePath();
-    context.fill();
   }
 
   /** A full block, its edges on pixel edges, never thinner than a pixel. */
@@ -153,10 +161,16 @@ public final class Pen {
 
   /** One line of text. The point is on the baseline. */
   public void text(String text, Lettering type, double x, double baseline) {
+    double share =
+        switch (type.alignment()) {
+          case RIGHT -> 1;
+          case CENTER -> 0.5;
+          default -> 0;
+        };
+    double from = share == 0 ? x : x - share * type.width(text, em);
     context.setFont(type.font(em));
     context.setFill(type.colour());
-    context.setTextAlign(type.alignment());
-    context.fillText(text, x, edge(baseline));
+    context.fillText(text, edge(from), edge(baseline));
   }
 
   /** One line of text whose capitals and figures stand level with the given height. */

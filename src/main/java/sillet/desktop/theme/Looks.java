@@ -94,6 +94,10 @@ public final class Looks {
   public static final String TICKET_NUMBER = "ticket-number";
   public static final String MOVE_FIGURE = "move-figure";
   public static final String MOVE_DIRECTION = "move-direction";
+
+  /** "turns" and "at" beside a figure. */
+  public static final String MOVE_UNIT = "move-unit";
+
   public static final String MOVE_SMALL = "move-small";
   public static final String NOW_FIGURE = "now-figure";
   public static final String NOW_DIRECTION = "now-direction";
@@ -116,6 +120,9 @@ public final class Looks {
 
   /** What was typed cannot be taken: pencil border. */
   public static final PseudoClass ERROR = PseudoClass.getPseudoClass("error");
+
+  /** A place that stays as it is: its figure is not one to act on. */
+  public static final PseudoClass STANDING = PseudoClass.getPseudoClass("standing");
 
   private Looks() {}
 }

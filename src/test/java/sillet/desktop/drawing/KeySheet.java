@@ -53,6 +53,11 @@ final class KeySheet {
     grid.setHgap(24);
     grid.setVgap(8);
     grid.addRow(0, cell("", Looks.UNREAD), cell("+5.0", null), cell("+6.1", Looks.STALE));
+    TextField lit = cell("+5.0", PseudoClass.getPseudoClass("focused"));
+    grid.add(lit, 3, 0);
+    TextField wrong = cell("31o", Looks.ERROR);
+    wrong.pseudoClassStateChanged(PseudoClass.getPseudoClass("focused"), true);
+    grid.add(wrong, 3, 1);
     grid.addRow(1, tries("+2.8", -1), tries("+3.1", 2), cell("31o", Looks.ERROR));
     return grid;
   }

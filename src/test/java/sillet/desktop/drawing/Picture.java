@@ -48,6 +48,11 @@ public final class Picture {
         });
   }
 
+  /** Renders a scene as it is; on the FX thread only. */
+  public static Picture of(Scene scene) {
+    return new Picture(scene.snapshot(null));
+  }
+
   /** Runs on the FX thread and waits. */
   public static <V> V onFxThread(Callable<V> work) {
     FutureTask<V> task = new FutureTask<>(work);
