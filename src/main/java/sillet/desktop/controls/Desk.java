@@ -1,10 +1,12 @@
 package sillet.desktop.controls;
 
 import sillet.logbook.text.Texts;
+import sillet.store.Logbook;
 
 /**
  * What every screen is handed.
  *
+ * @param logbook what is open; to be touched in the background only
  * @param background where work on the logbook is done
  * @param goTo the other places
  * @param ask questions to the technician
@@ -13,4 +15,10 @@ import sillet.logbook.text.Texts;
  * @param atBench shop, technician and clock
  */
 public record Desk(
-    Background background, GoTo goTo, Ask ask, SaveSign sign, Texts texts, AtBench atBench) {}
+    Logbook logbook,
+    Background background,
+    GoTo goTo,
+    Ask ask,
+    SaveSign sign,
+    Texts texts,
+    AtBench atBench) {}

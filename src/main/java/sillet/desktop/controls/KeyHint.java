@@ -1,0 +1,30 @@
+package sillet.desktop.controls;
+
+import javafx.scene.control.Button;
+import javafx.scene.control.ContentDisplay;
+import javafx.scene.control.Label;
+import sillet.desktop.theme.Looks;
+
+/** The key that does the same, written beside a button's name. */
+public final class KeyHint {
+  private KeyHint() {}
+
+  /**
+   * Makes a button.
+   *
+   * @param name what it does
+   * @param key the key that does it too
+   * @param action what happens
+   */
+  public static Button button(String name, String key, Runnable action) {
+    Button button = new Button(name);
+    Label hint = new Label(key);
+    hint.getStyleClass().add(Looks.KEY_HINT);
+    button.setGraphic(hint);
+    button.setContentDisplay(ContentDisplay.RIGHT);
+    button.setMnemonicParsing(false);
+    button.setAccessibleText(name + ", " + key);
+    button.setOnAction(pressed -> action.run());
+    return button;
+  }
+}
