@@ -16,6 +16,7 @@ import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
 import sillet.logbook.actions.RecordMoves;
 import sillet.logbook.actions.RecordReadings;
+import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.ReviseCustomer;
 import sillet.logbook.actions.ReviseInstrument;
 import sillet.logbook.actions.TakeIn;
@@ -224,6 +225,7 @@ public final class BenchDay {
         new KeepStringSet(new StringSet(SET_ID, "first name", set().strings().subList(0, 1))),
         new KeepStringSet(set()),
         new TakeIn(visit()),
+        new RecordTravel(VISIT_ID, List.of(new Travel(2, 4.0, null))),
         new RecordChecks(VISIT_ID, checks()),
         new RecordReadings(VISIT_ID, readings()),
         new RecordMoves(VISIT_ID, moves()),

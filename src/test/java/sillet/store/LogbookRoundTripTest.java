@@ -14,9 +14,11 @@ import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
 import sillet.logbook.actions.RecordMoves;
 import sillet.logbook.actions.RecordReadings;
+import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.TakeIn;
 import sillet.logbook.actions.WriteNote;
 import sillet.logbook.shop.Shop;
+import sillet.logbook.visits.Travel;
 import sillet.logbook.visits.VisitRecord;
 import sillet.store.reading.Kept;
 
@@ -85,6 +87,17 @@ class LogbookRoundTripTest {
     assertThat(logbook.visits().byTicket(BenchDay.TICKET)).contains(expected);
     assertThat(logbook.visits().byId(BenchDay.VISIT_ID)).contains(expected);
     assertThat(logbook.visits().ofInstrument(BenchDay.INSTRUMENT_ID)).containsExactly(expected);
+  }
+
+  @Test
+  void putsTheRoomAtASaddleInPlaceOfWhatWasKnownOfIt() {
+    takeIn();
+    Travel newer = new Travel(6, 2.5, 0.5);
+    Travel added = new Travel(2, 4.0, null);
+    perform(new RecordTravel(BenchDay.VISIT_ID, List.of(newer, added)));
+    perform(new RecordTravel(BenchDay.VISIT_ID, List.of(new Travel(2, 4.25, 1.0))));
+    assertThat(logbook.visits().byId(BenchDay.VISIT_ID).orElseThrow().visit().travel())
+        .containsExactly(new Travel(1, 3.5, null), newer, new Travel(2, 4.25, 1.0));
   }
 
   @Test

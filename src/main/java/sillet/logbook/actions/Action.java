@@ -14,6 +14,7 @@ public sealed interface Action
         ReviseInstrument,
         KeepStringSet,
         TakeIn,
+        RecordTravel,
         RecordChecks,
         RecordReadings,
         RecordMoves,

@@ -16,6 +16,7 @@ import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
 import sillet.logbook.actions.RecordMoves;
 import sillet.logbook.actions.RecordReadings;
+import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.ReviseCustomer;
 import sillet.logbook.actions.ReviseInstrument;
 import sillet.logbook.actions.TakeIn;
@@ -38,6 +39,7 @@ public final class ActionForms {
           new Form("revise instrument", 1, ReviseInstrument.class),
           new Form("keep string set", 1, KeepStringSet.class),
           new Form("take in", 1, TakeIn.class),
+          new Form("record travel", 1, RecordTravel.class),
           new Form("record checks", 1, RecordChecks.class),
           new Form("record readings", 1, RecordReadings.class),
           new Form("record moves", 1, RecordMoves.class),

@@ -10,6 +10,7 @@ import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
 import sillet.logbook.actions.RecordMoves;
 import sillet.logbook.actions.RecordReadings;
+import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.ReviseCustomer;
 import sillet.logbook.actions.ReviseInstrument;
 import sillet.logbook.actions.TakeIn;
@@ -35,6 +36,8 @@ final class Effects {
       StringSetEffects.keep(change, a.set());
     } else if (action instanceof TakeIn a) {
       VisitEffects.takeIn(change, a.visit());
+    } else if (action instanceof RecordTravel a) {
+      VisitEffects.travel(change, a.visitId(), a.travel());
     } else if (action instanceof HandOut a) {
       VisitEffects.handOut(change, a.visitId(), a.day());
     } else {

@@ -1,6 +1,7 @@
 package sillet.store.saving;
 
 import java.time.LocalDate;
+import java.util.List;
 import java.util.UUID;
 import org.jdbi.v3.core.statement.PreparedBatch;
 import sillet.logbook.strings.FittedString;
@@ -31,6 +32,20 @@ final class VisitEffects {
       INSERT INTO saddle_travel (visit_id, item, string_number, back_mm, forward_mm)
       VALUES (:visitId, :item, :string, :backMm, :forwardMm)
       """;
+  private static final String UPDATE_TRAVEL =
+      """
+      UPDATE saddle_travel SET back_mm = :backMm, forward_mm = :forwardMm
+      WHERE visit_id = :visitId AND string_number = :string
+      """;
+
+  /** Behind what is there; the keys of a visit's rows need no other order. */
+  private static final String ADD_TRAVEL =
+      """
+      INSERT INTO saddle_travel (visit_id, item, string_number, back_mm, forward_mm)
+      SELECT :visitId, COALESCE(MAX(t.item), -1) + 1, :string, :backMm, :forwardMm
+      FROM saddle_travel t WHERE t.visit_id = :visitId
+      """;
+
   private static final String TOUCH_INSTRUMENT =
       """
       UPDATE instrument SET last_action = :sequence
@@ -61,6 +76,28 @@ final class VisitEffects {
     }
     travel.execute();
     touch(change, visit.id());
+  }
+
+  /** Puts the room at each saddle in place of what was known of it. */
+  static void travel(Change change, UUID visitId, List<Travel> travel) {
+    for (Travel room : travel) {
+      int known =
+          change
+              .handle()
+              .createUpdate(UPDATE_TRAVEL)
+              .bindMethods(room)
+              .bind("visitId", visitId)
+              .execute();
+      if (known == 0) {
+        change
+            .handle()
+            .createUpdate(ADD_TRAVEL)
+            .bindMethods(room)
+            .bind("visitId", visitId)
+            .execute();
+      }
+    }
+    touch(change, visitId);
   }
 
   static void handOut(Change change, UUID visitId, LocalDate day) {
