@@ -17,17 +17,24 @@ final class OctaveMove {
     return present(task).flatMap(present -> from(task, present));
   }
 
-  /** How the string lies before the move, and how sure its note at fret 12 is. */
-  record Present(StringLie lie, FrettedPitch pitch, double cents12Sd) {}
+  /** How the string lies before the move; fret 12 as read or estimated, and how sure that is. */
+  record Present(StringLie lie, FrettedPitch pitch, double cents12, double cents12Sd) {}
 
   static Outcome<Present> present(MoveTask task) {
     FretReading octave = task.at(OctaveNote.FRET);
     if (octave == null) {
-      return Knowledge.of(task)
-          .map(known -> new Present(known.lie(), known.now(), cents12Sd(known)));
+      return Knowledge.of(task).map(known -> estimated(task, known));
     }
     return OctaveNote.with(task.lie(), task.against(), octave.cents())
-        .flatMap(lie -> FrettedPitch.of(lie).map(pitch -> new Present(lie, pitch, octave.sd())));
+        .flatMap(
+            lie ->
+                FrettedPitch.of(lie)
+                    .map(pitch -> new Present(lie, pitch, octave.cents(), octave.sd())));
+  }
+
+  private static Present estimated(MoveTask task, Knowledge known) {
+    double cents = OctaveNote.cents(known.now(), task.against());
+    return new Present(known.lie(), known.now(), cents, cents12Sd(known));
   }
 
   static double cents12Sd(Knowledge known) {
@@ -43,7 +50,6 @@ final class OctaveMove {
 
   private static MoveEstimate estimate(
       MoveTask task, Present present, StringLie then, FrettedPitch pitchThen) {
-    double before = OctaveNote.cents(present.pitch(), task.against());
     double after = OctaveNote.cents(pitchThen, task.against());
     double move = then.saddleSetback() - present.lie().saddleSetback();
     double slope = SaddleSlope.over(present.lie(), task.against(), move);
@@ -54,7 +60,7 @@ final class OctaveMove {
         move - Interval.NINETY_FIVE * sd,
         move + Interval.NINETY_FIVE * sd,
         0,
-        before,
+        present.cents12(),
         present.cents12Sd(),
         after,
         curve.rms(),
