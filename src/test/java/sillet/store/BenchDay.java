@@ -225,7 +225,6 @@ public final class BenchDay {
         new KeepStringSet(new StringSet(SET_ID, "first name", set().strings().subList(0, 1))),
         new KeepStringSet(set()),
         new TakeIn(visit()),
-        new RecordTravel(VISIT_ID, List.of(new Travel(2, 4.0, null))),
         new RecordChecks(VISIT_ID, checks()),
         new RecordReadings(VISIT_ID, readings()),
         new RecordMoves(VISIT_ID, moves()),
@@ -233,6 +232,7 @@ public final class BenchDay {
         new WriteNote(VISIT_ID, note()),
         new TakeIn(secondVisit()),
         new ReviseCustomer(renamed, 1),
+        new RecordTravel(VISIT_ID, List.of(new Travel(2, 4.0, null))),
         new HandOut(VISIT_ID, DAY.plusDays(3)),
         new ReviseInstrument(sold, 1));
   }
