@@ -21,8 +21,8 @@ import sillet.acoustics.wire.StringSpec;
  * Prints how long one string takes, on one thread, once the machine is warm. Nothing is asserted: a
  * test that measures time fails on a busy machine.
  *
- * <p>Run with {@code mvn -q test-compile exec:java -Dexec.classpathScope=test
- * -Dexec.mainClass=sillet.acoustics.bench.MoveSpeed}.
+ * <p>Run with {@code mvn -q test-compile org.codehaus.mojo:exec-maven-plugin:3.6.4:java
+ * -Dexec.classpathScope=test -Dexec.mainClass=sillet.acoustics.bench.MoveSpeed}.
  */
 public final class MoveSpeed {
   private static final double INCH = 0.0254;

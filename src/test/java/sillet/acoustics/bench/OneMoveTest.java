@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.util.List;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
+import sillet.acoustics.bench.Trial.Plan;
 import sillet.acoustics.bench.Trial.Way;
 import sillet.acoustics.virtual.Kind;
 
@@ -17,7 +18,7 @@ class OneMoveTest {
 
   @BeforeAll
   static void moveOnce() {
-    trial = Trial.run(1, 330, 0, List.of(Way.LENGTH_RULE, Way.OCTAVE));
+    trial = Trial.run(Plan.usual(1, 330), List.of(Way.LENGTH_RULE, Way.OCTAVE, Way.TWO_PASSES));
   }
 
   @Test
@@ -57,9 +58,27 @@ class OneMoveTest {
   }
 
   @Test
+  void aSecondPassEndsAsTrueAfterASaddleSetByHand() {
+    assertThat(trial.of(Way.TWO_PASSES).median()).isLessThanOrEqualTo(0.10);
+    assertThat(trial.of(Way.TWO_PASSES).ninetyFifth()).isLessThanOrEqualTo(0.30);
+    assertThat(trial.of(Way.TWO_PASSES).coverage()).isBetween(0.93, 0.98);
+    assertThat(trial.strangePasses()).isLessThan(trial.of(Way.TWO_PASSES).size() / 100);
+  }
+
+  @Test
+  void staysTrueOverLongMoves() {
+    List<Way> ways = List.of(Way.LENGTH_RULE, Way.OCTAVE);
+    Trial far = Trial.run(new Plan(5, 60, 0, 5.0 / 648), ways);
+    assertThat(far.of(Way.OCTAVE).ninetyFifth()).isLessThanOrEqualTo(0.30);
+    assertThat(far.of(Way.OCTAVE).coverage()).isBetween(0.92, 0.99);
+    assertThat(far.of(Way.LENGTH_RULE).ninetyFifth()).isGreaterThan(0.45);
+  }
+
+  @Test
   void holdsTheBestPlaceWhereLessWasRead() {
     Trial less =
-        Trial.run(2, 50, 0, List.of(Way.OCTAVE_UNREAD, Way.NECK, Way.NECK_AND_NUT, Way.OCTAVE));
+        Trial.run(
+            Plan.usual(2, 50), List.of(Way.OCTAVE_UNREAD, Way.NECK, Way.NECK_AND_NUT, Way.OCTAVE));
     for (Way way : List.of(Way.OCTAVE_UNREAD, Way.NECK, Way.NECK_AND_NUT)) {
       assertThat(less.of(way).coverage()).as(way.name()).isGreaterThan(0.90);
     }

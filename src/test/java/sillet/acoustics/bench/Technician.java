@@ -5,6 +5,7 @@ import java.util.List;
 import org.jspecify.annotations.Nullable;
 import sillet.acoustics.moves.FretReading;
 import sillet.acoustics.moves.Reference;
+import sillet.acoustics.moves.SecondPass;
 import sillet.acoustics.neck.Clearances;
 import sillet.acoustics.neck.StringLie;
 import sillet.acoustics.virtual.Luck;
@@ -23,13 +24,18 @@ final class Technician {
   /** What the tuner shows, cents. */
   private static final double SHOWN_TO = 0.1;
 
-  /** As found, the saddle is this far from its best place: 2 mm of 648. */
-  private static final double FOUND_SHARE = 2.0 / 648;
-
   private final Luck luck;
+  private final double foundShare;
 
-  Technician(Luck luck) {
+  /**
+   * A technician.
+   *
+   * @param foundShare how far from its best place a saddle is found, standard deviation as a share
+   *     of the scale
+   */
+  Technician(Luck luck, double foundShare) {
     this.luck = luck;
+    this.foundShare = foundShare;
   }
 
   /** The strings of an instrument, its saddles standing where chance left them. */
@@ -47,18 +53,27 @@ final class Technician {
       StringLie typed =
           StringLie.nominal(StringEstimate.of(spec, hz, scale), hz, scale, clearances);
       Truth truth = new Truth(course.string(), true0);
-      double found = truth.bestForOctave(against) + luck.noise(FOUND_SHARE * true0);
+      double found = truth.bestForOctave(against) + luck.noise(foundShare * true0);
       strings.add(new BenchString(instrument.kind(), truth, typed, against, found));
     }
     return strings;
   }
 
-  /** One try at a fret, as the tuner shows it. */
+  /** One try at a fret with the saddle as found, as the tuner shows it. */
   FretReading read(BenchString string, int fret) {
-    double heard =
-        string.truth().cents(fret, string.against(), string.found()) + luck.noise(SCATTER);
+    return read(string, fret, string.found());
+  }
+
+  /** One try at a fret with the saddle elsewhere. */
+  FretReading read(BenchString string, int fret, double setback) {
+    double heard = string.truth().cents(fret, string.against(), setback) + luck.noise(SCATTER);
     double shown = Math.rint(heard / SHOWN_TO) * SHOWN_TO;
     return new FretReading(fret, shown, Math.hypot(SCATTER, SHOWN_TO / Math.sqrt(12)));
+  }
+
+  /** Where a saddle comes to stand when it is set by hand. */
+  double set(double setback) {
+    return setback + luck.noise(SecondPass.HAND_SD);
   }
 
   /** Readings at several frets. */
