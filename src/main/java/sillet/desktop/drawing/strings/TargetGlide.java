@@ -37,6 +37,7 @@ final class TargetGlide {
     to = targets(picture);
     from = shown.length == to.length ? shown : to.clone();
     if (glide && differs()) {
+      way.set(0); // the timeline sets it only at the next pulse, one frame too late
       timeline.playFromStart();
     } else {
       way.set(1);
