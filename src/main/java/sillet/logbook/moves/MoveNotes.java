@@ -59,7 +59,7 @@ final class MoveNotes {
     String mm = Figures.fixed(Math.abs(figures.saddleMm()), 2);
     Double room = string.room().toward(figures.saddleMm());
     String roomMm = room == null ? "" : Figures.fixed(room, 2);
-    String stays = centsLeft == null ? "" : Figures.fixed(centsLeft, 1);
+    String stays = centsLeft == null ? "" : Figures.fixed(Math.abs(centsLeft), 1);
     boolean away = figures.direction() == Direction.AWAY;
     switch (verdict) {
       case LEAVE -> notes.add(Message.of("move.leave"));
