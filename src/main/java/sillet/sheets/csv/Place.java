@@ -45,7 +45,10 @@ public record Place(Kind kind, long line, long column, String header) {
       case FILE -> Message.of("sheet.at-file", sentence);
       case LINE -> Message.of("sheet.at-line", lineNo, sentence);
       case CHARACTER -> Message.of("sheet.at-character", lineNo, columnNo, sentence);
-      case CELL -> Message.of("sheet.at-cell", lineNo, columnNo, Quoted.of(header), sentence);
+      case CELL ->
+          header.isEmpty()
+              ? Message.of("sheet.at-column", lineNo, columnNo, sentence)
+              : Message.of("sheet.at-cell", lineNo, columnNo, Quoted.of(header), sentence);
     };
   }
 }

@@ -1,0 +1,43 @@
+package sillet.sheets.moves;
+
+import java.util.Comparator;
+import java.util.stream.Collectors;
+import sillet.logbook.moves.Direction;
+import sillet.logbook.moves.Finding;
+import sillet.logbook.moves.MoveAdvice;
+import sillet.logbook.text.Texts;
+import sillet.logbook.units.Figures;
+
+/** How an advice stands in the cells of a sheet. */
+public final class AdviceCells {
+  /** Decimals of a move: finer than a hand can set. */
+  public static final int MM_DECIMALS = 3;
+
+  /** Decimals of cents and of turns. */
+  public static final int CENTS_DECIMALS = 2;
+
+  private AdviceCells() {}
+
+  /** The way a move goes, as it is written: one that is written as zero goes nowhere. */
+  public static String direction(double saddleMm) {
+    String written = Figures.fixed(saddleMm, MM_DECIMALS);
+    Direction direction =
+        Double.parseDouble(written) == 0
+            ? Direction.STAY
+            : saddleMm > 0 ? Direction.AWAY : Direction.TOWARD;
+    return direction.word();
+  }
+
+  /** Causes, in an order that never changes. */
+  public static String findings(MoveAdvice advice) {
+    return advice.findings().stream()
+        .sorted(Comparator.naturalOrder())
+        .map(Finding::word)
+        .collect(Collectors.joining(";"));
+  }
+
+  /** The sentences for people, one after the other. */
+  public static String note(MoveAdvice advice, Texts texts) {
+    return advice.notes().stream().map(texts::say).collect(Collectors.joining(" "));
+  }
+}

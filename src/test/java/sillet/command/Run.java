@@ -1,0 +1,35 @@
+package sillet.command;
+
+import java.io.ByteArrayOutputStream;
+import java.io.OutputStream;
+import java.nio.charset.StandardCharsets;
+
+/**
+ * One run of the program inside this one.
+ *
+ * @param code exit code
+ * @param out standard output
+ * @param err standard error
+ */
+record Run(int code, String out, String err) {
+
+  static Run of(Object... args) {
+    ByteArrayOutputStream out = new ByteArrayOutputStream();
+    return into(out, args).withOut(out.toString(StandardCharsets.UTF_8));
+  }
+
+  /** A run whose standard output goes somewhere else. */
+  static Run into(OutputStream out, Object... args) {
+    ByteArrayOutputStream err = new ByteArrayOutputStream();
+    String[] words = new String[args.length];
+    for (int i = 0; i < args.length; i++) {
+      words[i] = args[i].toString();
+    }
+    int code = SilletCommand.run(new Terminal(out, err, () -> false), words);
+    return new Run(code, "", err.toString(StandardCharsets.UTF_8));
+  }
+
+  private Run withOut(String text) {
+    return new Run(code, text, err);
+  }
+}
