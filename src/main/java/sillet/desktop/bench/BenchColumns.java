@@ -1,0 +1,66 @@
+package sillet.desktop.bench;
+
+import java.util.List;
+import javafx.beans.value.ObservableBooleanValue;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import sillet.desktop.theme.Looks;
+import sillet.logbook.text.Texts;
+
+/** The columns of the bench; their widths stand in the style sheet, under these names. */
+final class BenchColumns {
+  private static final List<String> CLASSES =
+      List.of(
+          "col-ticket", "col-instrument", "col-customer", "col-asked", "col-strings", "col-next");
+  private static final int CUSTOMER = 2;
+  private static final int ASKED = 3;
+
+  private BenchColumns() {}
+
+  /** Lays the parts of a row side by side; the customer's column goes where the page is narrow. */
+  static HBox row(ObservableBooleanValue narrow, Region... parts) {
+    HBox row = new HBox();
+    for (int i = 0; i < parts.length; i++) {
+      parts[i].getStyleClass().add(CLASSES.get(i));
+      row.getChildren().add(parts[i]);
+    }
+    HBox.setHgrow(parts[ASKED], Priority.ALWAYS);
+    Node customer = parts[CUSTOMER];
+    customer.managedProperty().bind(customer.visibleProperty());
+    hideWhen(customer, narrow);
+    return row;
+  }
+
+  static HBox heads(Texts texts, ObservableBooleanValue narrow) {
+    Label margin = new Label();
+    margin.getStyleClass().add("bench-margin");
+    HBox heads =
+        row(
+            narrow,
+            head(texts.say("bench.col-ticket")),
+            head(texts.say("bench.col-instrument")),
+            head(texts.say("bench.col-customer")),
+            head(texts.say("bench.col-asked")),
+            head(texts.say("bench.col-strings")),
+            head(texts.say("bench.col-next")));
+    heads.getStyleClass().add("bench-row");
+    HBox.setHgrow(heads, Priority.ALWAYS);
+    HBox line = new HBox(margin, heads);
+    line.getStyleClass().add("bench-heads");
+    return line;
+  }
+
+  private static void hideWhen(Node node, ObservableBooleanValue narrow) {
+    node.setVisible(!narrow.get());
+    narrow.addListener((property, before, now) -> node.setVisible(!now));
+  }
+
+  private static Label head(String word) {
+    Label label = new Label(word);
+    label.getStyleClass().add(Looks.NOTE);
+    return label;
+  }
+}

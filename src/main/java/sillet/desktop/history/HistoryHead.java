@@ -1,0 +1,61 @@
+package sillet.desktop.history;
+
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.VBox;
+import sillet.desktop.controls.Days;
+import sillet.desktop.theme.Looks;
+import sillet.logbook.instruments.Instrument;
+import sillet.logbook.shop.Customer;
+import sillet.logbook.text.Texts;
+import sillet.store.reading.InstrumentLine;
+
+/** The instrument and whose it is, with what can be done from here. */
+final class HistoryHead extends HBox {
+  private final Texts texts;
+  private final HistoryWords words;
+  private final Label name = new Label();
+  private final Label facts = new Label();
+  private final Label customer = new Label();
+  private final Label visits = new Label();
+
+  HistoryHead(Texts texts, HistoryWords words, Button... buttons) {
+    this.texts = texts;
+    this.words = words;
+    name.setId("history-name");
+    name.getStyleClass().add(Looks.PAGE_NAME);
+    facts.getStyleClass().add(Looks.NOTE);
+    customer.getStyleClass().add(Looks.STRONG);
+    visits.getStyleClass().add(Looks.NOTE);
+    VBox what = new VBox(name, facts);
+    VBox whose = new VBox(customer, visits);
+    what.getStyleClass().add("head-lines");
+    whose.getStyleClass().addAll("head-lines", "head-whose");
+    what.setMinWidth(0);
+    whose.setMinWidth(0);
+    HBox.setHgrow(what, Priority.ALWAYS);
+    getStyleClass().addAll(Looks.PANEL, "history-head");
+    getChildren().addAll(what, whose);
+    getChildren().addAll(buttons);
+  }
+
+  void show(InstrumentLine line) {
+    Instrument instrument = line.instrument().what();
+    Customer owner = line.customer();
+    name.setText(instrument.name());
+    facts.setText(words.facts(instrument));
+    customer.setText(owner == null ? texts.say("history.nobody") : owner.name());
+    String phone = owner == null ? "" : owner.phone();
+    String count =
+        line.visits() == 1
+            ? texts.say("history.one-visit")
+            : texts.say("history.visits", Integer.toString(line.visits()));
+    String last =
+        line.lastTakenIn() == null
+            ? count
+            : texts.say("history.visits-last", count, Days.full(line.lastTakenIn()));
+    visits.setText(phone.isBlank() ? last : phone + " · " + last);
+  }
+}

@@ -1,0 +1,49 @@
+package sillet.desktop.history;
+
+import java.time.LocalDate;
+import java.util.List;
+import sillet.desktop.drawing.Drawn;
+import sillet.desktop.drawing.Lettering;
+import sillet.desktop.drawing.Pen;
+
+/** The years under the plots. */
+final class YearRow extends Drawn {
+  private static final int MOST_YEARS = 8;
+
+  private final YearAxis axis;
+
+  YearRow(YearAxis axis) {
+    this.axis = axis;
+    setMouseTransparent(true);
+  }
+
+  @Override
+  protected void draw(Pen pen, double width, double height) {
+    Lettering type = Lettering.plain(0.86, pen.inks().soft());
+    List<LocalDate> years = axis.years(MOST_YEARS);
+    for (LocalDate year : years) {
+      double x = axis.share(year) * width;
+      pen.textAround(Integer.toString(year.getYear()), type, x + pen.em(0.29), height / 2);
+    }
+  }
+
+  @Override
+  protected double computePrefWidth(double height) {
+    return em() * 20;
+  }
+
+  @Override
+  protected double computeMinWidth(double height) {
+    return em() * 6;
+  }
+
+  @Override
+  protected double computePrefHeight(double width) {
+    return Math.round(em() * 1.71);
+  }
+
+  @Override
+  protected double computeMinHeight(double width) {
+    return computePrefHeight(width);
+  }
+}

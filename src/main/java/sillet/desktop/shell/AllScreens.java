@@ -1,0 +1,29 @@
+package sillet.desktop.shell;
+
+import javafx.beans.property.StringProperty;
+import sillet.desktop.bench.BenchScreen;
+import sillet.desktop.controls.Desk;
+import sillet.desktop.controls.Screen;
+import sillet.desktop.history.HistoryScreen;
+import sillet.desktop.instruments.InstrumentsScreen;
+
+/** The screens of the program. The two lists are made once, so that their place in them is kept. */
+final class AllScreens implements Screens {
+  private final Desk desk;
+  private final Screen bench;
+  private final Screen instruments;
+
+  AllScreens(Desk desk, StringProperty searched) {
+    this.desk = desk;
+    this.bench = new BenchScreen(desk);
+    this.instruments = new InstrumentsScreen(desk, searched);
+  }
+
+  @Override
+  public Screen at(Place place) {
+    if (place instanceof Place.History history) {
+      return new HistoryScreen(desk, history.instrumentId());
+    }
+    return place instanceof Place.Instruments ? instruments : bench;
+  }
+}

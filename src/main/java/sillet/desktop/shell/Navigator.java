@@ -1,0 +1,77 @@
+package sillet.desktop.shell;
+
+import java.util.UUID;
+import java.util.function.BiConsumer;
+import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
+import sillet.desktop.controls.GoTo;
+import sillet.desktop.controls.Screen;
+
+/** Goes from place to place within one open logbook, and back. */
+final class Navigator implements GoTo {
+  private final Trail trail = new Trail();
+  private final Screens screens;
+  private final BiConsumer<Screen, Place> shower;
+  private final Runnable leaver;
+
+  /**
+   * Stands at the bench, nothing shown yet.
+   *
+   * @param screens makes the screens, given the way to go on from them
+   * @param shower shows a screen
+   * @param leaver leaves the logbook
+   */
+  Navigator(Function<GoTo, Screens> screens, BiConsumer<Screen, Place> shower, Runnable leaver) {
+    this.screens = screens.apply(this);
+    this.shower = shower;
+    this.leaver = leaver;
+  }
+
+  Place here() {
+    return trail.here();
+  }
+
+  @Override
+  public void bench() {
+    to(new Place.Bench());
+  }
+
+  @Override
+  public void instruments() {
+    to(new Place.Instruments());
+  }
+
+  @Override
+  public void takeIn(@Nullable UUID instrumentId) {
+    to(new Place.TakeIn(instrumentId));
+  }
+
+  @Override
+  public void visit(int ticket) {
+    to(new Place.AtVisit(ticket));
+  }
+
+  @Override
+  public void history(UUID instrumentId) {
+    to(new Place.History(instrumentId));
+  }
+
+  @Override
+  public void start() {
+    leaver.run();
+  }
+
+  @Override
+  public void back() {
+    show(trail.back());
+  }
+
+  private void to(Place place) {
+    trail.to(place);
+    show(place);
+  }
+
+  private void show(Place place) {
+    shower.accept(screens.at(place), place);
+  }
+}

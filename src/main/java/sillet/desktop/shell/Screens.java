@@ -1,0 +1,8 @@
+package sillet.desktop.shell;
+
+import sillet.desktop.controls.Screen;
+
+/** Makes the screen of a place. */
+interface Screens {
+  Screen at(Place place);
+}
