@@ -4,7 +4,9 @@ import java.sql.Connection;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.sql.Statement;
+import javax.sql.DataSource;
 import org.flywaydb.core.api.FlywayException;
+import org.h2.api.ErrorCode;
 import org.h2.jdbcx.JdbcDataSource;
 
 /** Connects to a database for work and brings its tables up to date. */
@@ -13,7 +15,7 @@ final class Databases {
 
   private Databases() {}
 
-  static JdbcDataSource source(String url) {
+  private static DataSource source(String url) {
     JdbcDataSource source = new JdbcDataSource();
     source.setURL(url);
     source.setUser(USER);
@@ -29,16 +31,9 @@ final class Databases {
    * @return a connection, the only one to this database
    */
   static Connection connect(String url, String place, int version) {
-    JdbcDataSource source = source(url);
     try {
-      Connection connection = source.getConnection();
-      try {
-        refuseSecond(connection, place);
-      } catch (SQLException | RuntimeException trouble) {
-        connection.close();
-        throw trouble;
-      }
-      bringUpToDate(connection, source, place, version);
+      Connection connection = only(url, place);
+      bringUpToDate(connection, source(url), place, version);
       return connection;
     } catch (SQLException | FlywayException trouble) {
       throw ProblemSigns.read(trouble, place);
@@ -46,22 +41,41 @@ final class Databases {
   }
 
   /**
-   * H2 keeps a second program out, but not a second connection of the same program, and two would
-   * not know of each other.
+   * Connects, and makes sure that it is the only connection. H2 keeps a second program out, but not
+   * a second connection of the same program, and two would not know of each other.
    */
-  static void refuseSecond(Connection connection, String place) throws SQLException {
+  static Connection only(String url, String place) throws SQLException {
+    Connection connection = source(url).getConnection();
+    boolean alone = false;
     try (Statement statement = connection.createStatement();
         ResultSet rows =
             statement.executeQuery("SELECT COUNT(*) FROM INFORMATION_SCHEMA.SESSIONS")) {
       rows.next();
-      if (rows.getInt(1) > 1) {
-        throw new LogbookProblem(ProblemKind.IN_USE, place, null);
+      alone = rows.getInt(1) == 1;
+    } finally {
+      if (!alone) {
+        connection.close();
+      }
+    }
+    if (!alone) {
+      throw new LogbookProblem(ProblemKind.IN_USE, place, null);
+    }
+    return connection;
+  }
+
+  /** Closes the database whatever it says of itself; nothing happens if it closed itself before. */
+  static void shutDown(Connection connection) throws SQLException {
+    try (Statement statement = connection.createStatement()) {
+      statement.execute("SHUTDOWN");
+    } catch (SQLException trouble) {
+      if (trouble.getErrorCode() != ErrorCode.DATABASE_IS_CLOSED) {
+        throw trouble;
       }
     }
   }
 
   private static void bringUpToDate(
-      Connection connection, JdbcDataSource source, String place, int version) throws SQLException {
+      Connection connection, DataSource source, String place, int version) throws SQLException {
     try {
       // H2 opens what it may not write as read-only and says nothing
       if (connection.isReadOnly()) {
@@ -76,10 +90,10 @@ final class Databases {
     }
   }
 
-  private static void abandon(Connection connection, Exception reason) {
-    try (connection;
-        Statement statement = connection.createStatement()) {
-      statement.execute("SHUTDOWN");
+  /** Closes the database after trouble, which is what will be spoken of. */
+  static void abandon(Connection connection, Exception reason) {
+    try (connection) {
+      shutDown(connection);
     } catch (SQLException alsoFailed) {
       reason.addSuppressed(alsoFailed);
     }

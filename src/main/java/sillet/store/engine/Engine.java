@@ -65,6 +65,7 @@ public final class Engine {
       try {
         session(place, () -> Databases.connect(DatabaseUrl.toCreate(draft, scheme), place, 0))
             .close();
+        refuseUnfinished(draft, place);
         LogbookFiles.publish(draft, file);
       } finally {
         Files.deleteIfExists(draft);
@@ -75,6 +76,15 @@ public final class Engine {
       throw ProblemSigns.read(trouble, place);
     }
     return open(file);
+  }
+
+  /** H2 may fail to write at its close and keep silent. */
+  private void refuseUnfinished(Path draft, String place) {
+    try {
+      FirstLook.at(draft, scheme);
+    } catch (LogbookProblem problem) {
+      throw new LogbookProblem(ProblemKind.DISK, place, problem);
+    }
   }
 
   /**

@@ -2,26 +2,33 @@ package sillet.store.engine;
 
 import java.io.EOFException;
 import java.io.IOException;
+import java.nio.channels.NonWritableChannelException;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.ReadOnlyFileSystemException;
 import java.sql.SQLException;
 import java.util.Set;
 import org.h2.api.ErrorCode;
+import org.h2.mvstore.DataUtils;
+import org.h2.mvstore.MVStoreException;
 import org.jspecify.annotations.Nullable;
 
 /** Recognises a problem by SQLState, vendor code and type, never by the words of a message. */
 final class ProblemSigns {
   private static final String CUT_OFF = "22001";
   private static final String ENTERED_BEFORE = "23505";
+  private static final String NO_TABLE = "42S02";
   private static final String REFERS_TO_NOTHING = "23503";
   private static final String REFERS_TO_NOTHING_IN_H2 = "23506";
 
-  /** No such table; wrong user or password. */
-  private static final Set<String> UNREADABLE_STATES = Set.of("42S02", "42S03", "42S04", "28000");
-
-  /** Stumbled; wants to write into what it may only read, which only an empty file makes it do. */
+  /**
+   * Another owner, so no logbook; what stumbled; wants to write into what it may only read, which
+   * only an empty file makes it do.
+   */
   private static final Set<Integer> UNREADABLE_CODES =
-      Set.of(ErrorCode.GENERAL_ERROR_1, ErrorCode.DATABASE_IS_READ_ONLY);
+      Set.of(
+          ErrorCode.WRONG_USER_OR_PASSWORD,
+          ErrorCode.GENERAL_ERROR_1,
+          ErrorCode.DATABASE_IS_READ_ONLY);
 
   private static final int FARTHEST_CAUSE = 20;
 
@@ -52,7 +59,6 @@ final class ProblemSigns {
     SQLException sql = find(trouble, SQLException.class);
     boolean unreadable =
         find(trouble, EOFException.class) != null
-            || (sql != null && UNREADABLE_STATES.contains(String.valueOf(sql.getSQLState())))
             || (sql != null && UNREADABLE_CODES.contains(sql.getErrorCode()));
     return unreadable
         ? new LogbookProblem(ProblemKind.DAMAGED, place, trouble)
@@ -61,14 +67,19 @@ final class ProblemSigns {
 
   private static ProblemKind kind(Throwable trouble) {
     if (find(trouble, AccessDeniedException.class) != null
-        || find(trouble, ReadOnlyFileSystemException.class) != null) {
+        || find(trouble, ReadOnlyFileSystemException.class) != null
+        || find(trouble, NonWritableChannelException.class) != null) {
       return ProblemKind.READ_ONLY;
     }
-    SQLException sql = find(trouble, SQLException.class);
-    if (sql != null) {
-      return ofSql(sql);
+    MVStoreException store = find(trouble, MVStoreException.class);
+    if (store != null && store.getErrorCode() == DataUtils.ERROR_FILE_CORRUPT) {
+      return ProblemKind.DAMAGED;
     }
-    return find(trouble, IOException.class) != null ? ProblemKind.DISK : ProblemKind.UNEXPECTED;
+    SQLException sql = find(trouble, SQLException.class);
+    ProblemKind kind = sql == null ? ProblemKind.UNEXPECTED : ofSql(sql);
+    // trouble with the disk closes the database, which then speaks of that first
+    boolean vague = kind == ProblemKind.UNEXPECTED || kind == ProblemKind.CLOSED;
+    return vague && find(trouble, IOException.class) != null ? ProblemKind.DISK : kind;
   }
 
   private static <T extends Throwable> @Nullable T find(Throwable trouble, Class<T> type) {
@@ -86,6 +97,7 @@ final class ProblemSigns {
     return switch (String.valueOf(sql.getSQLState())) {
       case CUT_OFF -> ProblemKind.TOO_LONG;
       case ENTERED_BEFORE -> ProblemKind.CONFLICT;
+      case NO_TABLE -> ProblemKind.DAMAGED;
       case REFERS_TO_NOTHING, REFERS_TO_NOTHING_IN_H2 -> ProblemKind.NOT_THERE;
       default -> ofCode(sql.getErrorCode());
     };

@@ -47,9 +47,9 @@ final class Schema {
 
   /** Brings the tables up to the newest script. */
   static void migrate(DataSource source) {
-    // a report of every step would stand between the lines of a command
+    // it would report between the lines of a command; what goes wrong is thrown as well
     Logger flywayLog = Logger.getLogger("org.flywaydb");
-    flywayLog.setLevel(Level.WARNING);
+    flywayLog.setLevel(Level.OFF);
     Flyway.configure()
         .dataSource(source)
         .locations("classpath:db/migration")

@@ -2,7 +2,6 @@ package sillet.store.engine;
 
 import java.sql.Connection;
 import java.sql.SQLException;
-import java.sql.Statement;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import org.jdbi.v3.core.Handle;
@@ -124,14 +123,10 @@ public final class Session implements AutoCloseable {
   }
 
   private void shutDown() {
-    try (connection;
-        Statement statement = connection.createStatement()) {
-      statement.execute("SHUTDOWN");
+    try (connection) {
+      Databases.shutDown(connection);
     } catch (SQLException trouble) {
-      LogbookProblem problem = ProblemSigns.read(trouble, place);
-      if (problem.kind() != ProblemKind.CLOSED) {
-        throw problem;
-      }
+      throw ProblemSigns.read(trouble, place);
     }
   }
 }
