@@ -14,6 +14,8 @@ import sillet.logbook.text.Message;
 import sillet.logbook.text.Rejection;
 import sillet.sheets.csv.Remark;
 import sillet.sheets.csv.SheetRefused;
+import sillet.store.engine.LogbookProblem;
+import sillet.store.engine.ProblemKind;
 
 /** The one place where trouble becomes a sentence and an exit code. */
 final class Failures implements IExecutionExceptionHandler, IParameterExceptionHandler {
@@ -41,10 +43,24 @@ final class Failures implements IExecutionExceptionHandler, IParameterExceptionH
       terminal.say(rejection.reason());
       return ExitCodes.BAD_INPUT;
     }
+    if (trouble instanceof LogbookProblem problem) {
+      terminal.say(problem.reason());
+      return code(problem.kind());
+    }
     if (trouble instanceof IOException failed) {
       return notWritten(failed);
     }
     return unexpected(trouble);
+  }
+
+  private static int code(ProblemKind kind) {
+    return switch (kind) {
+      case NO_SUCH, BAD_PLACE, EXISTS -> ExitCodes.BAD_INPUT;
+      case IN_USE -> ExitCodes.LOGBOOK_BUSY;
+      case DAMAGED, NEWER, UNREADABLE_ACTION -> ExitCodes.LOGBOOK_UNFIT;
+      case READ_ONLY, DISK, NOT_CERTAIN -> ExitCodes.TROUBLE_WRITING;
+      case CONFLICT, NOT_THERE, TOO_LONG, CLOSED, UNEXPECTED -> ExitCodes.ANYTHING_ELSE;
+    };
   }
 
   private int refused(SheetRefused refused) {

@@ -2,26 +2,50 @@ package sillet.command;
 
 import java.util.Locale;
 import java.util.ResourceBundle;
+import java.util.function.Consumer;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine;
-import picocli.CommandLine.Command;
 import sillet.logbook.text.Texts;
+import sillet.store.place.LogbookPlace;
+import sillet.store.place.Surroundings;
 
-/** The program as it is called from a shell: one command with others below it. */
-@Command(name = "sillet", mixinStandardHelpOptions = true)
+/** The program as it is called from a shell: from arguments to an exit code. */
 public final class SilletCommand {
-  private SilletCommand() {}
+  private final Terminal terminal;
+  private final Surroundings around;
+  private final @Nullable Consumer<LogbookPlace> window;
+
+  /**
+   * The program at one terminal.
+   *
+   * @param around where it runs
+   * @param window opens the window on a logbook and returns when it is closed; null where there is
+   *     no display
+   */
+  public SilletCommand(
+      Terminal terminal, Surroundings around, @Nullable Consumer<LogbookPlace> window) {
+    this.terminal = terminal;
+    this.around = around;
+    this.window = window;
+  }
 
   /**
    * Runs what the arguments ask for.
    *
    * @return the exit code
    */
-  public static int run(Terminal terminal, String... args) {
+  public int run(String... args) {
     Texts texts = terminal.texts();
-    CommandLine line = new CommandLine(new SilletCommand());
-    describe(line, texts.say("usage.sillet"));
-    add(line, new MovesCommand(terminal), texts.say("usage.moves"));
-    line.getCommandSpec().version(texts.say("usage.version", version(texts)));
+    CommandLine line =
+        described(new RootCommand(terminal, around, window), texts.say("usage.sillet"))
+            .addSubcommand(described(new MovesCommand(terminal), texts.say("usage.moves")))
+            .addSubcommand(described(new SheetCommand(terminal, around), texts.say("usage.sheet")))
+            .addSubcommand(
+                described(new HistoryCommand(terminal, around), texts.say("usage.history")))
+            .addSubcommand(described(new DemoCommand(terminal), texts.say("usage.demo")));
+    String version = texts.say("usage.version", version(texts));
+    line.getCommandSpec().version(version);
+    line.getSubcommands().values().forEach(below -> below.getCommandSpec().version(version));
     line.setResourceBundle(ResourceBundle.getBundle("sillet.texts", Locale.ROOT));
     line.setCaseInsensitiveEnumValuesAllowed(true);
     Failures failures = new Failures(terminal);
@@ -32,14 +56,10 @@ public final class SilletCommand {
     return line.execute(args);
   }
 
-  private static void add(CommandLine line, Object command, String description) {
-    CommandLine below = new CommandLine(command);
-    describe(below, description);
-    line.addSubcommand(below);
-  }
-
-  private static void describe(CommandLine line, String description) {
+  private static CommandLine described(Object command, String description) {
+    CommandLine line = new CommandLine(command);
     line.getCommandSpec().usageMessage().description(description);
+    return line;
   }
 
   /** The version stands in the jar; classes alone do not know theirs. */

@@ -3,6 +3,9 @@ package sillet.command;
 import java.io.ByteArrayOutputStream;
 import java.io.OutputStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.Map;
+import sillet.store.place.Surroundings;
 
 /**
  * One run of the program inside this one.
@@ -25,7 +28,9 @@ record Run(int code, String out, String err) {
     for (int i = 0; i < args.length; i++) {
       words[i] = args[i].toString();
     }
-    int code = SilletCommand.run(new Terminal(out, err, () -> false), words);
+    Terminal terminal = new Terminal(out, err, () -> false);
+    Surroundings nowhere = new Surroundings("Linux", Path.of("/nowhere"), Map.of());
+    int code = new SilletCommand(terminal, nowhere, null).run(words);
     return new Run(code, "", err.toString(StandardCharsets.UTF_8));
   }
 

@@ -27,7 +27,11 @@ class UsageTest {
           Run.of("moves", "a.csv", "b.csv"),
           Run.of("moves", "a.csv", "--aim", "bridge"),
           Run.of("moves", "a.csv", "--logbook", "x"),
-          Run.of("moves", "a.csv", "--out")
+          Run.of("moves", "a.csv", "--out"),
+          Run.of("sheet"),
+          Run.of("sheet", "seven"),
+          Run.of("history"),
+          Run.of("demo", "--logbook", "x")
         }) {
       assertThat(run.code()).isEqualTo(2);
       assertThat(run.out()).isEmpty();

@@ -7,6 +7,8 @@ import sillet.logbook.units.Figures;
 
 /** A row on its way out: each cell says what it is, because text is guarded and figures are not. */
 public final class CsvLine {
+  private static final int MEASURED_DECIMALS = 4;
+
   private final List<String> cells = new ArrayList<>();
 
   /** What people have written. */
@@ -22,6 +24,20 @@ public final class CsvLine {
   /** A figure with so many decimals, blank if it is not known. */
   public CsvLine figure(@Nullable Double value, int decimals) {
     return add(value == null ? "" : Figures.fixed(value, decimals));
+  }
+
+  /** A figure as it was measured, without zeros at its end, blank if it is not known. */
+  public CsvLine measure(@Nullable Double value) {
+    return add(value == null ? "" : measured(value));
+  }
+
+  private static String measured(double value) {
+    String text = Figures.fixed(value, MEASURED_DECIMALS);
+    int end = text.length();
+    while (text.charAt(end - 1) == '0') {
+      end--;
+    }
+    return text.substring(0, text.charAt(end - 1) == '.' ? end - 1 : end);
   }
 
   /** A count or a number on something, blank if there is none. */
