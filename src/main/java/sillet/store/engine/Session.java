@@ -2,11 +2,13 @@ package sillet.store.engine;
 
 import java.sql.Connection;
 import java.sql.SQLException;
+import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import org.jdbi.v3.core.Handle;
 import org.jdbi.v3.core.Jdbi;
 import org.jdbi.v3.core.JdbiException;
+import org.jspecify.annotations.Nullable;
 
 /**
  * An open database: one connection, used on the logbook's own thread only, so that callers may come
@@ -17,7 +19,8 @@ public final class Session implements AutoCloseable {
   private final LogbookThread thread;
   private final Connection connection;
   private final Jdbi jdbi;
-  private boolean closed;
+  private final AtomicBoolean closed = new AtomicBoolean();
+  private @Nullable LogbookProblem doubt;
 
   Session(String place, LogbookThread thread, Connection connection) {
     this.place = place;
@@ -63,13 +66,16 @@ public final class Session implements AutoCloseable {
    * @param change what to do; whatever it throws takes everything back
    * @return what the change returned
    * @throws LogbookProblem of kind NOT_CERTAIN if the change was handed to the database but not
-   *     seen to reach the disk; of another kind if nothing was changed
+   *     seen to reach the disk, and CLOSED ever after; of another kind if nothing was changed
    */
   public <T> T save(Function<Handle, T> change) {
     return thread.call(() -> jdbi.withHandle(handle -> savedBy(change, handle)));
   }
 
   private <T> T savedBy(Function<Handle, T> change, Handle handle) {
+    if (doubt != null) {
+      throw new LogbookProblem(ProblemKind.CLOSED, place, doubt);
+    }
     T result;
     try {
       handle.begin();
@@ -77,7 +83,7 @@ public final class Session implements AutoCloseable {
     } catch (JdbiException trouble) {
       takeBack(handle, trouble);
       throw ProblemSigns.read(trouble, place);
-    } catch (RuntimeException refused) {
+    } catch (RuntimeException | Error refused) {
       takeBack(handle, refused);
       throw refused;
     }
@@ -86,13 +92,16 @@ public final class Session implements AutoCloseable {
       // a commit is written, but only this waits for the disk; it cannot stand inside the
       // transaction
       handle.execute("CHECKPOINT SYNC");
-    } catch (JdbiException trouble) {
-      throw new LogbookProblem(ProblemKind.NOT_CERTAIN, place, trouble);
+    } catch (RuntimeException | Error trouble) {
+      // a later sync that succeeds says nothing of what an earlier one failed to write, so this
+      // session takes nothing more
+      doubt = new LogbookProblem(ProblemKind.NOT_CERTAIN, place, trouble);
+      throw doubt;
     }
     return result;
   }
 
-  private static void takeBack(Handle handle, RuntimeException reason) {
+  private static void takeBack(Handle handle, Throwable reason) {
     try {
       if (handle.isInTransaction()) {
         handle.rollback();
@@ -109,10 +118,9 @@ public final class Session implements AutoCloseable {
    */
   @Override
   public void close() {
-    if (closed) {
+    if (closed.getAndSet(true)) {
       return;
     }
-    closed = true;
     try (thread) {
       thread.call(
           () -> {

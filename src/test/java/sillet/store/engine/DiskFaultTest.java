@@ -144,17 +144,20 @@ class DiskFaultTest {
   }
 
   @Test
-  void doesNotCallSavedWhatTheDiskDidNotTake() {
+  void callsNothingSavedOnceTheDiskDidNotTakeIt() {
+    RecordReadings readings = new RecordReadings(BenchDay.SECOND_VISIT_ID, BenchDay.readings());
     try (Session session = taught(new Engine(FaultyFiles.PREFIX).open(file))) {
       Saving saving = new Saving(session, Clock.systemUTC());
       FaultyFiles.behave(FaultyFiles.Fault.SYNC_ONLY, 1);
-      refuses(
-          ProblemKind.NOT_CERTAIN,
-          () ->
-              saving.perform(
-                  new RecordReadings(BenchDay.SECOND_VISIT_ID, BenchDay.readings()), "Ada Quill"));
+      refuses(ProblemKind.NOT_CERTAIN, () -> saving.perform(readings, "Ada Quill"));
       FaultyFiles.behave(FaultyFiles.Fault.NONE, 0);
+      refuses(ProblemKind.CLOSED, () -> saving.perform(readings, "Ada Quill"));
     }
+    try (Session session = taught(new Engine(FaultyFiles.PREFIX).open(file))) {
+      acknowledged =
+          new Saving(session, Clock.systemUTC()).perform(readings, "Ada Quill").sequence();
+    }
+    everythingAcknowledgedIsThere();
   }
 
   @Test
