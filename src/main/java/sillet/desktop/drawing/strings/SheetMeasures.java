@@ -59,7 +59,7 @@ public record SheetMeasures(
         switch (shape) {
           case NARROW ->
               new SheetMeasures(
-                  4.14, 8.1, 14.4, 20.6, COURSE_GAP, 1.8, 3.8, 1.1, 1.71, 1.24, 4.5, Gaps.NARROW);
+                  4.14, 8.1, 15.5, 20.6, COURSE_GAP, 1.8, 3.8, 1.1, 1.71, 1.24, 4.5, Gaps.NARROW);
           case USUAL ->
               new SheetMeasures(
                   7.64, 17, 20.57, 21.4, COURSE_GAP, 2, 4.3, 1.21, 1.71, 1.24, 6, Gaps.USUAL);

@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.TreeMap;
 import java.util.TreeSet;
 import org.jspecify.annotations.Nullable;
 import sillet.logbook.units.Tries;
@@ -22,6 +21,7 @@ public final class GridModel {
   private final int pass;
   private final Map<Cell, Reading> recorded = new LinkedHashMap<>();
   private final Map<Cell, CellText> typed = new LinkedHashMap<>();
+  private final Map<Cell, CellText> sent = new LinkedHashMap<>();
   private ReadingTerms terms;
 
   public GridModel(int pass, ReadingTerms terms) {
@@ -50,7 +50,12 @@ public final class GridModel {
         recorded.put(new Cell(reading.string(), reading.fret()), reading);
       }
     }
-    typed.entrySet().removeIf(entry -> sameAsRecorded(entry.getKey(), entry.getValue()));
+    sent.entrySet().removeIf(entry -> sameAsRecorded(entry.getKey(), entry.getValue()));
+    typed.entrySet().removeIf(entry -> arrived(entry.getKey(), entry.getValue()));
+  }
+
+  private boolean arrived(Cell cell, CellText entry) {
+    return sameAsRecorded(cell, entry) && !sent.containsKey(cell);
   }
 
   private boolean sameAsRecorded(Cell cell, CellText entry) {
@@ -104,20 +109,30 @@ public final class GridModel {
    */
   public Optional<Reading> toSave(Cell cell, Instant at) {
     CellText entry = typed.get(cell);
-    if (entry == null || entry.problem() != null || sameAsRecorded(cell, entry)) {
+    if (entry == null || entry.problem() != null || arrived(cell, entry)) {
       return Optional.empty();
     }
     return Optional.of(reading(cell, entry.tries(), at));
   }
 
+  /** The same, once: what is on its way to the record is not sent again. */
+  public Optional<Reading> send(Cell cell, Instant at) {
+    CellText entry = typed.get(cell);
+    CellText before = sent.get(cell);
+    boolean underWay = before != null && entry != null && equal(before.tries(), entry.tries());
+    if (underWay) {
+      return Optional.empty();
+    }
+    Optional<Reading> reading = toSave(cell, at);
+    if (reading.isPresent() && entry != null) {
+      sent.put(cell, entry);
+    }
+    return reading;
+  }
+
   private Reading reading(Cell cell, @Nullable Tries tries, Instant at) {
     return new Reading(
         pass, cell.string(), cell.fret(), tries, terms.against(), terms.sdCents(), at);
-  }
-
-  /** Forgets what was typed in a cell: the record shows again. */
-  public void forget(Cell cell) {
-    typed.remove(cell);
   }
 
   /** The typed readings that can be read and the record does not hold yet. */
@@ -131,8 +146,7 @@ public final class GridModel {
 
   /** True while a cell holds what the record does not. */
   public boolean draft() {
-    return typed.entrySet().stream()
-        .anyMatch(entry -> !sameAsRecorded(entry.getKey(), entry.getValue()));
+    return typed.entrySet().stream().anyMatch(entry -> !arrived(entry.getKey(), entry.getValue()));
   }
 
   /** Frets at which anything stands, read or typed. */
@@ -151,17 +165,5 @@ public final class GridModel {
           }
         });
     return frets;
-  }
-
-  /** The tries of one string by fret. */
-  public Map<Integer, Tries> ofString(int string) {
-    Map<Integer, Tries> byFret = new TreeMap<>();
-    for (int fret : fretsRead()) {
-      Tries tries = entry(new Cell(string, fret)).tries();
-      if (tries != null) {
-        byFret.put(fret, tries);
-      }
-    }
-    return byFret;
   }
 }

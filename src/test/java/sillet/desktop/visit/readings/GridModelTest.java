@@ -93,6 +93,25 @@ class GridModelTest {
     grid.take(List.of(recorded(1, "4.0"), recorded(1, "4.6")));
     assertThat(grid.face(CELL).text()).isEqualTo("+4.6");
     assertThat(grid.fretsRead()).containsExactly(12);
-    assertThat(grid.ofString(3)).containsOnlyKeys(12);
+  }
+
+  @Test
+  void sendsAReadingOnceAndAChangedOneAgain() {
+    grid.type(CELL, "5.0");
+    assertThat(grid.send(CELL, NOW)).isPresent();
+    assertThat(grid.send(CELL, NOW)).isEmpty();
+    grid.type(CELL, "5.2");
+    assertThat(grid.send(CELL, NOW)).isPresent();
+  }
+
+  @Test
+  void sendsTheOldReadingAgainWhereAnotherIsOnItsWay() {
+    grid.take(List.of(recorded(1, "4.0")));
+    grid.type(CELL, "5.0");
+    grid.send(CELL, NOW);
+    grid.type(CELL, "4.0");
+    assertThat(grid.send(CELL, NOW)).isPresent();
+    grid.take(List.of(recorded(1, "4.0"), recorded(1, "5.0"), recorded(1, "4.0")));
+    assertThat(grid.draft()).isFalse();
   }
 }

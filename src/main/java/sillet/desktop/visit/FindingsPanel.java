@@ -1,0 +1,77 @@
+package sillet.desktop.visit;
+
+import java.util.List;
+import javafx.geometry.Pos;
+import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+import sillet.desktop.drawing.Balloon;
+import sillet.desktop.theme.Looks;
+import sillet.desktop.visit.words.FindingLine;
+import sillet.logbook.text.Texts;
+
+/** What a saddle does not cure and what must be known before one is touched. */
+final class FindingsPanel extends VBox {
+  private final Texts texts;
+  private final VBox lines = new VBox();
+  private final Label caution = new Label();
+
+  FindingsPanel(Texts texts) {
+    this.texts = texts;
+    Label head = new Label(texts.say("visit.findings"));
+    head.getStyleClass().add(Looks.PANEL_HEAD);
+    lines.getStyleClass().add("finding-lines");
+    caution.getStyleClass().add(Looks.CAUTION);
+    caution.setWrapText(true);
+    caution.setMinHeight(USE_PREF_SIZE);
+    getStyleClass().addAll(Looks.PANEL, "findings");
+    getChildren().addAll(head, lines, caution);
+  }
+
+  /**
+   * Shows what was found; the caution stands there while a saddle asks to be moved.
+   *
+   * @param findings what was found
+   * @param otherwise what to say where that is nothing
+   * @param moving a saddle asks to be moved
+   * @param onePiece it is filed then
+   */
+  void show(List<FindingLine> findings, String otherwise, boolean moving, boolean onePiece) {
+    lines.getChildren().clear();
+    for (int i = 0; i < findings.size(); i++) {
+      lines.getChildren().add(line(i + 1, findings.get(i)));
+    }
+    if (findings.isEmpty()) {
+      Label none = new Label(otherwise);
+      none.getStyleClass().add(Looks.SOFT);
+      none.setWrapText(true);
+      none.setMinHeight(USE_PREF_SIZE);
+      lines.getChildren().add(none);
+    }
+    caution.setText(texts.say(onePiece ? "visit.caution.file" : "visit.caution.tension"));
+    caution.setVisible(moving);
+    caution.setManaged(moving);
+  }
+
+  private static HBox line(int number, FindingLine finding) {
+    Label head = new Label(finding.head());
+    head.getStyleClass().add(Looks.STRONG);
+    head.setWrapText(true);
+    Label sentence = new Label(finding.sentence());
+    sentence.getStyleClass().addAll(Looks.TIGHT, Looks.SENTENCE);
+    sentence.setWrapText(true);
+    for (Label label : new Label[] {head, sentence}) {
+      label.setMinHeight(Region.USE_PREF_SIZE);
+    }
+    VBox words = new VBox(head, sentence);
+    words.setMinWidth(0);
+    HBox.setHgrow(words, Priority.ALWAYS);
+    HBox line = new HBox(new Balloon(number, false, finding.head()), words);
+    line.setAlignment(Pos.TOP_LEFT);
+    line.setFillHeight(false);
+    line.getStyleClass().add("finding-line");
+    return line;
+  }
+}

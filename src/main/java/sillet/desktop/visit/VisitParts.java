@@ -1,0 +1,272 @@
+package sillet.desktop.visit;
+
+import java.time.LocalDate;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.control.ToggleGroup;
+import javafx.scene.layout.Region;
+import sillet.desktop.controls.KeyHint;
+import sillet.desktop.drawing.strings.SheetShape;
+import sillet.desktop.theme.Looks;
+import sillet.desktop.visit.checks.ChecksModel;
+import sillet.desktop.visit.checks.ChecksPanel;
+import sillet.desktop.visit.checks.RoomModel;
+import sillet.desktop.visit.checks.RoomPanel;
+import sillet.desktop.visit.log.LogModel;
+import sillet.desktop.visit.log.NotesPanel;
+import sillet.desktop.visit.log.WorkPanel;
+import sillet.desktop.visit.readings.Cell;
+import sillet.logbook.actions.Action;
+import sillet.logbook.actions.HandOut;
+import sillet.logbook.instruments.SaddleKind;
+import sillet.logbook.text.Message;
+import sillet.logbook.text.Texts;
+import sillet.logbook.units.LengthUnit;
+import sillet.logbook.visits.VisitRecord;
+
+/** The panels of one loaded visit and what happens between them. */
+final class VisitParts {
+  private final VisitDesk desk;
+  private final VisitModel model;
+  private final Texts texts;
+  private final WordsOfVisit said;
+  private final VisitHead head;
+  private final ReadingsPanel readings;
+  private final ReadingTermsBar terms;
+  private final FindingsPanel findings;
+  private final ChecksModel checks;
+  private final ChecksPanel checksPanel;
+  private final RoomModel room;
+  private final RoomPanel roomPanel;
+  private final LogModel log;
+  private final WorkPanel work;
+  private final NotesPanel notes;
+  private final Button handOut;
+  private final Button jobSheet;
+  private final MadeMode made;
+  private final SectionWords sections;
+  private final VisitPage page;
+  private SheetShape shape = SheetShape.USUAL;
+  private int shownPass;
+
+  VisitParts(VisitDesk desk, WordsOfVisit said, Runnable export) {
+    this.desk = desk;
+    this.model = desk.model();
+    this.texts = desk.texts();
+    this.said = said;
+    this.shownPass = model.pass();
+    VisitRecord record = model.record();
+    LengthUnit unit = desk.desk().atBench().shop().lengthUnit();
+    this.head = new VisitHead(texts);
+    this.readings = new ReadingsPanel(desk, said, this::refresh);
+    this.terms = new ReadingTermsBar(model, texts, this::remade, this::refresh);
+    readings.getChildren().add(terms);
+    this.findings = new FindingsPanel(texts);
+    this.checks = new ChecksModel(record, unit, new UnusualCheck(unit));
+    this.checksPanel =
+        new ChecksPanel(
+            checks, texts, (row, moment) -> keep(checks.commit(row, moment, model.visitId())));
+    this.room = new RoomModel(record, unit);
+    this.roomPanel = new RoomPanel(room, texts, row -> keep(room.commit(row, model.visitId())));
+    this.log = new LogModel(record, texts, desk.clock());
+    this.handOut =
+        KeyHint.button(texts.say("visit.hand-out"), texts.say("visit.key.hand-out"), this::handOut);
+    handOut.setId("hand-out");
+    this.jobSheet =
+        KeyHint.button(texts.say("visit.job-sheet"), texts.say("visit.key.job-sheet"), export);
+    jobSheet.setId("job-sheet");
+    this.work = new WorkPanel(texts, this::logWork, List.of(jobSheet, handOut));
+    this.notes = new NotesPanel(texts, log::kind, this::writeNote);
+    this.made = new MadeMode(desk, readings, this::refresh);
+    this.sections = new SectionWords(sections());
+    List<Region> below = List.of(checksPanel, findings, work);
+    this.page = new VisitPage(head, sections, readings, below, List.of(roomPanel, notes));
+    refresh();
+  }
+
+  Node node() {
+    return page;
+  }
+
+  private List<Section> sections() {
+    return List.of(
+        new Section(
+            "readings", texts.say("visit.readings"), readings, this::focusStart, states()::read),
+        new Section(
+            "checks", texts.say("visit.checks"), checksPanel, into(checksPanel), states()::checked),
+        new Section("room", texts.say("visit.room"), roomPanel, into(roomPanel), states()::room),
+        new Section("work", texts.say("visit.work"), work, work::focus, states()::worked),
+        new Section("notes", texts.say("visit.notes"), notes, notes::focus, states()::noted),
+        new Section(
+            "hand-out",
+            texts.say("visit.hand-out"),
+            handOut,
+            handOut::requestFocus,
+            states()::out));
+  }
+
+  private SectionStates states() {
+    return new SectionStates(texts, model, checks, said);
+  }
+
+  private static Runnable into(Region panel) {
+    return () -> {
+      Node field = panel.lookup(".check-cell");
+      if (field != null) {
+        field.requestFocus();
+      }
+    };
+  }
+
+  private void keep(Optional<? extends Action> action) {
+    action.ifPresent(desk.saves()::keep);
+  }
+
+  private boolean logWork(String typed) {
+    var action = log.logWork(typed, desk.desk().atBench().technician());
+    keep(action);
+    return action.isPresent();
+  }
+
+  private boolean writeNote(String typed) {
+    var action = log.writeNote(typed);
+    keep(action);
+    return action.isPresent();
+  }
+
+  /** Closes the visit, once the technician has said so. */
+  void handOut() {
+    if (!model.open()) {
+      return;
+    }
+    String ticket = Integer.toString(model.record().visit().ticket());
+    String name = model.record().instrument().name();
+    if (desk.desk().ask().confirm(Message.of("visit.hand-out.sure", ticket, name))) {
+      keep(Optional.of(new HandOut(model.visitId(), LocalDate.now(desk.clock()))));
+    }
+  }
+
+  /** Takes what the logbook now holds. */
+  void take(VisitRecord now) {
+    boolean wasOpen = model.open();
+    model.take(now);
+    checks.take(now);
+    room.take(now);
+    log.take(now);
+    if (model.pass() != shownPass) {
+      remade();
+      focusStart();
+    }
+    if (wasOpen != model.open()) {
+      readings.editable(model.open());
+      checksPanel.editable(model.open());
+      roomPanel.make(model.open());
+    }
+    refresh();
+  }
+
+  /** Looks at another pass. */
+  void look(int pass) {
+    made.end();
+    model.look(pass);
+    remade();
+  }
+
+  private void remade() {
+    shownPass = model.pass();
+    readings.makeCells();
+    refresh();
+  }
+
+  /** Shows everything as it now is. */
+  private void refresh() {
+    var found = said.findings(model);
+    readings.title(passes());
+    readings.refresh(found);
+    boolean moving = said.of(model).stream().anyMatch(words -> words.kind().moves());
+    boolean onePiece = model.record().instrument().saddle().kind() == SaddleKind.ONE_PIECE;
+    boolean unread = model.strings().stream().allMatch(string -> string.advice() == null);
+    String none = texts.say(unread ? "visit.findings.begin" : "visit.findings.none");
+    findings.show(found, none, moving || made.on(), onePiece);
+    work.show(log.work(), model.open());
+    notes.show(log.notes(), model.open());
+    handOut.setDisable(!model.open());
+    head.show(model, shape);
+    made.showButtons();
+    sections.refresh(shape == SheetShape.NARROW);
+  }
+
+  private Node[] passes() {
+    if (model.lastPass() == 1) {
+      Label only = new Label(texts.say("visit.pass", "1"));
+      only.getStyleClass().add(Looks.SOFT);
+      return new Node[] {only};
+    }
+    List<Node> choices = new ArrayList<>();
+    ToggleGroup group = new ToggleGroup();
+    for (int pass = 1; pass <= model.lastPass(); pass++) {
+      int wanted = pass;
+      ToggleButton choice = new ToggleButton(texts.say("visit.pass", Integer.toString(pass)));
+      choice.setId("pass-" + pass);
+      choice.getStyleClass().addAll(Looks.CHOICE, "pass-choice");
+      choice.setMinWidth(Region.USE_PREF_SIZE);
+      choice.setToggleGroup(group);
+      choice.setSelected(pass == model.pass());
+      choice.setOnAction(pressed -> look(wanted));
+      choices.add(choice);
+    }
+    return choices.toArray(Node[]::new);
+  }
+
+  /** Takes the shape that goes with a width of the window in px. */
+  void width(double widthPx) {
+    double em = readings.em();
+    SheetShape wanted = SheetShape.forWindow(widthPx / em);
+    shape = wanted;
+    readings.setShape(wanted);
+    page.setShape(wanted, em);
+    checksPanel.setNarrow(wanted == SheetShape.WIDE);
+    head.show(model, wanted);
+    sections.refresh(wanted == SheetShape.NARROW);
+  }
+
+  /** Puts the focus where the hand goes first. */
+  void focusStart() {
+    Cell start = model.walk().start(model.grid()::read);
+    readings.focus(start);
+  }
+
+  void focused(Node node) {
+    sections.current(node);
+  }
+
+  void walk(Node focused, int step) {
+    sections.walk(focused, step);
+  }
+
+  /** Writes the job sheet and says where it is. */
+  void export(JobSheetExport export, int ticket) {
+    export.write(ticket, said -> work.say(texts.say(said)));
+  }
+
+  void turnAbout() {
+    readings.turnAbout();
+  }
+
+  MadeMode made() {
+    return made;
+  }
+
+  void focusWork() {
+    work.focus();
+  }
+
+  void focusNotes() {
+    notes.focus();
+  }
+}

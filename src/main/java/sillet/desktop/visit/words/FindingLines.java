@@ -1,0 +1,82 @@
+package sillet.desktop.visit.words;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
+import sillet.logbook.moves.MoveAdvice;
+import sillet.logbook.moves.MoveAdvisor;
+import sillet.logbook.text.Message;
+import sillet.logbook.text.Texts;
+import sillet.logbook.visits.StringPass;
+
+/**
+ * Collects what stands below the drawing: every note of the strings that is more than the move
+ * itself. The same sentence for several strings is said once.
+ */
+public final class FindingLines {
+  private static final Set<String> CUT_SHORT =
+      Set.of("move.no-room-away", "move.no-room-toward", "move.slot-away", "move.slot-toward");
+
+  private final Texts texts;
+  private final MoveAdvisor advisor;
+
+  public FindingLines(Texts texts, MoveAdvisor advisor) {
+    this.texts = texts;
+    this.advisor = advisor;
+  }
+
+  /** The findings of a pass, in the order of the strings. */
+  public List<FindingLine> of(List<StringPass> strings) {
+    Map<Message, List<Integer>> found = new LinkedHashMap<>();
+    for (StringPass string : strings) {
+      for (Message note : notes(string)) {
+        if (head(note) != null) {
+          found
+              .computeIfAbsent(note, first -> new ArrayList<>())
+              .add(string.string().string().number());
+        }
+      }
+    }
+    List<FindingLine> lines = new ArrayList<>();
+    found.forEach((note, numbers) -> lines.add(line(note, numbers)));
+    return lines;
+  }
+
+  private List<Message> notes(StringPass string) {
+    MoveAdvice advice = string.advice();
+    if (advice != null) {
+      return advice.notes();
+    }
+    Message strain = advisor.strain(string.string());
+    return strain == null ? List.of() : List.of(strain);
+  }
+
+  private FindingLine line(Message note, List<Integer> numbers) {
+    String list = numbers.stream().map(n -> Integer.toString(n)).collect(Collectors.joining(", "));
+    String head = head(note);
+    String named =
+        numbers.size() == 1
+            ? texts.say("visit.findings.string", head == null ? "" : head, list)
+            : texts.say("visit.findings.strings", head == null ? "" : head, list);
+    return new FindingLine(numbers, named, texts.say(note), CUT_SHORT.contains(note.key()));
+  }
+
+  /** The name of a finding; null for the sentence of the move itself, which stands beside it. */
+  private @Nullable String head(Message note) {
+    return switch (note.key()) {
+      case "move.wild-try" -> texts.say("visit.findings.wild-try");
+      case "move.not-as-predicted" -> texts.say("visit.findings.not-as-predicted");
+      case "move.no-room-away", "move.no-room-toward" -> texts.say("visit.findings.no-room");
+      case "move.slot-away", "move.slot-toward" -> texts.say("visit.findings.slot");
+      case "move.unread", "move.unread-octave" -> texts.say("visit.findings.unread-octave");
+      case "move.suspect-string" -> texts.say("visit.findings.suspect-string");
+      case "move.not-solved" -> texts.say("visit.findings.not-solved");
+      case "move.strain" -> texts.say("visit.findings.strain");
+      default -> null;
+    };
+  }
+}
