@@ -4,7 +4,6 @@ import java.io.IOException;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
-import java.util.Locale;
 import picocli.CommandLine;
 import picocli.CommandLine.IExecutionExceptionHandler;
 import picocli.CommandLine.IParameterExceptionHandler;
@@ -67,14 +66,8 @@ final class Failures implements IExecutionExceptionHandler, IParameterExceptionH
     for (Remark reason : refused.reasons()) {
       terminal.err().println(reason.said(terminal.texts()));
     }
-    more(refused.more());
+    terminal.more(refused.more());
     return ExitCodes.BAD_INPUT;
-  }
-
-  private void more(long count) {
-    if (count > 0) {
-      terminal.say(Message.of("command.more", String.format(Locale.ROOT, "%d", count)));
-    }
   }
 
   private int notWritten(IOException failed) {

@@ -1,8 +1,9 @@
 package sillet.command;
 
+import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 import sillet.logbook.instruments.Instrument;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Rejection;
@@ -32,16 +33,11 @@ final class InstrumentChoice {
   Instrument of(String asked) {
     Found<InstrumentLine> found = logbook.instruments().search(asked);
     List<Instrument> all = found.newest().stream().map(line -> line.instrument().what()).toList();
-    List<Instrument> exact = all.stream().filter(i -> isNamed(i, asked)).toList();
-    Optional<Instrument> byTicket = byTicket(asked);
-    if (exact.isEmpty() && byTicket.isPresent()) {
-      return byTicket.get();
-    }
-    if (exact.size() == 1 && byTicket.isEmpty()) {
-      return exact.get(0);
-    }
-    if (all.size() == 1) {
-      return all.get(0);
+    Set<Instrument> exact = new LinkedHashSet<>(all);
+    exact.removeIf(instrument -> !isNamed(instrument, asked));
+    byTicket(asked).ifPresent(exact::add);
+    if (exact.size() == 1 || all.size() == 1) {
+      return exact.size() == 1 ? exact.iterator().next() : all.get(0);
     }
     if (all.isEmpty()) {
       throw Rejection.of("command.no-instrument", asked);
@@ -65,9 +61,6 @@ final class InstrumentChoice {
     for (Instrument one : instruments) {
       terminal.say(Message.of("command.instrument", one.name(), one.serial(), one.tag()));
     }
-    if (count > instruments.size()) {
-      String more = String.format(Locale.ROOT, "%d", count - instruments.size());
-      terminal.say(Message.of("command.more", more));
-    }
+    terminal.more(count - instruments.size());
   }
 }

@@ -3,7 +3,6 @@ package sillet.command;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Locale;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -81,8 +80,6 @@ final class MovesCommand implements Callable<Integer> {
       String said = warning.said(terminal.texts());
       terminal.say(Message.of("command.unusual", said));
     }
-    if (warnings.more() > 0) {
-      terminal.say(Message.of("command.more", String.format(Locale.ROOT, "%d", warnings.more())));
-    }
+    terminal.more(warnings.more());
   }
 }

@@ -48,6 +48,8 @@ public final class SilletCommand {
     line.getSubcommands().values().forEach(below -> below.getCommandSpec().version(version));
     line.setResourceBundle(ResourceBundle.getBundle("sillet.texts", Locale.ROOT));
     line.setCaseInsensitiveEnumValuesAllowed(true);
+    // a name may begin with @; it is no file of arguments
+    line.setExpandAtFiles(false);
     Failures failures = new Failures(terminal);
     line.setParameterExceptionHandler(failures);
     line.setExecutionExceptionHandler(failures);

@@ -9,6 +9,7 @@ import java.io.OutputStreamWriter;
 import java.io.PrintWriter;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
+import java.util.Locale;
 import java.util.function.BooleanSupplier;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Texts;
@@ -63,6 +64,13 @@ public final class Terminal {
   /** Says a sentence beside the data. */
   void say(Message message) {
     err.println(texts.say(message));
+  }
+
+  /** Says how many there are beyond those that were listed, if any. */
+  void more(long count) {
+    if (count > 0) {
+      say(Message.of("command.more", String.format(Locale.ROOT, "%d", count)));
+    }
   }
 
   /** Writes data. */

@@ -77,7 +77,7 @@ class LogbookCommandsTest {
 
   @Test
   void saysSoWhenNoInstrumentIsMeant() {
-    Run run = Run.of("history", "nobody's", "--logbook", logbook);
+    Run run = Run.of("history", "@nobody's", "--logbook", logbook);
 
     assertThat(run.code()).isEqualTo(2);
     assertThat(run.out()).isEmpty();

@@ -53,6 +53,8 @@ public final class WholeFile {
     try (FileChannel channel =
             FileChannel.open(beside, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE);
         OutputStream out = Channels.newOutputStream(channel)) {
+      // for whoever ends the program in the middle of it
+      beside.toFile().deleteOnExit();
       content.writeTo(out);
       channel.force(true);
     }
