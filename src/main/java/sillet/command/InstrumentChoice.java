@@ -59,8 +59,14 @@ final class InstrumentChoice {
 
   private void list(List<Instrument> instruments, int count) {
     for (Instrument one : instruments) {
-      terminal.say(Message.of("command.instrument", one.name(), one.serial(), one.tag()));
+      String serial = part("command.serial", one.serial());
+      terminal.say(
+          Message.of("command.instrument", one.name(), serial, part("command.tag", one.tag())));
     }
     terminal.more(count - instruments.size());
+  }
+
+  private String part(String key, String value) {
+    return value.isEmpty() ? "" : terminal.texts().say(Message.of(key, value));
   }
 }
