@@ -1,10 +1,15 @@
 package sillet.desktop.shell;
 
+import java.util.logging.Level;
+import java.util.logging.Logger;
 import javafx.application.Application;
 import sillet.store.place.LogbookPlace;
 
 /** The way into the window. */
 public final class SilletWindow {
+  /** Held here because a logger nobody holds forgets its level. */
+  private static final Logger TOOLKIT = Logger.getLogger("javafx");
+
   private SilletWindow() {}
 
   /**
@@ -14,6 +19,8 @@ public final class SilletWindow {
    * @param own where the shop's logbook lies or will lie
    */
   public static void open(LogbookPlace own) {
+    // the toolkit warns at each start from the class path, which is how Sillet is shipped
+    TOOLKIT.setLevel(Level.SEVERE);
     Application.launch(WindowApplication.class, own.file().toString());
   }
 }
