@@ -43,15 +43,17 @@ final class BenchCell extends ListCell<BenchRow> {
     this.narrow = narrow;
     groupDay.getStyleClass().add(Looks.NOTE);
     ticket.getStyleClass().addAll(Looks.STRONG, "bench-ticket");
+    HBox number = new HBox(ticket);
     kind.getStyleClass().add(Looks.NOTE);
     asked.getStyleClass().add(Looks.CUSTOMER_WORDS);
+    asked.setWrapText(true);
     VBox margin = new VBox(groupHead, groupDay);
     margin.getStyleClass().add("bench-margin");
     HBox strings = new HBox(tally);
     HBox asks = new HBox(mark, next);
     HBox row =
         BenchColumns.row(
-            narrow, ticket, new VBox(instrument, kind), customer, asked, strings, asks);
+            narrow, number, new VBox(instrument, kind), customer, asked, strings, asks);
     row.getStyleClass().addAll("bench-row", "bench-sheet");
     HBox.setHgrow(row, Priority.ALWAYS);
     this.line = new HBox(margin, row);

@@ -58,9 +58,10 @@ final class BenchColumns {
     narrow.addListener((property, before, now) -> node.setVisible(!now));
   }
 
-  private static Label head(String word) {
+  /** In a box of its own, which has the column's width: the word's own em is smaller. */
+  private static HBox head(String word) {
     Label label = new Label(word);
     label.getStyleClass().add(Looks.NOTE);
-    return label;
+    return new HBox(label);
   }
 }

@@ -95,7 +95,7 @@ public final class BenchScreen implements Screen {
     count.getStyleClass().add(Looks.SOFT);
     Region between = new Region();
     HBox.setHgrow(between, Priority.ALWAYS);
-    HBox line = new HBox(name, count, between, takeIn);
+    HBox line = new HBox(name, count, between, KeyHint.line(takeIn));
     line.getStyleClass().add("page-heading");
     return line;
   }

@@ -3,6 +3,8 @@ package sillet.desktop.controls;
 import javafx.scene.control.Button;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Region;
 import sillet.desktop.theme.Looks;
 
 /** The key that does the same, written beside a button's name. */
@@ -26,5 +28,13 @@ public final class KeyHint {
     button.setAccessibleText(name + ", " + key);
     button.setOnAction(pressed -> action.run());
     return button;
+  }
+
+  /** Buttons side by side that give no width away, however long the words beside them are. */
+  public static HBox line(Button... buttons) {
+    HBox line = new HBox(buttons);
+    line.getStyleClass().add("button-line");
+    line.setMinWidth(Region.USE_PREF_SIZE);
+    return line;
   }
 }

@@ -32,11 +32,9 @@ final class CentsPanel extends VBox {
     this.today = today;
     Label head = new Label(texts.say("history.cents"));
     head.getStyleClass().add(Looks.PANEL_HEAD);
-    which.getStyleClass().add(Looks.SOFT);
-    Region between = new Region();
-    HBox.setHgrow(between, Priority.ALWAYS);
+    which.getStyleClass().add(Looks.NOTE);
+    head.setMinWidth(Region.USE_PREF_SIZE);
     HBox line = new HBox(head, key(false, "history.as-received"), key(true, "history.as-left"));
-    line.getChildren().addAll(between, which);
     line.getStyleClass().add("panel-line");
     grid.getStyleClass().add("cents-grid");
     grid.getColumnConstraints().addAll(column(false), column(false), column(true));
@@ -57,6 +55,8 @@ final class CentsPanel extends VBox {
     List<LocalDate> days = new ArrayList<>();
     oldestFirst.forEach(visit -> days.add(visit.visit().arrival().takenIn()));
     YearAxis axis = YearAxis.over(days, today);
+    grid.add(which, 2, 0);
+    GridPane.setHalignment(which, HPos.RIGHT);
     grid.add(note("history.received"), 3, 0);
     grid.add(note("history.left"), 4, 0);
     int row = 1;

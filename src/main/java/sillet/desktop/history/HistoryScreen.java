@@ -21,6 +21,7 @@ import sillet.desktop.controls.Days;
 import sillet.desktop.controls.Desk;
 import sillet.desktop.controls.KeyHint;
 import sillet.desktop.controls.ListKeys;
+import sillet.desktop.controls.Narrow;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Message;
@@ -60,7 +61,10 @@ public final class HistoryScreen implements Screen {
     HistoryWords words = new HistoryWords(texts, desk.atBench().shop().lengthUnit());
     LocalDate today = LocalDate.now(desk.atBench().clock());
     this.cents = new CentsPanel(texts, today);
-    this.panels = new VisitPanels(texts, words, desk.atBench().clock().getZone());
+    this.page = new VBox();
+    Narrow narrow = new Narrow(page);
+    this.panels =
+        new VisitPanels(texts, words, desk.atBench().clock().getZone(), narrow.narrowProperty());
     this.openVisit =
         KeyHint.button(
             texts.say("history.open-visit"), texts.say("history.open-visit-key"), this::openVisit);
@@ -70,7 +74,7 @@ public final class HistoryScreen implements Screen {
             texts.say("history.new-visit"), texts.say("history.new-visit-key"), this::newVisit);
     newVisit.setId("new-visit");
     newVisit.getStyleClass().add(Looks.PRIMARY);
-    this.head = new HistoryHead(texts, words, openVisit, newVisit);
+    this.head = new HistoryHead(texts, words, narrow.narrowProperty(), openVisit, newVisit);
     list.setCellFactory(view -> new VisitCell(texts, words));
     this.body = new HBox(visitsPanel(), right());
     body.getStyleClass().add("panel-row");
@@ -79,7 +83,7 @@ public final class HistoryScreen implements Screen {
     StackPane below = new StackPane(body, said);
     below.getStyleClass().add("list-body");
     VBox.setVgrow(below, Priority.ALWAYS);
-    this.page = new VBox(head, below);
+    page.getChildren().addAll(head, below, narrow.measure());
     page.getStyleClass().add("history-page");
     listen();
   }

@@ -9,6 +9,7 @@ import sillet.logbook.text.Texts;
 import sillet.logbook.units.Figures;
 import sillet.logbook.units.LengthUnit;
 import sillet.logbook.visits.BenchCheck;
+import sillet.logbook.visits.CheckKind;
 import sillet.logbook.visits.MadeMove;
 import sillet.logbook.visits.VisitRecord;
 import sillet.logbook.visits.WorkLine;
@@ -17,6 +18,7 @@ import sillet.logbook.visits.WorkLine;
 final class HistoryWords {
   private static final int MM_DECIMALS = 2;
   private static final int INCH_DECIMALS = 3;
+  private static final int EIGHTHS = 8;
 
   private final Texts texts;
   private final LengthUnit unit;
@@ -74,9 +76,31 @@ final class HistoryWords {
   String check(CheckLine.What what) {
     String kind = texts.say(what.kind().key());
     String fret = Integer.toString(what.fret());
-    return what.string() == BenchCheck.WHOLE_NECK
-        ? texts.say("history.check-neck", kind, fret)
-        : texts.say("history.check-string", kind, Integer.toString(what.string()), fret);
+    if (what.string() == BenchCheck.WHOLE_NECK) {
+      return texts.say("history.check-neck", kind, fret);
+    }
+    String string = Integer.toString(what.string());
+    return what.kind() == CheckKind.ACTION
+        ? texts.say("history.check-fret", kind, fret, string)
+        : texts.say("history.check-string", kind, string);
+  }
+
+  /** Turns of the screw to the nearest eighth, as a hand sets them; blank where none was turned. */
+  String turns(MadeMove move) {
+    if (move.turns() == null) {
+      return "";
+    }
+    long eighths = Math.round(Math.abs(move.turns()) * EIGHTHS);
+    long whole = eighths / EIGHTHS;
+    long above = eighths % EIGHTHS;
+    long below = EIGHTHS;
+    while (above > 0 && above % 2 == 0) {
+      above /= 2;
+      below /= 2;
+    }
+    String fraction = above == 0 ? "" : above + "/" + below;
+    String figure = whole == 0 && above > 0 ? fraction : (whole + " " + fraction).strip();
+    return texts.say("history.turns", figure);
   }
 
   /** How far a saddle was moved and which way. */

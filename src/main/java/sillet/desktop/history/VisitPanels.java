@@ -4,7 +4,9 @@ import java.time.ZoneId;
 import java.time.format.DateTimeFormatter;
 import java.util.List;
 import java.util.Locale;
+import javafx.beans.value.ObservableBooleanValue;
 import javafx.geometry.HPos;
+import javafx.geometry.VPos;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.layout.ColumnConstraints;
@@ -14,31 +16,35 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.jspecify.annotations.Nullable;
+import sillet.desktop.controls.Columns;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Texts;
-import sillet.logbook.units.Figures;
 import sillet.logbook.visits.MadeMove;
 import sillet.logbook.visits.VisitNote;
 import sillet.logbook.visits.VisitRecord;
 import sillet.logbook.visits.WorkLine;
 
 /** The chosen visit: checks, moves made, work and notes, side by side. */
-final class VisitPanels extends HBox {
+final class VisitPanels extends VBox {
   private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("HH:mm", Locale.ROOT);
 
   private final Texts texts;
   private final HistoryWords words;
   private final ZoneId zone;
+  private final Columns columns;
 
-  VisitPanels(Texts texts, HistoryWords words, ZoneId zone) {
+  VisitPanels(Texts texts, HistoryWords words, ZoneId zone, ObservableBooleanValue narrow) {
     this.texts = texts;
     this.words = words;
     this.zone = zone;
-    getStyleClass().add("panel-row");
+    this.columns = new Columns(narrow, 34, 38, 28);
+    columns.getStyleClass().add("panel-columns");
+    VBox.setVgrow(columns, Priority.ALWAYS);
+    getChildren().add(columns);
   }
 
   void show(VisitRecord visit) {
-    getChildren().setAll(checks(visit), moves(visit), work(visit));
+    columns.show(checks(visit), moves(visit), work(visit));
   }
 
   private VBox checks(VisitRecord visit) {
@@ -50,10 +56,10 @@ final class VisitPanels extends HBox {
     }
     int row = 1;
     for (CheckLine line : lines) {
-      Label left = new Label(length(line.leftMm()));
+      Label left = figure(length(line.leftMm()));
       left.getStyleClass().add(Looks.STRONG);
       grid.add(wrapped(words.check(line.what())), 0, row);
-      grid.add(new Label(length(line.receivedMm())), 1, row);
+      grid.add(figure(length(line.receivedMm())), 1, row);
       grid.add(left, 2, row++);
     }
     return panel(
@@ -64,13 +70,9 @@ final class VisitPanels extends HBox {
     GridPane grid = grid(2);
     int row = 0;
     for (MadeMove move : visit.moves()) {
-      Label string = new Label(Integer.toString(move.string()));
+      Label string = figure(Integer.toString(move.string()));
       string.getStyleClass().add(Looks.STRONG);
-      Label turns =
-          new Label(
-              move.turns() == null
-                  ? ""
-                  : texts.say("history.turns", Figures.fixed(Math.abs(move.turns()), 2)));
+      Label turns = figure(words.turns(move));
       turns.getStyleClass().add(Looks.NOTE);
       grid.add(string, 0, row);
       grid.add(wrapped(words.moved(move)), 1, row);
@@ -118,7 +120,6 @@ final class VisitPanels extends HBox {
     VBox panel = new VBox(line, body);
     panel.getStyleClass().addAll(Looks.PANEL, "history-panel");
     panel.setMinWidth(0);
-    HBox.setHgrow(panel, Priority.ALWAYS);
     return panel;
   }
 
@@ -133,6 +134,14 @@ final class VisitPanels extends HBox {
     Label label = new Label(texts.say(key));
     label.getStyleClass().add(Looks.NOTE);
     label.setMinWidth(Region.USE_PREF_SIZE);
+    return label;
+  }
+
+  /** Level with the first line of what stands beside it. */
+  private static Label figure(String text) {
+    Label label = new Label(text);
+    label.setMinWidth(Region.USE_PREF_SIZE);
+    GridPane.setValignment(label, VPos.TOP);
     return label;
   }
 

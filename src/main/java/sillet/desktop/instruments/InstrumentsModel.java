@@ -70,7 +70,9 @@ final class InstrumentsModel {
     if (count.get() > lines.size()) {
       return Message.of("instruments.first", all, Integer.toString(lines.size()));
     }
-    return count.get() == 1 ? Message.of("instruments.one") : Message.of("instruments.count", all);
+    return answered.isBlank()
+        ? Message.of("instruments.in-all", all)
+        : Message.of("instruments.found", all);
   }
 
   /** What stands in place of an empty list. */

@@ -128,7 +128,7 @@ public final class InstrumentsScreen implements Screen {
     heading.getStyleClass().add(Looks.SOFT);
     Region between = new Region();
     HBox.setHgrow(between, Priority.ALWAYS);
-    HBox line = new HBox(name, heading, between, newVisit, newInstrument);
+    HBox line = new HBox(name, heading, between, KeyHint.line(newVisit, newInstrument));
     line.getStyleClass().add("page-heading");
     return line;
   }

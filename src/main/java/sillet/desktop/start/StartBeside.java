@@ -3,6 +3,7 @@ package sillet.desktop.start;
 import java.util.Optional;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import sillet.desktop.controls.KeyHint;
 import sillet.desktop.theme.Looks;
@@ -29,7 +30,7 @@ final class StartBeside extends VBox {
     getChildren()
         .addAll(
             trouble(model),
-            block("start.what", "start.what-said"),
+            with(block("start.what", "start.what-said"), board()),
             with(block("start.demo-head", "start.demo-said"), openDemo),
             with(last, openOther));
   }
@@ -63,8 +64,12 @@ final class StartBeside extends VBox {
     return block;
   }
 
-  private static VBox with(VBox block, Button button) {
-    block.getChildren().add(button);
+  private EmptyBoard board() {
+    return new EmptyBoard(texts.say("start.nut"), texts.say("start.bridge"));
+  }
+
+  private static VBox with(VBox block, Region part) {
+    block.getChildren().add(part);
     return block;
   }
 }

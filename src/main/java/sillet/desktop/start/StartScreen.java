@@ -2,6 +2,7 @@ package sillet.desktop.start;
 
 import java.util.List;
 import java.util.Map;
+import javafx.geometry.VPos;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -13,12 +14,16 @@ import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import sillet.desktop.controls.Ask;
+import sillet.desktop.controls.Columns;
 import sillet.desktop.controls.KeyHint;
+import sillet.desktop.controls.Narrow;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.controls.TypedField;
 import sillet.desktop.drawing.Perforation;
@@ -51,7 +56,9 @@ public final class StartScreen implements Screen {
     this.texts = texts;
     this.name = new TypedField(model.name(), texts.say("start.name"), texts);
     name.input().setId("shop-name");
-    VBox content = new VBox(heading(place), columns());
+    VBox content = new VBox();
+    Narrow narrow = new Narrow(content);
+    content.getChildren().addAll(heading(place), columns(narrow), narrow.measure());
     content.getStyleClass().add("start-page");
     this.page = new ScrollPane(content);
     page.setFitToWidth(true);
@@ -98,6 +105,7 @@ public final class StartScreen implements Screen {
     Label program = new Label(texts.say("start.program"));
     program.getStyleClass().add("start-name");
     Label promise = new Label(texts.say("start.promise", place));
+    program.setMinWidth(Region.USE_PREF_SIZE);
     promise.getStyleClass().add(Looks.SOFT);
     promise.setMinWidth(0);
     promise.setWrapText(true);
@@ -106,11 +114,9 @@ public final class StartScreen implements Screen {
     return line;
   }
 
-  private HBox columns() {
-    GridPane ticket = ticket();
-    VBox beside = new StartBeside(texts, ways::demo, this::open, model);
-    HBox.setHgrow(ticket, Priority.ALWAYS);
-    HBox columns = new HBox(ticket, beside);
+  private Columns columns(Narrow narrow) {
+    Columns columns = new Columns(narrow.narrowProperty(), 65, 35);
+    columns.show(ticket(), new StartBeside(texts, ways::demo, this::open, model));
     columns.getStyleClass().add("start-columns");
     return columns;
   }
@@ -140,6 +146,7 @@ public final class StartScreen implements Screen {
       content.getStyleClass().add(Looks.RULE_ABOVE);
     }
     grid.add(figure, 0, row);
+    GridPane.setValignment(figure, VPos.TOP);
     grid.add(content, 2, row);
   }
 
@@ -158,10 +165,10 @@ public final class StartScreen implements Screen {
     return new VBox(head("start.units"), choice, pitch);
   }
 
-  private HBox unitChoice() {
+  private FlowPane unitChoice() {
     ToggleGroup group = new ToggleGroup();
-    HBox line = new HBox();
-    line.getStyleClass().add("choice-line");
+    FlowPane line = new FlowPane();
+    line.getStyleClass().add("choice-flow");
     for (LengthUnit unit : List.of(LengthUnit.values())) {
       ToggleButton button = new ToggleButton(texts.say(unitKey(unit)));
       button.setId("unit-" + unit.word());
@@ -203,8 +210,8 @@ public final class StartScreen implements Screen {
     go.getStyleClass().add(Looks.PRIMARY);
     Label wait = new Label(texts.say("start.can-wait"));
     wait.getStyleClass().add(Looks.SOFT);
-    HBox line = new HBox(go, wait);
-    line.getStyleClass().add("choice-line");
+    FlowPane line = new FlowPane(go, wait);
+    line.getStyleClass().add("choice-flow");
     return new VBox(head("start.people"), field, line);
   }
 

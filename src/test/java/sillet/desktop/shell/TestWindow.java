@@ -35,14 +35,12 @@ final class TestWindow implements AutoCloseable {
   private final Stage stage;
   private final ShopWindow window;
 
-  private TestWindow(Path folder, double width, double height) {
+  private TestWindow(Path folder) {
     own = placeIn(folder);
     stage = Picture.onFxThread(Stage::new);
     window = Picture.onFxThread(() -> new ShopWindow(stage, own, CLOCK, system -> ask));
     Picture.onFxThread(
         () -> {
-          stage.setWidth(width);
-          stage.setHeight(height);
           window.open();
           return stage;
         });
@@ -50,13 +48,9 @@ final class TestWindow implements AutoCloseable {
 
   /** Opens the window over the logbook in a folder. */
   static TestWindow over(Path folder) throws TimeoutException {
-    return over(folder, 1280, 800);
-  }
-
-  static TestWindow over(Path folder, double width, double height) throws TimeoutException {
     Picture.startToolkit();
     Platform.setImplicitExit(false);
-    return new TestWindow(folder, width, height);
+    return new TestWindow(folder);
   }
 
   static LogbookPlace placeIn(Path folder) {
