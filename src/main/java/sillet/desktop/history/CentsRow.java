@@ -45,6 +45,9 @@ final class CentsRow extends Drawn {
     if (point.ticket() == chosenTicket) {
       Box band = Box.around(middle, height / 2, pen.em(2.29), height);
       pen.block(pen.inks().bench(), band);
+      Stroke edge = new Stroke(pen.inks().hair(), 1);
+      pen.upright(band.x(), 0, height, edge);
+      pen.upright(band.right(), 0, height, edge);
       pen.level(band.x(), band.right(), height / 2, new Stroke(pen.inks().line(), 1));
     }
     double receivedY = y(point.received(), pen, height);

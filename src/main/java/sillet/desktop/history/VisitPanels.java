@@ -37,7 +37,7 @@ final class VisitPanels extends VBox {
     this.texts = texts;
     this.words = words;
     this.zone = zone;
-    this.columns = new Columns(narrow, 34, 38, 28);
+    this.columns = new Columns(narrow, 36, 36, 28);
     columns.getStyleClass().add("panel-columns");
     VBox.setVgrow(columns, Priority.ALWAYS);
     getChildren().add(columns);

@@ -6,6 +6,7 @@ import sillet.desktop.controls.Desk;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.history.HistoryScreen;
 import sillet.desktop.instruments.InstrumentsScreen;
+import sillet.desktop.visit.VisitScreen;
 
 /** The screens of the program. The two lists are made once, so that their place in them is kept. */
 final class AllScreens implements Screens {
@@ -23,6 +24,9 @@ final class AllScreens implements Screens {
   public Screen at(Place place) {
     if (place instanceof Place.History history) {
       return new HistoryScreen(desk, history.instrumentId());
+    }
+    if (place instanceof Place.AtVisit visit) {
+      return new VisitScreen(desk, visit.ticket());
     }
     return place instanceof Place.Instruments ? instruments : bench;
   }

@@ -98,6 +98,13 @@ final class ShopWindow implements Doors.House, Keys.Does {
         });
   }
 
+  /** The toolkit ends, whether by {@link #close} or by the system's own way to quit. */
+  void ended() {
+    close();
+    work.finish();
+    work.awaitEnd();
+  }
+
   @Override
   public void enter(OpenLogbook open) {
     startModel = null;

@@ -6,8 +6,11 @@ import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.FutureTask;
+import java.util.concurrent.TimeUnit;
 import java.util.function.Consumer;
 import javafx.application.Platform;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 import sillet.desktop.controls.Background;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Rejection;
@@ -19,6 +22,9 @@ import sillet.store.engine.LogbookProblem;
  * that a save under way is finished when the window is gone.
  */
 final class WorkThread implements Background {
+  private static final Logger LOG = LoggerFactory.getLogger(WorkThread.class);
+  private static final int LONGEST_END_SECONDS = 60;
+
   private final ExecutorService thread =
       Executors.newSingleThreadExecutor(work -> new Thread(work, "sillet-work"));
   private final Consumer<Throwable> unexpected;
@@ -44,6 +50,17 @@ final class WorkThread implements Background {
   /** Takes no more work; what was asked for before is still done. */
   void finish() {
     thread.shutdown();
+  }
+
+  /** Waits until what was asked for is done, before the program ends. */
+  void awaitEnd() {
+    try {
+      if (!thread.awaitTermination(LONGEST_END_SECONDS, TimeUnit.SECONDS)) {
+        LOG.error("The program ended before its work was done");
+      }
+    } catch (InterruptedException asked) {
+      Thread.currentThread().interrupt();
+    }
   }
 
   private final class Piece<T> extends FutureTask<T> {
