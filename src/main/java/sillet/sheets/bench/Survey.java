@@ -55,7 +55,10 @@ final class Survey {
   private void look(CsvRows rows) throws Unreadable {
     CsvRow first = rows.next();
     if (first == null) {
-      refusals.add(Place.file(), Message.of("bench.empty"));
+      // a line that could not be taken was there all the same
+      if (!refusals.any()) {
+        refusals.add(Place.file(), Message.of("bench.empty"));
+      }
       return;
     }
     Header header = Header.of(first, refusals);
@@ -70,7 +73,7 @@ final class Survey {
         take(read, header);
       }
     }
-    if (!any) {
+    if (!any && !refusals.any()) {
       refusals.add(Place.line(first.line()), Message.of("bench.no-row"));
     }
     if (!refusals.any()) {

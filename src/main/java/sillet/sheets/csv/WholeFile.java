@@ -4,8 +4,10 @@ import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.channels.Channels;
 import java.nio.channels.FileChannel;
+import java.nio.file.AccessDeniedException;
 import java.nio.file.AtomicMoveNotSupportedException;
 import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
@@ -41,9 +43,17 @@ public final class WholeFile {
     // a link stays a link: its file is replaced
     Path place = Files.exists(target) ? target.toRealPath() : target.toAbsolutePath();
     Path beside = place.resolveSibling("." + place.getFileName() + "." + UUID.randomUUID());
+    if (!Files.isDirectory(beside.getParent())) {
+      throw new NoSuchFileException(target.toString());
+    }
     try {
       writeBeside(beside, content);
       moveOver(beside, place);
+    } catch (AccessDeniedException denied) {
+      // the name that was asked for, not that of the draft
+      AccessDeniedException named = new AccessDeniedException(target.toString());
+      named.initCause(denied);
+      throw named;
     } finally {
       Files.deleteIfExists(beside);
     }

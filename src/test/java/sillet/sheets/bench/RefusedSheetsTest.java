@@ -127,6 +127,11 @@ class RefusedSheetsTest {
   }
 
   @Test
+  void doesNotCallASheetOfOneEndlessLineEmpty() throws IOException {
+    assertThat(brief("x".repeat(100_000))).containsExactly("1:0 sheet.line-too-long");
+  }
+
+  @Test
   void refusesACellOfTenMillionCharacters() throws IOException {
     String cell = "x".repeat(10_000_000);
 

@@ -57,7 +57,8 @@ class WholeFileTest {
   @Test
   void saysSoWhenTheFolderIsMissing() {
     assertThatThrownBy(() -> WholeFile.write(folder.resolve("no/moves.csv"), out -> out.write('x')))
-        .isInstanceOf(NoSuchFileException.class);
+        .isInstanceOf(NoSuchFileException.class)
+        .hasMessageEndingWith("moves.csv");
     assertThat(folder).isEmptyDirectory();
   }
 
