@@ -100,7 +100,9 @@ final class HistoryWords {
     }
     String fraction = above == 0 ? "" : above + "/" + below;
     String figure = whole == 0 && above > 0 ? fraction : (whole + " " + fraction).strip();
-    return texts.say("history.turns", figure);
+    return eighths <= EIGHTHS
+        ? texts.say("history.turn", figure)
+        : texts.say("history.turns", figure);
   }
 
   /** How far a saddle was moved and which way. */
