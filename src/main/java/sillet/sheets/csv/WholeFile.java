@@ -43,7 +43,8 @@ public final class WholeFile {
     // a link stays a link: its file is replaced
     Path place = Files.exists(target) ? target.toRealPath() : target.toAbsolutePath();
     Path beside = place.resolveSibling("." + place.getFileName() + "." + UUID.randomUUID());
-    if (!Files.isDirectory(beside.getParent())) {
+    Path folder = place.getParent();
+    if (folder == null || !Files.isDirectory(folder)) {
       throw new NoSuchFileException(target.toString());
     }
     try {
