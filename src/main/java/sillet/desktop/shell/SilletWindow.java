@@ -10,8 +10,6 @@ public final class SilletWindow {
   /** Held here because a logger nobody holds forgets its level. */
   private static final Logger TOOLKIT = Logger.getLogger("javafx");
 
-  private static final Logger TOOLKIT = Logger.getLogger("javafx");
-
   private SilletWindow() {}
 
   /**
@@ -23,8 +21,6 @@ public final class SilletWindow {
   public static void open(LogbookPlace own) {
     // the toolkit warns at each start from the class path, which is how Sillet is shipped
     TOOLKIT.setLevel(Level.SEVERE);
-    // it says so at every start from a jar, which is how this program is shipped
-    TOOLKIT.setFilter(said -> !said.getMessage().startsWith("Unsupported JavaFX configuration"));
     Application.launch(WindowApplication.class, own.file().toString());
   }
 }
