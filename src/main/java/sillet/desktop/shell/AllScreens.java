@@ -8,15 +8,26 @@ import sillet.desktop.history.HistoryScreen;
 import sillet.desktop.instruments.InstrumentsScreen;
 import sillet.desktop.visit.VisitScreen;
 
-/** The screens of the program. The two lists are made once, so that their place in them is kept. */
+/**
+ * The screens of the program. Lists and shop are made once, so that one's place in them is kept.
+ */
 final class AllScreens implements Screens {
   private final Desk desk;
   private final Screen bench;
   private final Screen instruments;
+  private final Screen shop;
 
-  AllScreens(Desk desk, StringProperty searched) {
+  /**
+   * The screens of one open logbook.
+   *
+   * @param desk what each is handed
+   * @param searched the words of the search field
+   * @param shop the shop's own screen
+   */
+  AllScreens(Desk desk, StringProperty searched, Screen shop) {
     this.desk = desk;
     this.bench = new BenchScreen(desk);
+    this.shop = shop;
     this.instruments = new InstrumentsScreen(desk, searched);
   }
 
@@ -27,6 +38,9 @@ final class AllScreens implements Screens {
     }
     if (place instanceof Place.AtVisit visit) {
       return new VisitScreen(desk, visit.ticket());
+    }
+    if (place instanceof Place.ShopPlace) {
+      return shop;
     }
     return place instanceof Place.Instruments ? instruments : bench;
   }

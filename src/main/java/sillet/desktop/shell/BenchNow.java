@@ -23,6 +23,14 @@ final class BenchNow implements AtBench {
     this.clock = clock;
   }
 
+  /** The shop was saved anew; whoever is at the bench stays, if still named. */
+  void rename(Shop renamed) {
+    shop.set(renamed);
+    if (!renamed.technicians().contains(technician.get())) {
+      technician.set(renamed.technicians().isEmpty() ? "" : renamed.technicians().get(0));
+    }
+  }
+
   @Override
   public Shop shop() {
     return shop.get();

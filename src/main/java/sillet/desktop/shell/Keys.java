@@ -20,7 +20,11 @@ final class Keys {
 
     void instruments();
 
+    void shop();
+
     void search();
+
+    void keySheet();
 
     void back();
   }
@@ -42,6 +46,9 @@ final class Keys {
     keys.put(new KeyCodeCombination(KeyCode.NUMPAD1, SHORTCUT_DOWN), does::bench);
     keys.put(new KeyCodeCombination(KeyCode.DIGIT2, SHORTCUT_DOWN), does::instruments);
     keys.put(new KeyCodeCombination(KeyCode.NUMPAD2, SHORTCUT_DOWN), does::instruments);
+    keys.put(new KeyCodeCombination(KeyCode.DIGIT3, SHORTCUT_DOWN), does::shop);
+    keys.put(new KeyCodeCombination(KeyCode.NUMPAD3, SHORTCUT_DOWN), does::shop);
+    keys.put(new KeyCodeCombination(KeyCode.F1), does::keySheet);
     keys.put(new KeyCodeCombination(KeyCode.F3), does::search);
     keys.put(new KeyCodeCombination(KeyCode.LEFT, ALT_DOWN), does::back);
     keys.put(new KeyCodeCombination(KeyCode.F9), look::nextTheme);

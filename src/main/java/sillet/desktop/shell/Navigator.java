@@ -41,6 +41,11 @@ final class Navigator implements GoTo {
     to(new Place.Instruments());
   }
 
+  /** The shop itself; a place the screens do not ask for. */
+  void shop() {
+    to(new Place.ShopPlace());
+  }
+
   @Override
   public void takeIn(@Nullable UUID instrumentId) {
     to(new Place.TakeIn(instrumentId));

@@ -11,6 +11,9 @@ sealed interface Place {
   /** The search over instruments. */
   record Instruments() implements Place {}
 
+  /** The shop itself, and the ways to other logbooks. */
+  record ShopPlace() implements Place {}
+
   /** Taking in; without an instrument it is chosen or made there. */
   record TakeIn(@Nullable UUID instrumentId) implements Place {}
 
@@ -20,8 +23,18 @@ sealed interface Place {
   /** One instrument and its visits. */
   record History(UUID instrumentId) implements Place {}
 
-  /** Whether the word "Bench" in the top line stands for this place. */
-  default boolean underBench() {
-    return this instanceof Bench || this instanceof AtVisit || this instanceof TakeIn;
+  /** Under which word of the top line a place stands. */
+  enum Word {
+    BENCH,
+    INSTRUMENTS,
+    SHOP
+  }
+
+  default Word word() {
+    if (this instanceof ShopPlace) {
+      return Word.SHOP;
+    }
+    boolean instruments = this instanceof Instruments || this instanceof History;
+    return instruments ? Word.INSTRUMENTS : Word.BENCH;
   }
 }

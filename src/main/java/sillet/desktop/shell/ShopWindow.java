@@ -8,7 +8,9 @@ import javafx.stage.Stage;
 import org.jspecify.annotations.Nullable;
 import sillet.desktop.controls.Ask;
 import sillet.desktop.controls.Desk;
+import sillet.desktop.controls.GoTo;
 import sillet.desktop.controls.Screen;
+import sillet.desktop.start.ShopScreen;
 import sillet.desktop.start.StartModel;
 import sillet.desktop.start.StartScreen;
 import sillet.desktop.start.TroubleScreen;
@@ -29,6 +31,7 @@ final class ShopWindow implements Doors.House, Keys.Does {
   private final SaveSignModel sign;
   private final WorkThread work;
   private final Unexpected unexpected;
+  private final KeySheet keySheet;
   private final WindowLook look;
   private final Ask ask;
   private final Keys keys;
@@ -56,6 +59,7 @@ final class ShopWindow implements Doors.House, Keys.Does {
     this.look = new WindowLook(new SettingsFile(logbooks.folder()), work, sign::notSaved);
     Dialogs dialogs = new Dialogs(stage, look.settingsProperty());
     this.unexpected = new Unexpected(dialogs, texts);
+    this.keySheet = new KeySheet(dialogs, texts);
     this.ask = asking.apply(new SystemAsk(stage, dialogs, texts));
     double em = Settings.USUAL.textSize().emPx();
     Scene scene = new Scene(frame, WIDTH_EM * em, HEIGHT_EM * em);
@@ -113,15 +117,21 @@ final class ShopWindow implements Doors.House, Keys.Does {
     frame.topLine().technicians(open.shop().technicians(), now);
     frame.topLine().search().clear();
     frame.demo(open.shop().demo());
-    navigator =
-        new Navigator(
-            goTo ->
-                new AllScreens(
-                    new Desk(open.logbook(), work, goTo, ask, sign, texts, now),
-                    frame.topLine().search().textProperty()),
-            this::show,
-            doors::again);
+    navigator = new Navigator(goTo -> screens(open, now, goTo), this::show, doors::again);
     navigator.bench();
+  }
+
+  private Screens screens(OpenLogbook open, BenchNow now, GoTo goTo) {
+    Desk desk = new Desk(open.logbook(), work, goTo, ask, sign, texts, now);
+    Screen shop =
+        new ShopScreen(
+            desk,
+            doors,
+            renamed -> {
+              now.rename(renamed);
+              frame.topLine().technicians(renamed.technicians(), now);
+            });
+    return new AllScreens(desk, frame.topLine().search().textProperty(), shop);
   }
 
   @Override
@@ -169,6 +179,18 @@ final class ShopWindow implements Doors.House, Keys.Does {
   }
 
   @Override
+  public void shop() {
+    if (navigator != null) {
+      navigator.shop();
+    }
+  }
+
+  @Override
+  public void keySheet() {
+    keySheet.show();
+  }
+
+  @Override
   public void search() {
     if (navigator != null) {
       frame.topLine().search().requestFocus();
@@ -187,6 +209,7 @@ final class ShopWindow implements Doors.House, Keys.Does {
     frame.onLeaveDemo(doors::again);
     frame.topLine().onBench(this::bench);
     frame.topLine().onInstruments(this::instruments);
+    frame.topLine().onShop(this::shop);
     SearchKeys.teach(frame.topLine().search(), this::searching, this::toScreen);
   }
 

@@ -20,6 +20,7 @@ final class TopLine extends HBox {
   private final Texts texts;
   private final Button bench;
   private final Button instruments;
+  private final Button shop;
   private final TextField search = new TextField();
   private final Mark mark;
   private final Label words = new Label();
@@ -29,13 +30,19 @@ final class TopLine extends HBox {
     this.texts = texts;
     bench = place("shell.bench", "bench-word");
     instruments = place("shell.instruments", "instruments-word");
+    shop = place("shell.shop", "shop-word");
+    HBox places = new HBox(bench, instruments, shop);
+    places.getStyleClass().add("places");
+    places.setMinWidth(Region.USE_PREF_SIZE);
     mark = Mark.small(MarkShape.SAVED, "");
+    words.setId("save-words");
     HBox sign = new HBox(mark, words);
     sign.getStyleClass().add("save-sign");
+    sign.setMinWidth(Region.USE_PREF_SIZE);
     technician.getStyleClass().add("technician");
     technician.setId("technician");
     getStyleClass().add("top-line");
-    getChildren().addAll(bench, instruments, stretch(), searchField(), stretch(), sign, technician);
+    getChildren().addAll(places, stretch(), searchField(), stretch(), sign, technician);
   }
 
   void onBench(Runnable action) {
@@ -46,14 +53,20 @@ final class TopLine extends HBox {
     instruments.setOnAction(pressed -> action.run());
   }
 
+  void onShop(Runnable action) {
+    shop.setOnAction(pressed -> action.run());
+  }
+
   TextField search() {
     return search;
   }
 
   /** Underlines the place one is at. */
   void here(Place place) {
-    bench.pseudoClassStateChanged(Looks.CURRENT, place.underBench());
-    instruments.pseudoClassStateChanged(Looks.CURRENT, !place.underBench());
+    Place.Word word = place.word();
+    bench.pseudoClassStateChanged(Looks.CURRENT, word == Place.Word.BENCH);
+    instruments.pseudoClassStateChanged(Looks.CURRENT, word == Place.Word.INSTRUMENTS);
+    shop.pseudoClassStateChanged(Looks.CURRENT, word == Place.Word.SHOP);
   }
 
   /** Says what is saved. */

@@ -32,7 +32,8 @@ final class StartBeside extends VBox {
             trouble(model),
             with(block("start.what", "start.what-said"), board()),
             with(block("start.demo-head", "start.demo-said"), openDemo),
-            with(last, openOther));
+            with(last, openOther),
+            keys());
   }
 
   private VBox trouble(StartModel model) {
@@ -62,6 +63,12 @@ final class StartBeside extends VBox {
     VBox block = new VBox(head, said);
     block.getStyleClass().add("start-block");
     return block;
+  }
+
+  private Label keys() {
+    Label keys = new Label(texts.say("start.keys"));
+    keys.getStyleClass().add(Looks.SOFT);
+    return keys;
   }
 
   private EmptyBoard board() {

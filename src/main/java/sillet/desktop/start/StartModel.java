@@ -12,13 +12,14 @@ import sillet.desktop.controls.Readers;
 import sillet.desktop.controls.TypedFieldModel;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.text.Message;
+import sillet.logbook.units.Figures;
 import sillet.logbook.units.LengthUnit;
 
 /**
  * The three lines of a first start: the shop, its units, who works there. Only the first must be.
  */
 public final class StartModel {
-  private static final String USUAL_HERTZ = "440";
+  private static final int HERTZ_DECIMALS = 2;
 
   private final TypedFieldModel<String> name =
       TypedFieldModel.required(Readers.words(), Message.of("start.name-blank"));
@@ -31,9 +32,20 @@ public final class StartModel {
   private final ObjectProperty<Optional<Message>> trouble =
       new SimpleObjectProperty<>(this, "trouble", Optional.empty());
 
+  private final Shop base;
+
   /** Three lines with nothing typed in them. */
   public StartModel() {
-    referenceHz.fill(USUAL_HERTZ);
+    this(Shop.usual("", List.of()));
+  }
+
+  /** The lines of a shop that is there; what they do not show stays as it is. */
+  public StartModel(Shop shop) {
+    this.base = shop;
+    name.fill(shop.name());
+    lengthUnit.set(shop.lengthUnit());
+    referenceHz.fill(written(shop.referenceHz()));
+    technicians.set(String.join("\n", shop.technicians()));
   }
 
   public TypedFieldModel<String> name() {
@@ -75,9 +87,13 @@ public final class StartModel {
             name.value().orElseThrow(),
             lengthUnit.get(),
             referenceHz.value().orElseThrow(),
-            Shop.USUAL_BREAKING_SHARE_PERCENT,
+            base.breakingSharePercent(),
             names(),
-            false));
+            base.demo()));
+  }
+
+  private static String written(double hertz) {
+    return Figures.fixed(hertz, hertz == Math.rint(hertz) ? 0 : HERTZ_DECIMALS);
   }
 
   private List<String> names() {

@@ -20,6 +20,7 @@ import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.testfx.api.FxRobot;
 import org.testfx.util.WaitForAsyncUtils;
+import sillet.desktop.controls.Ask;
 import sillet.desktop.drawing.Picture;
 import sillet.store.place.LogbookPlace;
 
@@ -32,13 +33,14 @@ final class TestWindow implements AutoCloseable {
   final FxRobot robot = new FxRobot();
   final TestAsk ask = new TestAsk();
   private final LogbookPlace own;
+  private Ask systemAsk = ask;
   private final Stage stage;
   private final ShopWindow window;
 
   private TestWindow(Path folder) {
     own = placeIn(folder);
     stage = Picture.onFxThread(Stage::new);
-    window = Picture.onFxThread(() -> new ShopWindow(stage, own, CLOCK, system -> ask));
+    window = Picture.onFxThread(() -> new ShopWindow(stage, own, CLOCK, this::instead));
     Picture.onFxThread(
         () -> {
           window.open();
@@ -55,6 +57,16 @@ final class TestWindow implements AutoCloseable {
 
   static LogbookPlace placeIn(Path folder) {
     return new LogbookPlace(folder.resolve("logbook.mv.db"));
+  }
+
+  private Ask instead(Ask system) {
+    systemAsk = system;
+    return ask;
+  }
+
+  /** What asks where no test answers. */
+  Ask systemAsk() {
+    return systemAsk;
   }
 
   LogbookPlace own() {

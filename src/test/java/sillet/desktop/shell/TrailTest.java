@@ -36,7 +36,9 @@ class TrailTest {
 
   @Test
   void knowsUnderWhichWordAPlaceStands() {
-    assertThat(new Place.AtVisit(1).underBench()).isTrue();
-    assertThat(new Place.History(UUID.randomUUID()).underBench()).isFalse();
+    assertThat(new Place.AtVisit(1).word()).isEqualTo(Place.Word.BENCH);
+    assertThat(new Place.TakeIn(null).word()).isEqualTo(Place.Word.BENCH);
+    assertThat(new Place.History(UUID.randomUUID()).word()).isEqualTo(Place.Word.INSTRUMENTS);
+    assertThat(new Place.ShopPlace().word()).isEqualTo(Place.Word.SHOP);
   }
 }

@@ -1,0 +1,51 @@
+package sillet.desktop.shell;
+
+import javafx.scene.control.ButtonBar.ButtonData;
+import javafx.scene.control.ButtonType;
+import javafx.scene.control.Label;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.Region;
+import sillet.desktop.theme.Looks;
+import sillet.logbook.text.Texts;
+
+/** Every key of the window on one sheet. */
+final class KeySheet {
+  private final Dialogs dialogs;
+  private final Texts texts;
+
+  KeySheet(Dialogs dialogs, Texts texts) {
+    this.dialogs = dialogs;
+    this.texts = texts;
+  }
+
+  /** Shows the sheet and waits until it is put away. */
+  void show() {
+    ButtonType read = new ButtonType(texts.say("shell.go-on"), ButtonData.OK_DONE);
+    dialogs.show(texts.say("shell.keys"), grid(), read);
+  }
+
+  private GridPane grid() {
+    GridPane grid = new GridPane();
+    grid.getStyleClass().add("key-grid");
+    row(grid, "shell.key-f1", "shell.key-f1-does");
+    row(grid, "shell.key-places", "shell.key-places-does");
+    row(grid, "shell.key-search", "shell.key-search-does");
+    row(grid, "shell.key-new", "shell.key-new-does");
+    row(grid, "shell.key-enter", "shell.key-enter-does");
+    row(grid, "shell.key-back", "shell.key-back-does");
+    row(grid, "shell.key-theme", "shell.key-theme-does");
+    row(grid, "shell.key-text", "shell.key-text-does");
+    return grid;
+  }
+
+  private void row(GridPane grid, String key, String does) {
+    Label keys = new Label(texts.say(key));
+    keys.getStyleClass().add(Looks.STRONG);
+    keys.setMinWidth(Region.USE_PREF_SIZE);
+    Label what = new Label(texts.say(does));
+    what.setWrapText(true);
+    int row = grid.getRowCount();
+    grid.add(keys, 0, row);
+    grid.add(what, 1, row);
+  }
+}

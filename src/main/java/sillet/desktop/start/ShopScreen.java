@@ -1,0 +1,121 @@
+package sillet.desktop.start;
+
+import java.util.Map;
+import java.util.function.Consumer;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyCodeCombination;
+import javafx.scene.input.KeyCombination;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.VBox;
+import sillet.desktop.controls.Columns;
+import sillet.desktop.controls.Desk;
+import sillet.desktop.controls.KeyHint;
+import sillet.desktop.controls.Narrow;
+import sillet.desktop.controls.Screen;
+import sillet.desktop.theme.Looks;
+import sillet.logbook.actions.NameShop;
+import sillet.logbook.shop.Shop;
+
+/** The shop as it is named, to be changed; and the ways to other logbooks. */
+public final class ShopScreen implements Screen {
+  private final Desk desk;
+  private final Ways ways;
+  private final Consumer<Shop> named;
+  private final StartModel model;
+  private final ShopForm form;
+  private final ScrollPane page;
+
+  /**
+   * The shop of the logbook on a desk.
+   *
+   * @param desk what the screen is handed
+   * @param ways to other logbooks
+   * @param named takes the shop once it is saved
+   */
+  public ShopScreen(Desk desk, Ways ways, Consumer<Shop> named) {
+    this.desk = desk;
+    this.ways = ways;
+    this.named = named;
+    this.model = new StartModel(desk.atBench().shop());
+    Button save = KeyHint.button(say("start.save"), say("start.save-key"), this::save);
+    save.setId("save-shop");
+    save.getStyleClass().add(Looks.PRIMARY);
+    this.form = new ShopForm(model, desk.texts(), save);
+    VBox content = new VBox();
+    Narrow narrow = new Narrow(content);
+    Columns columns = new Columns(narrow.narrowProperty(), 65, 35);
+    columns.getStyleClass().add("start-columns");
+    columns.show(form, new StartBeside(desk.texts(), ways::demo, this::open, model));
+    content.getChildren().addAll(heading(), columns, narrow.measure());
+    content.getStyleClass().add("start-page");
+    this.page = new ScrollPane(content);
+    page.setFitToWidth(true);
+    page.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+  }
+
+  @Override
+  public Node node() {
+    return page;
+  }
+
+  @Override
+  public void shown() {
+    form.focus();
+  }
+
+  @Override
+  public void left() {
+    // the screen is kept, and what was typed in it
+  }
+
+  @Override
+  public Map<KeyCombination, Runnable> keys() {
+    return Map.of(
+        key(KeyCode.S), this::save,
+        key(KeyCode.D), ways::demo,
+        key(KeyCode.O), this::open);
+  }
+
+  private HBox heading() {
+    Label name = new Label(say("start.shop"));
+    name.getStyleClass().add(Looks.PAGE_NAME);
+    Label place = new Label(desk.texts().say("start.lies-at", desk.logbook().place()));
+    place.getStyleClass().add(Looks.SOFT);
+    place.setWrapText(true);
+    HBox line = new HBox(name, place);
+    line.getStyleClass().add("start-heading");
+    return line;
+  }
+
+  private void save() {
+    model.shop().ifPresent(this::save);
+  }
+
+  private void save(Shop shop) {
+    String technician = desk.atBench().technician();
+    desk.background()
+        .run(
+            () -> desk.logbook().perform(new NameShop(shop), technician),
+            saved -> {
+              named.accept(shop);
+              desk.sign().saved(saved.at());
+            },
+            desk.sign()::notSaved);
+  }
+
+  private void open() {
+    desk.ask().fileToOpen().ifPresent(ways::open);
+  }
+
+  private String say(String key) {
+    return desk.texts().say(key);
+  }
+
+  private static KeyCombination key(KeyCode code) {
+    return new KeyCodeCombination(code, KeyCombination.SHORTCUT_DOWN);
+  }
+}
