@@ -7,7 +7,6 @@ import sillet.desktop.controls.TypedFieldModel;
 import sillet.logbook.instruments.Neck;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Rejection;
-import sillet.logbook.units.Figures;
 import sillet.logbook.units.Length;
 import sillet.logbook.units.LengthUnit;
 
@@ -23,9 +22,11 @@ public final class NeckFields {
   private final TypedFieldModel<Length> scaleTreble;
   private final TypedFieldModel<Length> scaleBass;
   private final TypedFieldModel<Length> radius;
+  private final LengthUnit unit;
   private boolean leftHanded;
 
   NeckFields(LengthUnit unit, Function<Length, List<Message>> unusualScale) {
+    this.unit = unit;
     strings =
         TypedFieldModel.required(
             Readers.whole(FEWEST_STRINGS, MOST_STRINGS, ""),
@@ -36,14 +37,13 @@ public final class NeckFields {
             Message.of("intake.instrument.frets-missing"));
     scaleTreble =
         TypedFieldModel.required(above(unit), Message.of("intake.instrument.scale-missing"))
-            .sayingBack(length -> Length.other(length.mm(), unit))
+            .sayingBack(length -> length.other(unit))
             .warning(unusualScale);
     scaleBass =
         TypedFieldModel.optional(above(unit))
-            .sayingBack(length -> Length.other(length.mm(), unit))
+            .sayingBack(length -> length.other(unit))
             .warning(unusualScale);
-    radius =
-        TypedFieldModel.optional(above(unit)).sayingBack(length -> Length.other(length.mm(), unit));
+    radius = TypedFieldModel.optional(above(unit)).sayingBack(length -> length.other(unit));
   }
 
   /** A length above zero. */
@@ -96,16 +96,12 @@ public final class NeckFields {
   void take(Neck neck) {
     strings.fill(Integer.toString(neck.strings()));
     frets.fill(Integer.toString(neck.frets()));
-    scaleTreble.fill(mm(neck.scaleTrebleMm()));
+    scaleTreble.fill(InShopUnit.written(neck.scaleTrebleMm(), unit));
     boolean fanned = neck.scaleBassMm() != neck.scaleTrebleMm();
-    scaleBass.fill(fanned ? mm(neck.scaleBassMm()) : "");
+    scaleBass.fill(fanned ? InShopUnit.written(neck.scaleBassMm(), unit) : "");
     Double radiusMm = neck.radiusMm();
-    radius.fill(radiusMm == null ? "" : mm(radiusMm));
+    radius.fill(radiusMm == null ? "" : InShopUnit.written(radiusMm, unit));
     leftHanded = neck.leftHanded();
-  }
-
-  static String mm(double mm) {
-    return Figures.fixed(mm, 2).replaceFirst("\\.?0+$", "") + " mm";
   }
 
   /** The neck; call after the fields were judged. */

@@ -11,16 +11,17 @@ import sillet.logbook.units.LengthUnit;
 public final class SaddleFields {
   private final TypedFieldModel<Double> screw;
   private final TypedFieldModel<Length> thickness;
+  private final LengthUnit unit;
   private SaddleKind kind = SaddleKind.SCREW;
   private ScrewSense sense = ScrewSense.NOT_KNOWN;
 
   SaddleFields(LengthUnit unit) {
+    this.unit = unit;
     screw =
         TypedFieldModel.<Double>optional(text -> ScrewText.parse(text, unit))
             .sayingBack(ScrewText::said);
     thickness =
-        TypedFieldModel.optional(NeckFields.above(unit))
-            .sayingBack(length -> Length.other(length.mm(), unit));
+        TypedFieldModel.optional(NeckFields.above(unit)).sayingBack(length -> length.other(unit));
   }
 
   public SaddleKind kind() {
@@ -67,9 +68,9 @@ public final class SaddleFields {
     kind = saddle.kind();
     sense = saddle.screwSense();
     Double screwMm = saddle.screwPitchMm();
-    screw.fill(screwMm == null ? "" : NeckFields.mm(screwMm));
+    screw.fill(screwMm == null ? "" : InShopUnit.written(screwMm, unit));
     Double thicknessMm = saddle.thicknessMm();
-    thickness.fill(thicknessMm == null ? "" : NeckFields.mm(thicknessMm));
+    thickness.fill(thicknessMm == null ? "" : InShopUnit.written(thicknessMm, unit));
   }
 
   Saddle saddle() {

@@ -40,7 +40,7 @@ public final class StringLine {
     scale =
         TypedFieldModel.required(
                 NeckFields.above(unit), Message.of("intake.instrument.scale-missing"))
-            .sayingBack(length -> Length.other(length.mm(), unit));
+            .sayingBack(length -> length.other(unit));
   }
 
   /** 1 on the treble side. */

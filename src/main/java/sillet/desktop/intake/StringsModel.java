@@ -100,7 +100,7 @@ public final class StringsModel {
               && neck.strings() == BANJO_STRINGS
               && line.number() == SHORT_STRING;
       double own = ownNut ? mm / EqualTemperament.frequency(SHORT_STRING_FRET, 1) : mm;
-      line.scale().fill(NeckFields.mm(own));
+      line.scale().fill(InShopUnit.written(own, unit));
     }
   }
 
@@ -111,6 +111,11 @@ public final class StringsModel {
     for (int i = 0; i < Math.min(lines.size(), set.strings().size()); i++) {
       lines.get(i).take(set.strings().get(i));
     }
+  }
+
+  /** The set was kept: it is not kept a second time. */
+  void kept(StringSet set) {
+    chosen = set;
   }
 
   /** Takes the pitches of a tuning as far as there are lines. */

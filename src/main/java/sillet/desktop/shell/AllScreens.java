@@ -6,6 +6,7 @@ import sillet.desktop.controls.Desk;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.history.HistoryScreen;
 import sillet.desktop.instruments.InstrumentsScreen;
+import sillet.desktop.intake.IntakeScreen;
 import sillet.desktop.visit.VisitScreen;
 
 /**
@@ -38,6 +39,9 @@ final class AllScreens implements Screens {
     }
     if (place instanceof Place.AtVisit visit) {
       return new VisitScreen(desk, visit.ticket());
+    }
+    if (place instanceof Place.TakeIn takeIn) {
+      return new IntakeScreen(desk, takeIn.instrumentId());
     }
     if (place instanceof Place.ShopPlace) {
       return shop;

@@ -90,7 +90,7 @@ public final class VisitScreen implements Screen {
     pane.sceneProperty().addListener((property, before, now) -> followFocus());
     followFocus();
     if (shown) {
-      made.focusStart();
+      begin(made);
     }
   }
 
@@ -131,8 +131,15 @@ public final class VisitScreen implements Screen {
   public void shown() {
     shown = true;
     if (parts != null) {
-      parts.focusStart();
+      begin(parts);
     }
+  }
+
+  /** A scroll pane takes its content in when it is styled; before that nothing can be lit. */
+  private void begin(VisitParts page) {
+    pane.applyCss();
+    pane.layout();
+    page.focusStart();
   }
 
   @Override

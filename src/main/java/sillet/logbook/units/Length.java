@@ -57,6 +57,18 @@ public record Length(double mm, String typed) {
   }
 
   /**
+   * Says this length in the unit that was not typed, so that a slip shows at once.
+   *
+   * @param usual the unit of a number without a suffix
+   * @return inches for what was typed in millimetres, millimetres for all else
+   */
+  public String other(LengthUnit usual) {
+    String text = typed.toLowerCase(Locale.ROOT);
+    boolean metric = text.endsWith("mm") || (usual == LengthUnit.MM && text.matches("[^/a-z\"]*"));
+    return other(mm, metric ? LengthUnit.MM : LengthUnit.INCH);
+  }
+
+  /**
    * Says a length in the unit that was not typed, so that a slip shows at once.
    *
    * @param mm millimetres

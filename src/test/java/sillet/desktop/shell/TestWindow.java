@@ -141,7 +141,7 @@ final class TestWindow implements AutoCloseable {
   }
 
   void type(String text) {
-    robot.write(text);
+    robot.write(text, 0);
     WaitForAsyncUtils.waitForFxEvents();
   }
 

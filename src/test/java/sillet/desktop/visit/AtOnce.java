@@ -1,6 +1,8 @@
 package sillet.desktop.visit;
 
 import java.util.concurrent.Callable;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
 import java.util.function.Consumer;
 import sillet.desktop.controls.Background;
 import sillet.logbook.text.Message;
@@ -11,18 +13,27 @@ import sillet.store.engine.LogbookProblem;
 public final class AtOnce implements Background {
   @Override
   public <T> void run(Callable<T> work, Consumer<? super T> done, Consumer<Message> failed) {
+    FutureTask<T> task = new FutureTask<>(work);
+    task.run();
     T value;
     try {
-      value = work.call();
-    } catch (LogbookProblem problem) {
-      failed.accept(problem.reason());
+      value = task.get();
+    } catch (ExecutionException trouble) {
+      failed.accept(reason(trouble.getCause()));
       return;
-    } catch (Rejection rejection) {
-      failed.accept(rejection.reason());
-      return;
-    } catch (Exception unexpected) {
-      throw new AssertionError(unexpected);
+    } catch (InterruptedException impossible) {
+      throw new AssertionError(impossible);
     }
     done.accept(value);
+  }
+
+  private static Message reason(Throwable trouble) {
+    if (trouble instanceof LogbookProblem problem) {
+      return problem.reason();
+    }
+    if (trouble instanceof Rejection rejection) {
+      return rejection.reason();
+    }
+    throw new AssertionError(trouble);
   }
 }

@@ -45,4 +45,20 @@ class LengthTest {
     assertThat(Length.other(1.5875, LengthUnit.MM)).isEqualTo("0.063 in");
     assertThat(Length.other(1.5875, LengthUnit.SIXTY_FOURTHS)).isEqualTo("1.59 mm");
   }
+
+  @ParameterizedTest
+  @CsvSource({
+    "1.5875,MM,0.063 in",
+    "'1,5875',MM,0.063 in",
+    "1.5875mm,INCH,0.063 in",
+    "4/64,MM,1.59 mm",
+    "4/64in,MM,1.59 mm",
+    ".0625in,MM,1.59 mm",
+    "62.5 thou,MM,1.59 mm",
+    ".0625,INCH,1.59 mm",
+    "4,SIXTY_FOURTHS,1.59 mm",
+  })
+  void saysTheUnitBackThatWasNotTyped(String typed, LengthUnit usual, String other) {
+    assertThat(Length.parse(typed, usual).other(usual)).isEqualTo(other);
+  }
 }

@@ -37,7 +37,7 @@ public final class CheckRow {
       values.put(
           moment,
           TypedFieldModel.optional(Readers.length(unit))
-              .sayingBack(length -> Length.other(length.mm(), unit))
+              .sayingBack(length -> length.other(unit))
               .warning(length -> unusual.apply(place.kind(), length)));
     }
   }

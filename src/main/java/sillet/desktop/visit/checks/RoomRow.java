@@ -28,8 +28,7 @@ public final class RoomRow {
   }
 
   private static TypedFieldModel<Length> field(LengthUnit unit) {
-    return TypedFieldModel.optional(Readers.length(unit))
-        .sayingBack(length -> Length.other(length.mm(), unit));
+    return TypedFieldModel.optional(Readers.length(unit)).sayingBack(length -> length.other(unit));
   }
 
   public int string() {

@@ -69,7 +69,7 @@ class ChecksModelTest {
     assertThat(check.moment()).isEqualTo(Moment.LEFT);
     assertThat(check.valueMm()).isCloseTo(1.984, within(0.001));
     assertThat(check.typed()).isEqualTo("5/64");
-    assertThat(row.value(Moment.LEFT).saidBackProperty().get()).isEqualTo("0.078 in");
+    assertThat(row.value(Moment.LEFT).saidBackProperty().get()).isEqualTo("1.98 mm");
   }
 
   @Test
