@@ -47,7 +47,7 @@ class SearchAndHistoryTest {
 
       window.press(KeyCode.ESCAPE);
       window.untilRows("#instrument-list", 4);
-      assertThat(window.text("#instrument-count")).isEqualTo("4");
+      assertThat(window.text("#instrument-count")).isEqualTo("4 in all");
     }
   }
 
