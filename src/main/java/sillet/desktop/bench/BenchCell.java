@@ -2,7 +2,6 @@ package sillet.desktop.bench;
 
 import java.time.LocalDate;
 import java.util.List;
-import javafx.beans.value.ObservableBooleanValue;
 import javafx.css.PseudoClass;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListCell;
@@ -11,6 +10,7 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import org.jspecify.annotations.Nullable;
 import sillet.desktop.controls.Days;
+import sillet.desktop.controls.Narrow;
 import sillet.desktop.drawing.Mark;
 import sillet.desktop.drawing.MarkShape;
 import sillet.desktop.drawing.StringTally;
@@ -24,7 +24,7 @@ final class BenchCell extends ListCell<BenchRow> {
 
   private final BenchModel model;
   private final Texts texts;
-  private final ObservableBooleanValue narrow;
+  private final Narrow narrow;
   private final Label groupHead = new Label();
   private final Label groupDay = new Label();
   private final Label ticket = new Label();
@@ -37,7 +37,7 @@ final class BenchCell extends ListCell<BenchRow> {
   private final Label next = new Label();
   private final HBox line;
 
-  BenchCell(BenchModel model, Texts texts, ObservableBooleanValue narrow) {
+  BenchCell(BenchModel model, Texts texts, Narrow narrow) {
     this.model = model;
     this.texts = texts;
     this.narrow = narrow;
@@ -59,7 +59,7 @@ final class BenchCell extends ListCell<BenchRow> {
     this.line = new HBox(margin, row);
     line.setMinWidth(0);
     setPrefWidth(0);
-    narrow.addListener((property, before, now) -> under());
+    narrow.narrowProperty().addListener((property, before, now) -> under());
   }
 
   @Override
@@ -92,7 +92,7 @@ final class BenchCell extends ListCell<BenchRow> {
     }
     Instrument what = row.visit().instrument();
     String kindWord = texts.say(what.kind().key());
-    boolean both = narrow.get() && !row.customer().isEmpty();
+    boolean both = narrow.narrowProperty().get() && !row.customer().isEmpty();
     kind.setText(both ? row.customer() : kindWord);
   }
 

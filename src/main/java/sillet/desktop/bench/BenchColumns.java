@@ -7,6 +7,7 @@ import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import sillet.desktop.controls.Narrow;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Texts;
 
@@ -15,26 +16,29 @@ final class BenchColumns {
   private static final List<String> CLASSES =
       List.of(
           "col-ticket", "col-instrument", "col-customer", "col-asked", "col-strings", "col-next");
+  private static final int INSTRUMENT = 1;
   private static final int CUSTOMER = 2;
   private static final int ASKED = 3;
+  private static final int STRINGS = 4;
 
   private BenchColumns() {}
 
-  /** Lays the parts of a row side by side; the customer's column goes where the page is narrow. */
-  static HBox row(ObservableBooleanValue narrow, Region... parts) {
+  /** Lays the parts of a row side by side; columns go where the page is narrow. */
+  static HBox row(Narrow narrow, Region... parts) {
     HBox row = new HBox();
     for (int i = 0; i < parts.length; i++) {
       parts[i].getStyleClass().add(CLASSES.get(i));
       row.getChildren().add(parts[i]);
     }
     HBox.setHgrow(parts[ASKED], Priority.ALWAYS);
-    Node customer = parts[CUSTOMER];
-    customer.managedProperty().bind(customer.visibleProperty());
-    hideWhen(customer, narrow);
+    HBox.setHgrow(parts[INSTRUMENT], Priority.SOMETIMES);
+    hideWhen(parts[CUSTOMER], narrow.narrowProperty());
+    hideWhen(parts[ASKED], narrow.tightProperty());
+    hideWhen(parts[STRINGS], narrow.tightProperty());
     return row;
   }
 
-  static HBox heads(Texts texts, ObservableBooleanValue narrow) {
+  static HBox heads(Texts texts, Narrow narrow) {
     Label margin = new Label();
     margin.getStyleClass().add("bench-margin");
     HBox heads =
@@ -53,9 +57,10 @@ final class BenchColumns {
     return line;
   }
 
-  private static void hideWhen(Node node, ObservableBooleanValue narrow) {
-    node.setVisible(!narrow.get());
-    narrow.addListener((property, before, now) -> node.setVisible(!now));
+  private static void hideWhen(Node node, ObservableBooleanValue when) {
+    node.managedProperty().bind(node.visibleProperty());
+    node.setVisible(!when.get());
+    when.addListener((property, before, now) -> node.setVisible(!now));
   }
 
   /** In a box of its own, which has the column's width: the word's own em is smaller. */

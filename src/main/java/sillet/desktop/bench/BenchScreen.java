@@ -50,11 +50,11 @@ public final class BenchScreen implements Screen {
     takeIn.setId("take-in");
     takeIn.getStyleClass().add(Looks.PRIMARY);
     Narrow narrow = new Narrow(page);
-    this.columns = BenchColumns.heads(texts, narrow.narrowProperty());
+    this.columns = BenchColumns.heads(texts, narrow);
     list.setId("bench-list");
     list.getStyleClass().add("bench-list");
     list.setAccessibleText(texts.say("bench.open-visits"));
-    list.setCellFactory(view -> new BenchCell(model, texts, narrow.narrowProperty()));
+    list.setCellFactory(view -> new BenchCell(model, texts, narrow));
     ListKeys.teach(list, this::openChosen, desk.goTo()::back);
     model.troubleProperty().addListener((property, before, now) -> say());
     said.setId("bench-said");

@@ -5,7 +5,6 @@ import javafx.beans.property.ReadOnlyBooleanWrapper;
 import javafx.css.PseudoClass;
 import javafx.scene.control.Label;
 import javafx.scene.layout.Region;
-import javafx.scene.text.Font;
 
 /**
  * Whether a page is narrow, counted in em and not in pixels: a large text on a small screen is the
@@ -15,13 +14,21 @@ public final class Narrow {
   /** Below this width a page drops what it can do without. */
   public static final double BELOW_EM = 80;
 
+  /** Below this width only what cannot be left out stays. */
+  public static final double TIGHT_BELOW_EM = 56;
+
   private static final PseudoClass NARROW = PseudoClass.getPseudoClass("narrow");
+  private static final PseudoClass TIGHT = PseudoClass.getPseudoClass("tight");
 
   private final ReadOnlyBooleanWrapper narrow = new ReadOnlyBooleanWrapper(this, "narrow", false);
+  private final ReadOnlyBooleanWrapper tight = new ReadOnlyBooleanWrapper(this, "tight", false);
   private final Region page;
   private final Label measure = new Label();
 
-  /** Watches a page; it carries the state {@code narrow} for the style sheets too. */
+  /**
+   * Watches a page; it carries the states {@code narrow} and {@code tight} for the style sheets
+   * too.
+   */
   public Narrow(Region page) {
     this.page = page;
     page.widthProperty().addListener((property, before, now) -> judge());
@@ -39,10 +46,16 @@ public final class Narrow {
     return narrow.getReadOnlyProperty();
   }
 
+  public ReadOnlyBooleanProperty tightProperty() {
+    return tight.getReadOnlyProperty();
+  }
+
   private void judge() {
-    Font font = measure.getFont();
-    boolean now = page.getWidth() > 0 && page.getWidth() < BELOW_EM * font.getSize();
-    narrow.set(now);
-    page.pseudoClassStateChanged(NARROW, now);
+    double widthEm = page.getWidth() / measure.getFont().getSize();
+    boolean laidOut = widthEm > 0;
+    narrow.set(laidOut && widthEm < BELOW_EM);
+    tight.set(laidOut && widthEm < TIGHT_BELOW_EM);
+    page.pseudoClassStateChanged(NARROW, narrow.get());
+    page.pseudoClassStateChanged(TIGHT, tight.get());
   }
 }

@@ -1,6 +1,7 @@
 package sillet.desktop.shell;
 
 import java.util.List;
+import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.MenuButton;
@@ -10,18 +11,23 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
+import javafx.scene.layout.VBox;
+import sillet.desktop.controls.Narrow;
 import sillet.desktop.drawing.Mark;
 import sillet.desktop.drawing.MarkShape;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Texts;
 
 /** Places, search, what is saved, and who works. */
-final class TopLine extends HBox {
+final class TopLine extends VBox {
   private final Texts texts;
   private final Button bench;
   private final Button instruments;
   private final Button shop;
   private final TextField search = new TextField();
+  private final HBox places;
+  private final StackPane field;
+  private final HBox sign;
   private final Mark mark;
   private final Label words = new Label();
   private final MenuButton technician = new MenuButton();
@@ -31,18 +37,40 @@ final class TopLine extends HBox {
     bench = place("shell.bench", "bench-word");
     instruments = place("shell.instruments", "instruments-word");
     shop = place("shell.shop", "shop-word");
-    HBox places = new HBox(bench, instruments, shop);
+    this.places = new HBox(bench, instruments, shop);
     places.getStyleClass().add("places");
     places.setMinWidth(Region.USE_PREF_SIZE);
     mark = Mark.small(MarkShape.SAVED, "");
     words.setId("save-words");
-    HBox sign = new HBox(mark, words);
+    this.sign = new HBox(mark, words);
     sign.getStyleClass().add("save-sign");
     sign.setMinWidth(Region.USE_PREF_SIZE);
     technician.getStyleClass().add("technician");
     technician.setId("technician");
+    this.field = searchField();
     getStyleClass().add("top-line");
-    getChildren().addAll(places, stretch(), searchField(), stretch(), sign, technician);
+    Narrow narrow = new Narrow(this);
+    narrow.tightProperty().addListener((property, before, now) -> layOut(now, narrow));
+    layOut(false, narrow);
+  }
+
+  /** One line, or two where the window is too tight for one. */
+  private void layOut(boolean tight, Narrow narrow) {
+    getChildren().clear();
+    if (tight) {
+      HBox.setHgrow(field, Priority.ALWAYS);
+      getChildren().addAll(line(places, stretch(), sign), line(field, technician));
+    } else {
+      HBox.setHgrow(field, Priority.NEVER);
+      getChildren().add(line(places, stretch(), field, stretch(), sign, technician));
+    }
+    getChildren().add(narrow.measure());
+  }
+
+  private static HBox line(Node... parts) {
+    HBox line = new HBox(parts);
+    line.getStyleClass().add("top-words");
+    return line;
   }
 
   void onBench(Runnable action) {
@@ -109,9 +137,9 @@ final class TopLine extends HBox {
     Label key = new Label(texts.say("shell.search-key"));
     key.getStyleClass().add(Looks.KEY_HINT);
     key.setMouseTransparent(true);
-    StackPane field = new StackPane(search, key);
-    field.getStyleClass().add("search-field");
-    return field;
+    StackPane both = new StackPane(search, key);
+    both.getStyleClass().add("search-field");
+    return both;
   }
 
   private Button place(String key, String id) {
@@ -123,7 +151,7 @@ final class TopLine extends HBox {
 
   private static Region stretch() {
     Region region = new Region();
-    setHgrow(region, Priority.ALWAYS);
+    HBox.setHgrow(region, Priority.ALWAYS);
     return region;
   }
 }

@@ -10,6 +10,7 @@ import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import sillet.desktop.controls.Columns;
 import sillet.desktop.controls.Desk;
@@ -83,6 +84,7 @@ public final class ShopScreen implements Screen {
   private HBox heading() {
     Label name = new Label(say("start.shop"));
     name.getStyleClass().add(Looks.PAGE_NAME);
+    name.setMinWidth(Region.USE_PREF_SIZE);
     Label place = new Label(desk.texts().say("start.lies-at", desk.logbook().place()));
     place.getStyleClass().add(Looks.SOFT);
     place.setWrapText(true);

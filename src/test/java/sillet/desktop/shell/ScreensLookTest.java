@@ -37,6 +37,7 @@ class ScreensLookTest {
     "dark, 1280, 800, 100",
     "light, 1920, 1080, 100",
     "dark, 1280, 800, 150",
+    "light, 1280, 800, 200",
     "contrast, 1280, 800, 100"
   })
   void keepsEverythingInsideTheWindow(String theme, int width, int height, int percent)
@@ -67,6 +68,9 @@ class ScreensLookTest {
       window.press(KeyCode.DOWN);
       window.untilSaid("ticket 1007");
       keep(window, size, "history-" + shape);
+      window.press(KeyCode.CONTROL, KeyCode.DIGIT3);
+      window.untilShown("#technicians");
+      keep(window, size, "shop-" + shape);
     }
   }
 
