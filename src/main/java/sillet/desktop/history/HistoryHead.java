@@ -41,6 +41,7 @@ final class HistoryHead extends HBox {
     this.narrow = narrow;
     name.setId("history-name");
     name.getStyleClass().add(Looks.PAGE_NAME);
+    name.setWrapText(true);
     facts.getStyleClass().add(Looks.NOTE);
     facts.setWrapText(true);
     customer.setWrapText(true);

@@ -59,13 +59,22 @@ final class WindowFrame extends BorderPane {
   void show(Screen screen, Place place) {
     shows(top, true);
     topLine.here(place);
-    setCenter(screen.node());
+    place(screen);
   }
 
   /** Shows what needs no top line: no logbook is open. */
   void showAlone(Screen screen) {
     alone();
+    place(screen);
+  }
+
+  /**
+   * What lies in a scroll pane belongs to the window, and can take the focus, once it is laid out.
+   */
+  private void place(Screen screen) {
     setCenter(screen.node());
+    applyCss();
+    layout();
   }
 
   /** Says what is saved, and why not. */

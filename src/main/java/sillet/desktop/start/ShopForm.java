@@ -11,6 +11,7 @@ import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.RowConstraints;
 import javafx.scene.layout.VBox;
 import sillet.desktop.controls.TypedField;
 import sillet.desktop.drawing.Perforation;
@@ -51,6 +52,10 @@ final class ShopForm extends GridPane {
     ColumnConstraints body = new ColumnConstraints();
     body.setHgrow(Priority.ALWAYS);
     getColumnConstraints().addAll(stub, tear, body);
+    RowConstraints last = new RowConstraints();
+    last.setVgrow(Priority.ALWAYS);
+    last.setValignment(VPos.TOP);
+    getRowConstraints().addAll(new RowConstraints(), new RowConstraints(), last);
     Perforation perforation = new Perforation();
     add(perforation, 1, 0, 1, 3);
     step(0, "start.step-1", new VBox(head("start.shop"), name));

@@ -50,7 +50,7 @@ public final class ShopScreen implements Screen {
     Narrow narrow = new Narrow(content);
     Columns columns = new Columns(narrow.narrowProperty(), 65, 35);
     columns.getStyleClass().add("start-columns");
-    columns.show(form, new StartBeside(desk.texts(), ways::demo, this::open, model));
+    columns.show(form, StartBeside.later(desk.texts(), ways::demo, this::open));
     content.getChildren().addAll(heading(), columns, narrow.measure());
     content.getStyleClass().add("start-page");
     this.page = new ScrollPane(content);

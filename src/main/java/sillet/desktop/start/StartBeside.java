@@ -16,24 +16,49 @@ import sillet.logbook.text.Texts;
 final class StartBeside extends VBox {
   private final Texts texts;
 
-  StartBeside(Texts texts, Runnable demo, Runnable open, StartModel model) {
+  private StartBeside(Texts texts) {
     this.texts = texts;
     getStyleClass().add("start-beside");
-    Button openDemo =
-        KeyHint.button(texts.say("start.demo-open"), texts.say("start.demo-key"), demo);
-    openDemo.setId("open-demo");
-    Button openOther =
-        KeyHint.button(texts.say("start.other-open"), texts.say("start.other-key"), open);
-    openOther.setId("open-other");
-    VBox last = block("start.other-head", "start.other-said");
-    last.getStyleClass().add("last-block");
-    getChildren()
+  }
+
+  /** Beside a first start. */
+  static StartBeside first(Texts texts, Runnable demo, Runnable open, StartModel model) {
+    StartBeside beside = new StartBeside(texts);
+    beside
+        .getChildren()
         .addAll(
-            trouble(model),
-            with(block("start.what", "start.what-said"), board()),
-            with(block("start.demo-head", "start.demo-said"), openDemo),
-            with(last, openOther),
-            keys());
+            beside.trouble(model),
+            with(beside.block("start.what", "start.what-said"), beside.board()),
+            beside.demo("start.demo-head", demo),
+            beside.other("start.other-head", open),
+            beside.keys());
+    return beside;
+  }
+
+  /** Beside a shop that has its logbook. */
+  static StartBeside later(Texts texts, Runnable demo, Runnable open) {
+    StartBeside beside = new StartBeside(texts);
+    beside
+        .getChildren()
+        .addAll(
+            beside.demo("start.demo-later", demo),
+            beside.other("start.other-later", open),
+            beside.keys());
+    return beside;
+  }
+
+  private VBox demo(String head, Runnable action) {
+    Button openDemo =
+        KeyHint.button(texts.say("start.demo-open"), texts.say("start.demo-key"), action);
+    openDemo.setId("open-demo");
+    return with(block(head, "start.demo-said"), openDemo);
+  }
+
+  private VBox other(String head, Runnable action) {
+    Button openOther =
+        KeyHint.button(texts.say("start.other-open"), texts.say("start.other-key"), action);
+    openOther.setId("open-other");
+    return with(block(head, "start.other-said"), openOther);
   }
 
   private VBox trouble(StartModel model) {

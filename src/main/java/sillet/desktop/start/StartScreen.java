@@ -103,7 +103,7 @@ public final class StartScreen implements Screen {
 
   private Columns columns(Narrow narrow) {
     Columns columns = new Columns(narrow.narrowProperty(), 65, 35);
-    columns.show(form, new StartBeside(texts, ways::demo, this::open, model));
+    columns.show(form, StartBeside.first(texts, ways::demo, this::open, model));
     columns.getStyleClass().add("start-columns");
     return columns;
   }

@@ -35,6 +35,7 @@ class ShopPlaceTest {
       assertThat(window.shown("#technician")).isFalse();
       window.press(KeyCode.CONTROL, KeyCode.DIGIT3);
       window.untilShown("#technicians");
+      assertThat(window.focused()).isEqualTo("shop-name");
       window.robot.clickOn("#technicians");
       window.type("Noor");
       window.press(KeyCode.CONTROL, KeyCode.S);

@@ -100,6 +100,11 @@ final class TestWindow implements AutoCloseable {
     return Picture.onFxThread(() -> ((Labeled) scene().lookup(query)).getText());
   }
 
+  /** The name of the node that has the focus. */
+  String focused() {
+    return Picture.onFxThread(() -> String.valueOf(scene().getFocusOwner().getId()));
+  }
+
   /** All words that show. */
   List<String> texts() {
     return Picture.onFxThread(this::textsNow);
