@@ -48,28 +48,26 @@ final class BusyShop {
   static void fill(Logbook logbook) {
     BusyShop shop = new BusyShop(logbook);
     shop.act(new NameShop(Shop.usual("Quay Street Strings", List.of(TECHNICIAN, "Edda", "Piet"))));
-    shop.visit(
-        2398, "Tamsin & Row/no. 7", "I. Varga", -3, "New bridge, find its place", 6, "moved");
-    shop.visit(2409, "Brackwell/Tern", "T. Fenk", 0, "Buzz on the low string", 4, "near");
-    shop.visit(2411, "Ottersby/Dunlin", "A. Lehtola", 0, "Winter setup", 6, "near");
-    shop.visit(2414, "Hale & Fitch/Plover", "R. Penhallow", 0, "Sharp up the neck", 6, "two off");
-    shop.visit(2412, "Marl Street/Wren", "S. Obi", 1, "Strings, intonation", 4, "");
+    shop.visit(2398, "Tamsin & Row/no. 7", "I. Varga", -3, "New bridge, find its place", "6 moved");
+    shop.visit(2409, "Brackwell/Tern", "T. Fenk", 0, "Buzz on the low string", "4 near");
+    shop.visit(2411, "Ottersby/Dunlin", "A. Lehtola", 0, "Winter setup", "6 near");
+    shop.visit(2414, "Hale & Fitch/Plover", "R. Penhallow", 0, "Sharp up the neck", "6 two off");
+    shop.visit(2412, "Marl Street/Wren", "S. Obi", 1, "Strings, intonation", "4");
     shop.visit(
         2415,
         "Ottersby and Daughters of the Lower Mill/Fieldfare Extra Long Scale Signature",
         "Josefina Marchetti-Oyelaran of the Low Tide Studio",
         1,
         "Goes to .011 strings, then please look at everything else that could be looked at",
-        6,
-        "");
+        "6");
     shop.visit(
-        2417, "Ottersby/Fieldfare", "M. Oduya", 3, "Sour past the seventh fret", 6, "one near");
-    shop.visit(2418, "Lindqvale/Twelve", "D. Achterberg", 3, "Octaves beat", 12, "");
-    shop.visit(2420, "Brackwell/Heron", "", 3, "New set, check over", 5, "");
-    shop.visit(2402, "Corriden/Parlour", "E. Sandoval", 4, "Saddle too high", 6, "near");
-    shop.visit(2404, "Ottersby/Sandpiper", "K. Brandt", 9, "Two tunings", 8, "two off");
-    shop.visit(2422, "Marl Street/Kite", "V. Ferreira", 12, "First check over", 6, "");
-    shop.visit(2423, "Marl Street/Kite", "V. Ferreira", 99, "", 6, "");
+        2417, "Ottersby/Fieldfare", "M. Oduya", 3, "Sour past the seventh fret", "6 one near");
+    shop.visit(2418, "Lindqvale/Twelve", "D. Achterberg", 3, "Octaves beat", "12");
+    shop.visit(2420, "Brackwell/Heron", "", 3, "New set, check over", "5");
+    shop.visit(2402, "Corriden/Parlour", "E. Sandoval", 4, "Saddle too high", "6 near");
+    shop.visit(2404, "Ottersby/Sandpiper", "K. Brandt", 9, "Two tunings", "8 two off");
+    shop.visit(2422, "Marl Street/Kite", "V. Ferreira", 12, "First check over", "6");
+    shop.visit(2423, "Marl Street/Kite", "V. Ferreira", 99, "", "6");
   }
 
   private void act(Action action) {
@@ -82,8 +80,10 @@ final class BusyShop {
       String customer,
       int inDays,
       String request,
-      int strings,
-      String state) {
+      String stringsAndState) {
+    String[] parts = stringsAndState.split(" ", 2);
+    int strings = Integer.parseInt(parts[0]);
+    String state = parts.length == 1 ? "" : parts[1];
     UUID owner = null;
     if (!customer.isEmpty()) {
       owner = UUID.randomUUID();
