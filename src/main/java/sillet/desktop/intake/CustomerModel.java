@@ -62,6 +62,11 @@ public final class CustomerModel {
     }
   }
 
+  /** True while nobody was typed or chosen. */
+  public boolean blank() {
+    return known == null && name.typedProperty().get().isBlank();
+  }
+
   /** Judges the fields. */
   public boolean look() {
     return Judged.all(List.of(name, phone, note));

@@ -1,6 +1,7 @@
 package sillet.desktop.intake;
 
 import java.util.List;
+import java.util.function.Consumer;
 import java.util.function.Predicate;
 import javafx.scene.control.Button;
 import javafx.scene.control.CheckBox;
@@ -25,8 +26,10 @@ final class InstrumentPanel extends VBox {
   private final Desk desk;
   private final Texts texts;
   private final Runnable changed;
+  private final Consumer<InstrumentLine> chosen;
+  private final Label onBench = new Label();
   private final FormGrid form;
-  private final Suggestions<Instrument> known =
+  private final Suggestions<InstrumentLine> known =
       new Suggestions<>("known-instruments", this::words, this::choose);
   private final TextField name;
   private final ComboBox<InstrumentKind> kind;
@@ -44,12 +47,14 @@ final class InstrumentPanel extends VBox {
    * @param model the page
    * @param desk of the window
    * @param changed called when the neck or the kind changed
+   * @param chosen takes a known instrument
    */
-  InstrumentPanel(IntakeModel model, Desk desk, Runnable changed) {
+  InstrumentPanel(IntakeModel model, Desk desk, Runnable changed, Consumer<InstrumentLine> chosen) {
     this.model = model;
     this.desk = desk;
     this.texts = desk.texts();
     this.changed = changed;
+    this.chosen = chosen;
     this.form = new FormGrid(texts);
     Label head = new Label(texts.say("intake.instrument"));
     head.getStyleClass().add(Looks.PANEL_HEAD);
@@ -97,7 +102,9 @@ final class InstrumentPanel extends VBox {
     another.setText(texts.say("intake.instrument.another"));
     another.setOnAction(pressed -> anotherOne());
     getStyleClass().addAll(Looks.PANEL, "intake-panel");
-    getChildren().addAll(head, form, another);
+    onBench.getStyleClass().add(Looks.NEEDS_HAND);
+    onBench.setWrapText(true);
+    getChildren().addAll(head, form, another, onBench);
     name.textProperty().addListener((property, before, now) -> typed(now));
     show();
   }
@@ -144,7 +151,8 @@ final class InstrumentPanel extends VBox {
     showSaddle();
   }
 
-  private String words(Instrument instrument) {
+  private String words(InstrumentLine line) {
+    Instrument instrument = line.instrument().what();
     String mark = instrument.serial().isEmpty() ? instrument.tag() : instrument.serial();
     return mark.isEmpty()
         ? instrument.name()
@@ -176,25 +184,28 @@ final class InstrumentPanel extends VBox {
     desk.background()
         .run(
             () -> desk.logbook().instruments().search(words).newest(),
-            found ->
-                known.offer(
-                    found.stream().filter(wanted).map(line -> line.instrument().what()).toList()),
+            found -> known.offer(found.stream().filter(wanted).toList()),
             desk.ask()::problem);
   }
 
   /** Takes an instrument the logbook knows. */
-  void choose(Instrument instrument) {
+  void choose(InstrumentLine line) {
     filling = true;
-    model.choose(instrument);
+    model.choose(line.instrument().what());
     filling = false;
     known.offer(List.of());
+    Integer ticket = line.openTicket();
+    onBench.setText(
+        ticket == null ? "" : texts.say("intake.instrument.on-bench", Integer.toString(ticket)));
     show();
     changed.run();
+    chosen.accept(line);
   }
 
   private void anotherOne() {
     filling = true;
     model.instrument().anotherOne();
+    onBench.setText("");
     filling = false;
     show();
     changed.run();
@@ -213,6 +224,7 @@ final class InstrumentPanel extends VBox {
     form.setDisable(isKnown);
     another.setVisible(isKnown);
     another.setManaged(isKnown);
+    onBench.setManaged(isKnown);
     showSaddle();
     filling = false;
   }

@@ -25,6 +25,7 @@ import sillet.desktop.theme.Looks;
 import sillet.logbook.shop.Customer;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.text.Texts;
+import sillet.logbook.visits.VisitRecord;
 import sillet.store.reading.InstrumentLine;
 
 /** Taking in an instrument on one page. */
@@ -61,7 +62,7 @@ public final class IntakeScreen implements Screen {
             new PlausibleIntake(shop.lengthUnit()));
     this.saving = new IntakeSaving(desk, model, desk.goTo()::visit, this::notTaken);
     this.strings = new StringsPanel(model, desk);
-    this.instrument = new InstrumentPanel(model, desk, strings::make);
+    this.instrument = new InstrumentPanel(model, desk, strings::make, this::chosen);
     this.customer = new CustomerPanel(model.customer(), desk, instrument::offerOf);
     pane.setContent(page());
     pane.setFitToWidth(true);
@@ -89,11 +90,31 @@ public final class IntakeScreen implements Screen {
   }
 
   private void cameAgain(InstrumentLine line) {
-    instrument.choose(line.instrument().what());
+    instrument.choose(line);
+  }
+
+  /** A known instrument: whoever has it now, and the strings it had when it was here last. */
+  private void chosen(InstrumentLine line) {
     Customer owner = line.customer();
-    if (owner != null) {
+    if (owner != null && model.customer().blank()) {
       customer.choose(owner);
     }
+    UUID id = line.instrument().what().id();
+    desk.background()
+        .run(
+            () -> desk.logbook().visits().ofInstrument(id),
+            this::strungAsLast,
+            desk.ask()::problem);
+  }
+
+  private void strungAsLast(List<VisitRecord> newestFirst) {
+    newestFirst.stream()
+        .findFirst()
+        .ifPresent(
+            last -> {
+              model.strings().take(last.visit().strings());
+              strings.make();
+            });
   }
 
   private VBox page() {

@@ -15,6 +15,7 @@ import sillet.logbook.units.Pitch;
 /** One string as typed: pitch, gauge, construction, scale. */
 public final class StringLine {
   private final int number;
+  private final LengthUnit unit;
   private final TypedFieldModel<Pitch> pitch;
   private final TypedFieldModel<Double> gauge;
   private final TypedFieldModel<Length> scale;
@@ -28,6 +29,7 @@ public final class StringLine {
       double referenceHz,
       Function<Double, List<Message>> unusualGauge) {
     this.number = number;
+    this.unit = unit;
     this.madeBefore = StringMake.of(1, Construction.PLAIN_STEEL);
     pitch =
         TypedFieldModel.required(
@@ -84,6 +86,13 @@ public final class StringLine {
     gauge.fill(Figures.gauge(make.gaugeIn()));
     construction(make.construction());
     madeBefore = make;
+  }
+
+  /** Takes a string as it was on the instrument. */
+  void take(FittedString string) {
+    pitch.fill(string.pitch().typed());
+    scale.fill(InShopUnit.written(string.scaleMm(), unit));
+    take(string.make());
   }
 
   boolean look() {

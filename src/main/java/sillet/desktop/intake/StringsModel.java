@@ -113,6 +113,16 @@ public final class StringsModel {
     }
   }
 
+  /** Takes what was on the instrument when it was here last, as far as there are lines. */
+  public void take(StringsOn last) {
+    setName.fill(last.setName());
+    tuningName.fill(last.tuningName());
+    fittedOn.fill(last.fittedOn() == null ? "" : last.fittedOn().toString());
+    for (int i = 0; i < Math.min(lines.size(), last.strings().size()); i++) {
+      lines.get(i).take(last.strings().get(i));
+    }
+  }
+
   /** The set was kept: it is not kept a second time. */
   void kept(StringSet set) {
     chosen = set;

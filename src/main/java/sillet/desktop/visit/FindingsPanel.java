@@ -7,6 +7,7 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
+import org.jspecify.annotations.Nullable;
 import sillet.desktop.drawing.Balloon;
 import sillet.desktop.theme.Looks;
 import sillet.desktop.visit.words.FindingLine;
@@ -14,12 +15,11 @@ import sillet.logbook.text.Texts;
 
 /** What a saddle does not cure and what must be known before one is touched. */
 final class FindingsPanel extends VBox {
-  private final Texts texts;
   private final VBox lines = new VBox();
   private final Label caution = new Label();
+  private @Nullable Shown shown;
 
   FindingsPanel(Texts texts) {
-    this.texts = texts;
     Label head = new Label(texts.say("visit.findings"));
     head.getStyleClass().add(Looks.PANEL_HEAD);
     lines.getStyleClass().add("finding-lines");
@@ -31,28 +31,34 @@ final class FindingsPanel extends VBox {
   }
 
   /**
-   * Shows what was found; the caution stands there while a saddle asks to be moved.
+   * What the panel shows.
    *
    * @param findings what was found
    * @param otherwise what to say where that is nothing
-   * @param moving a saddle asks to be moved
-   * @param onePiece it is filed then
+   * @param caution stands there while a saddle asks to be moved; empty for none
    */
-  void show(List<FindingLine> findings, String otherwise, boolean moving, boolean onePiece) {
-    lines.getChildren().clear();
-    for (int i = 0; i < findings.size(); i++) {
-      lines.getChildren().add(line(i + 1, findings.get(i)));
+  record Shown(List<FindingLine> findings, String otherwise, String caution) {}
+
+  /** Shows it; at most keys nothing has changed. */
+  void show(Shown wanted) {
+    if (wanted.equals(shown)) {
+      return;
     }
-    if (findings.isEmpty()) {
-      Label none = new Label(otherwise);
+    shown = wanted;
+    lines.getChildren().clear();
+    for (int i = 0; i < wanted.findings().size(); i++) {
+      lines.getChildren().add(line(i + 1, wanted.findings().get(i)));
+    }
+    if (wanted.findings().isEmpty()) {
+      Label none = new Label(wanted.otherwise());
       none.getStyleClass().add(Looks.SOFT);
       none.setWrapText(true);
       none.setMinHeight(USE_PREF_SIZE);
       lines.getChildren().add(none);
     }
-    caution.setText(texts.say(onePiece ? "visit.caution.file" : "visit.caution.tension"));
-    caution.setVisible(moving);
-    caution.setManaged(moving);
+    caution.setText(wanted.caution());
+    caution.setVisible(!wanted.caution().isEmpty());
+    caution.setManaged(!wanted.caution().isEmpty());
   }
 
   private static HBox line(int number, FindingLine finding) {

@@ -93,6 +93,7 @@ final class ReadingTermsBar extends BorderPane {
 
   private ToggleButton against(Reference reference, String name) {
     ToggleButton choice = new ToggleButton(name);
+    choice.setId("against-" + (reference == Reference.OPEN ? "open" : "harmonic"));
     choice.getStyleClass().add(Looks.CHOICE);
     choice.setMinWidth(Region.USE_PREF_SIZE);
     choice.setToggleGroup(references);

@@ -145,14 +145,13 @@ final class ReadingsPanel extends VBox {
   }
 
   /** Shows the readings and what they ask for as they now are. */
-  void refresh(List<FindingLine> nowFound) {
+  void refresh(List<FindingLine> nowFound, List<StringWords> strings) {
     findings = nowFound;
     drawing.show(picture());
     cells.refresh();
     if (made == null) {
       WordColumns columns = WordColumns.of(shape, drawing.picture());
       MoveTexts set = new MoveTexts(texts, drawing.picture(), shape);
-      List<StringWords> strings = said.of(model);
       for (int row = 0; row < words.size(); row++) {
         words.get(row).show(set.of(strings.get(row)), columns);
       }
@@ -197,8 +196,10 @@ final class ReadingsPanel extends VBox {
 
   /** What can be done, right in the head. */
   void actions(Button... buttons) {
-    actions.getChildren().setAll(buttons);
-    head.requestLayout();
+    if (!actions.getChildren().equals(List.of(buttons))) {
+      actions.getChildren().setAll(buttons);
+      head.requestLayout();
+    }
   }
 
   /** Puts the rows for the moves made in the place of the words, or the words back. */

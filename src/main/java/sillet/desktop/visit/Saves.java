@@ -5,10 +5,14 @@ import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.function.Consumer;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import sillet.desktop.controls.Background;
 import sillet.desktop.controls.SaveSign;
 import sillet.logbook.actions.Action;
+import sillet.logbook.actions.LogWork;
+import sillet.logbook.actions.RecordReadings;
+import sillet.logbook.actions.WriteNote;
 import sillet.logbook.text.Message;
 import sillet.logbook.visits.VisitRecord;
 
@@ -69,6 +73,29 @@ public final class Saves {
   /** Why the last save failed; null if it did not. */
   public @Nullable Message failure() {
     return failure;
+  }
+
+  /** What is not on the disk, in a few words each, to be written down by hand. */
+  public String written() {
+    return waiting.stream().map(Saves::written).collect(Collectors.joining("; "));
+  }
+
+  private static String written(Action action) {
+    if (action instanceof RecordReadings readings) {
+      return readings.readings().stream()
+          .map(
+              one ->
+                  one.string()
+                      + "/"
+                      + one.fret()
+                      + ": "
+                      + (one.tries() == null ? "" : one.tries().written()))
+          .collect(Collectors.joining(", "));
+    }
+    if (action instanceof LogWork work) {
+      return work.line().text();
+    }
+    return action instanceof WriteNote note ? note.note().text() : action.name();
   }
 
   private void next() {

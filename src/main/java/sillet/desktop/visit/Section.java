@@ -26,5 +26,11 @@ record Section(String id, String name, Node node, Runnable focus, StateOf state)
    * @param count in words; may be empty
    * @param needsHand in pencil
    */
-  record State(MarkShape mark, String count, boolean needsHand) {}
+  record State(MarkShape mark, String count, boolean needsHand) {
+
+    /** Without its count, unless that needs a hand. */
+    State brief(boolean wanted) {
+      return wanted && !needsHand ? new State(mark, "", false) : this;
+    }
+  }
 }

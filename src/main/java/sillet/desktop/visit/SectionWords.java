@@ -1,7 +1,9 @@
 package sillet.desktop.visit;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
@@ -16,6 +18,7 @@ import sillet.desktop.theme.Looks;
 final class SectionWords extends FlowPane {
   private final List<Section> sections;
   private final List<Button> buttons = new ArrayList<>();
+  private final Map<Integer, Section.State> shown = new HashMap<>();
 
   SectionWords(List<Section> sections) {
     this.sections = List.copyOf(sections);
@@ -39,11 +42,14 @@ final class SectionWords extends FlowPane {
    */
   void refresh(boolean brief) {
     for (int i = 0; i < buttons.size(); i++) {
-      Section.State state = sections.get(i).state().now();
+      Section.State state = sections.get(i).state().now().brief(brief);
+      if (state.equals(shown.put(i, state))) {
+        continue;
+      }
       Label count = new Label(state.count());
       count.getStyleClass().add(state.needsHand() ? Looks.NEEDS_HAND_NOTE : Looks.NOTE);
       HBox behind = new HBox(Mark.small(state.mark(), ""));
-      if (!state.count().isEmpty() && (state.needsHand() || !brief)) {
+      if (!state.count().isEmpty()) {
         behind.getChildren().add(count);
       }
       behind.getStyleClass().add("section-state");

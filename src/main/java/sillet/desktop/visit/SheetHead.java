@@ -6,8 +6,10 @@ import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Region;
+import org.jspecify.annotations.Nullable;
 import sillet.desktop.drawing.strings.LegendGlyph;
 import sillet.desktop.drawing.strings.SheetGeometry;
+import sillet.desktop.drawing.strings.SheetMeasures;
 import sillet.desktop.drawing.strings.StringsDrawing;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Texts;
@@ -21,6 +23,10 @@ final class SheetHead extends Region {
   private final Label plan = new Label();
   private final Label move = new Label();
   private final HBox actions;
+  private @Nullable Shown shown;
+
+  private record Shown(
+      boolean onePiece, int pass, boolean predicted, String moveHead, SheetMeasures measures) {}
 
   SheetHead(StringsDrawing drawing, Texts texts, HBox title, HBox actions) {
     this.drawing = drawing;
@@ -37,6 +43,11 @@ final class SheetHead extends Region {
 
   /** Says what stands where. */
   void show(boolean onePiece, int pass, boolean predicted, String moveHead) {
+    Shown wanted = new Shown(onePiece, pass, predicted, moveHead, drawing.measures());
+    if (wanted.equals(shown)) {
+      return;
+    }
+    shown = wanted;
     plan.setText(texts.say(onePiece ? "visit.sheet.saddle" : "visit.sheet.plan"));
     move.setText(moveHead);
     legend.getChildren().clear();

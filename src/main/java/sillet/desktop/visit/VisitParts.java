@@ -21,6 +21,8 @@ import sillet.desktop.visit.log.LogModel;
 import sillet.desktop.visit.log.NotesPanel;
 import sillet.desktop.visit.log.WorkPanel;
 import sillet.desktop.visit.readings.Cell;
+import sillet.desktop.visit.words.FindingLine;
+import sillet.desktop.visit.words.StringWords;
 import sillet.logbook.actions.Action;
 import sillet.logbook.actions.HandOut;
 import sillet.logbook.instruments.SaddleKind;
@@ -52,9 +54,11 @@ final class VisitParts {
   private final SectionWords sections;
   private final VisitPage page;
   private SheetShape shape = SheetShape.USUAL;
+  private double shapedEm;
+  private boolean placed;
   private int shownPass;
 
-  VisitParts(VisitDesk desk, WordsOfVisit said, Runnable export) {
+  VisitParts(VisitDesk desk, WordsOfVisit said, Runnable export, Runnable history) {
     this.desk = desk;
     this.model = desk.model();
     this.texts = desk.texts();
@@ -63,8 +67,8 @@ final class VisitParts {
     VisitRecord record = model.record();
     LengthUnit unit = desk.desk().atBench().shop().lengthUnit();
     this.head = new VisitHead(texts);
-    this.readings = new ReadingsPanel(desk, said, this::refresh);
-    this.terms = new ReadingTermsBar(model, texts, this::remade, this::refresh);
+    this.readings = new ReadingsPanel(desk, said, this::showReadings);
+    this.terms = new ReadingTermsBar(model, texts, this::remade, this::showReadings);
     readings.getChildren().add(terms);
     this.findings = new FindingsPanel(texts);
     this.checks = new ChecksModel(record, unit, new UnusualCheck(unit));
@@ -80,7 +84,9 @@ final class VisitParts {
     this.jobSheet =
         KeyHint.button(texts.say("visit.job-sheet"), texts.say("visit.key.job-sheet"), export);
     jobSheet.setId("job-sheet");
-    this.work = new WorkPanel(texts, this::logWork, List.of(jobSheet, handOut));
+    Button past =
+        KeyHint.button(texts.say("visit.history"), texts.say("visit.key.history"), history);
+    this.work = new WorkPanel(texts, this::logWork, List.of(past, jobSheet, handOut));
     this.notes = new NotesPanel(texts, log::kind, this::writeNote);
     this.made = new MadeMode(desk, readings, this::refresh);
     this.sections = new SectionWords(sections());
@@ -185,18 +191,25 @@ final class VisitParts {
 
   /** Shows everything as it now is. */
   private void refresh() {
-    var found = said.findings(model);
     readings.title(passes());
-    readings.refresh(found);
-    boolean moving = said.of(model).stream().anyMatch(words -> words.kind().moves());
-    boolean onePiece = model.record().instrument().saddle().kind() == SaddleKind.ONE_PIECE;
-    boolean unread = model.strings().stream().allMatch(string -> string.advice() == null);
-    String none = texts.say(unread ? "visit.findings.begin" : "visit.findings.none");
-    findings.show(found, none, moving || made.on(), onePiece);
     work.show(log.work(), model.open());
     notes.show(log.notes(), model.open());
     handOut.setDisable(!model.open());
     head.show(model, shape);
+    showReadings();
+  }
+
+  /** Shows what a key can change, and no more: it happens at every key. */
+  private void showReadings() {
+    List<FindingLine> found = said.findings(model);
+    List<StringWords> words = said.of(model);
+    readings.refresh(found, words);
+    boolean moving = words.stream().anyMatch(string -> string.kind().moves());
+    boolean unread = model.strings().stream().allMatch(string -> string.advice() == null);
+    String none = texts.say(unread ? "visit.findings.begin" : "visit.findings.none");
+    boolean onePiece = model.record().instrument().saddle().kind() == SaddleKind.ONE_PIECE;
+    String caution = texts.say(onePiece ? "visit.caution.file" : "visit.caution.tension");
+    findings.show(new FindingsPanel.Shown(found, none, moving || made.on() ? caution : ""));
     made.showButtons();
     sections.refresh(shape == SheetShape.NARROW);
   }
@@ -227,7 +240,12 @@ final class VisitParts {
   void width(double widthPx) {
     double em = readings.em();
     SheetShape wanted = SheetShape.forWindow(widthPx / em);
+    if (placed && wanted == shape && em == shapedEm) {
+      return;
+    }
+    placed = true;
     shape = wanted;
+    shapedEm = em;
     readings.setShape(wanted);
     page.setShape(wanted, em);
     checksPanel.setNarrow(wanted == SheetShape.WIDE);

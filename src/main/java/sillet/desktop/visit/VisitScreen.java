@@ -5,6 +5,7 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Consumer;
+import javafx.beans.value.ChangeListener;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
@@ -34,6 +35,7 @@ public final class VisitScreen implements Screen {
   private @Nullable VisitParts parts;
   private @Nullable VisitModel model;
   private @Nullable Saves saves;
+  private final ChangeListener<Node> focusFollower = (property, before, now) -> focused(now);
   private boolean shown;
 
   /**
@@ -80,15 +82,14 @@ public final class VisitScreen implements Screen {
         new Saves(desk.background(), desk.sign(), desk.atBench().clock(), this::keep, this::kept);
     VisitDesk together = new VisitDesk(desk, visit, onTheWay);
     VisitParts made =
-        new VisitParts(together, new WordsOfVisit(desk.texts(), advisor), this::export);
+        new VisitParts(
+            together, new WordsOfVisit(desk.texts(), advisor), this::export, this::history);
     model = visit;
     saves = onTheWay;
     parts = made;
     pane.setContent(made.node());
     made.width(pane.getWidth());
     pane.widthProperty().addListener((property, before, now) -> made.width(now.doubleValue()));
-    pane.sceneProperty().addListener((property, before, now) -> followFocus());
-    followFocus();
     if (shown) {
       begin(made);
     }
@@ -108,13 +109,6 @@ public final class VisitScreen implements Screen {
     }
   }
 
-  private void followFocus() {
-    var scene = pane.getScene();
-    if (scene != null) {
-      scene.focusOwnerProperty().addListener((property, before, now) -> focused(now));
-    }
-  }
-
   private void focused(@Nullable Node now) {
     if (parts != null && now != null) {
       parts.focused(now);
@@ -130,6 +124,7 @@ public final class VisitScreen implements Screen {
   @Override
   public void shown() {
     shown = true;
+    pane.getScene().focusOwnerProperty().addListener(focusFollower);
     if (parts != null) {
       begin(parts);
     }
@@ -146,6 +141,10 @@ public final class VisitScreen implements Screen {
   public void left() {
     shown = false;
     pane.requestFocus();
+    pane.getScene().focusOwnerProperty().removeListener(focusFollower);
+    if (saves != null && saves.failure() != null) {
+      desk.ask().problem(Message.of("visit.left-unsaved", saves.written()));
+    }
   }
 
   @Override
@@ -155,7 +154,8 @@ public final class VisitScreen implements Screen {
     keys.put(shortcut(KeyCode.E), this::export);
     keys.put(shortcut(KeyCode.S), this::saveAgain);
     keys.put(shortcut(KeyCode.L), () -> with(VisitParts::focusWork));
-    keys.put(shortcut(KeyCode.N), () -> with(VisitParts::focusNotes));
+    keys.put(shortcut(KeyCode.T), () -> with(VisitParts::focusNotes));
+    keys.put(shortcut(KeyCode.H), this::history);
     keys.put(shortcut(KeyCode.ENTER), () -> with(VisitParts::handOut));
     keys.put(new KeyCodeCombination(KeyCode.F4), () -> with(VisitParts::turnAbout));
     keys.put(new KeyCodeCombination(KeyCode.F6), () -> walk(1));
@@ -192,6 +192,12 @@ public final class VisitScreen implements Screen {
       parts.made().end();
       parts.focusStart();
       event.consume();
+    }
+  }
+
+  private void history() {
+    if (model != null) {
+      desk.goTo().history(model.record().instrument().id());
     }
   }
 

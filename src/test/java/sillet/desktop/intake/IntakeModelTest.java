@@ -24,6 +24,7 @@ import sillet.logbook.shop.Shop;
 import sillet.logbook.strings.FittedString;
 import sillet.logbook.strings.StringMake;
 import sillet.logbook.strings.StringSet;
+import sillet.logbook.visits.StringsOn;
 import sillet.logbook.visits.Visit;
 
 class IntakeModelTest {
@@ -192,5 +193,20 @@ class IntakeModelTest {
     Instrument instrument = ((AddInstrument) actions.get(1)).instrument();
     assertThat(instrument.saddle().thicknessMm()).isCloseTo(3.175, within(1e-9));
     assertThat(instrument.saddle().screwPitchMm()).isNull();
+  }
+
+  @Test
+  void takesTheStringsAnInstrumentHadWhenItWasHereLast() {
+    typeAnElectric();
+    StringsOn last = visit().strings();
+    emptyPage();
+    model.instrument().neck().scaleTreble().fill("648");
+    model.neckTyped();
+    model.strings().take(last);
+    model.customer().name().fill("Maren Oduya");
+    model.instrument().model().fill("Fieldfare");
+    model.arrival().request().fill("Again");
+    assertThat(model.look()).isTrue();
+    assertThat(visit().strings()).isEqualTo(last);
   }
 }

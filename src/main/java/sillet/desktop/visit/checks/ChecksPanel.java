@@ -129,6 +129,7 @@ public final class ChecksPanel extends VBox {
       CheckCell fret =
           new CheckCell(
               row.fret(), texts.say("visit.checks.fret-of", name), () -> fretChanged(row));
+      fret.setId("check-" + row.kind().word() + "-" + row.string() + "-fret");
       fret.getStyleClass().add("fret-cell");
       fret.setEditable(editable);
       table.add(fret, 1, figures);

@@ -18,6 +18,8 @@ public final class CellField extends StackPane {
   private final TextField field = new TextField();
   private final Tries tries = new Tries(0, -1, "");
   private boolean showing;
+  private int shownTries;
+  private int shownWild = -1;
 
   /**
    * A cell.
@@ -39,6 +41,7 @@ public final class CellField extends StackPane {
     tries.getStyleClass().add("tries");
     tries.setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
     setAlignment(tries, Pos.CENTER_LEFT);
+    tries.setVisible(false);
     getChildren().addAll(field, tries);
     listen();
     refresh();
@@ -94,7 +97,7 @@ public final class CellField extends StackPane {
       if (hand.go(cell, back ? Way.PREVIOUS_FRET : Way.NEXT_FRET)) {
         event.consume();
       }
-    } else if (code == KeyCode.UP || code == KeyCode.DOWN) {
+    } else if (field.isEditable() && (code == KeyCode.UP || code == KeyCode.DOWN)) {
       hand.stepped(cell, code == KeyCode.UP ? 1 : -1);
       show(hand.face(cell).typing());
       field.end();
@@ -125,14 +128,24 @@ public final class CellField extends StackPane {
     boolean wrong = face.state() == CellFace.State.ERROR && !typing;
     field.pseudoClassStateChanged(Looks.UNREAD, face.state() == CellFace.State.UNREAD);
     field.pseudoClassStateChanged(Looks.ERROR, wrong);
-    tries.show(typing ? 0 : face.tries(), face.wildTry().orElse(-1), "");
-    tries.setVisible(!typing && face.tries() > 1);
+    bars(typing ? 0 : face.tries(), face.wildTry().orElse(-1));
+  }
+
+  private void bars(int count, int wild) {
+    if (count != shownTries || wild != shownWild) {
+      shownTries = count;
+      shownWild = wild;
+      tries.show(count, wild, "");
+      tries.setVisible(count > 1);
+    }
   }
 
   private void show(String text) {
-    showing = true;
-    field.setText(text);
-    showing = false;
+    if (!text.equals(field.getText())) {
+      showing = true;
+      field.setText(text);
+      showing = false;
+    }
   }
 
   @Override

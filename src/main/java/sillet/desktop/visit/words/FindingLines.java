@@ -2,6 +2,7 @@ package sillet.desktop.visit.words;
 
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -46,13 +47,15 @@ public final class FindingLines {
     return lines;
   }
 
-  private List<Message> notes(StringPass string) {
+  /** What the advice says; the strain is said of every string, read or not, in every pass. */
+  private Set<Message> notes(StringPass string) {
     MoveAdvice advice = string.advice();
-    if (advice != null) {
-      return advice.notes();
-    }
+    Set<Message> notes = new LinkedHashSet<>(advice == null ? List.of() : advice.notes());
     Message strain = advisor.strain(string.string());
-    return strain == null ? List.of() : List.of(strain);
+    if (strain != null) {
+      notes.add(strain);
+    }
+    return notes;
   }
 
   private FindingLine line(Message note, List<Integer> numbers) {
