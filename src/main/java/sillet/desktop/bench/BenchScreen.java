@@ -140,6 +140,7 @@ public final class BenchScreen implements Screen {
     said.setText(trouble.map(texts::say).orElse(model.empty() ? texts.say("bench.nothing") : ""));
     said.setVisible(!said.getText().isEmpty());
     columns.setVisible(!model.rows().isEmpty());
+    columns.setManaged(columns.isVisible());
   }
 
   private void takeIn() {

@@ -7,6 +7,7 @@ import javafx.scene.control.ButtonType;
 import javafx.scene.control.Dialog;
 import javafx.scene.control.DialogPane;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.VBox;
 import javafx.stage.Modality;
 import javafx.stage.Window;
@@ -14,6 +15,8 @@ import sillet.desktop.theme.Looks;
 
 /** Makes the few windows over the window: dressed like it, focus back afterwards. */
 final class Dialogs {
+  private static final double SHARE_OF_WINDOW = 0.6;
+
   private final Window owner;
   private final ObservableValue<Settings> settings;
 
@@ -60,6 +63,15 @@ final class Dialogs {
       focusBefore.requestFocus();
     }
     return taken;
+  }
+
+  /** A long sheet, which scrolls where it would stand out of the window. */
+  ScrollPane sheet(Node sheet) {
+    ScrollPane pane = new ScrollPane(sheet);
+    pane.setFitToWidth(true);
+    pane.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+    pane.setMaxHeight(owner.getHeight() * SHARE_OF_WINDOW);
+    return pane;
   }
 
   private void dress(DialogPane pane) {

@@ -21,7 +21,7 @@ final class KeySheet {
   /** Shows the sheet and waits until it is put away. */
   void show() {
     ButtonType read = new ButtonType(texts.say("shell.go-on"), ButtonData.OK_DONE);
-    dialogs.show(texts.say("shell.keys"), grid(), read);
+    dialogs.show(texts.say("shell.keys"), dialogs.sheet(grid()), read);
   }
 
   private GridPane grid() {
@@ -35,7 +35,21 @@ final class KeySheet {
     row(grid, "shell.key-back", "shell.key-back-does");
     row(grid, "shell.key-theme", "shell.key-theme-does");
     row(grid, "shell.key-text", "shell.key-text-does");
+    head(grid, "shell.keys-visit");
+    row(grid, "shell.key-parts", "shell.key-parts-does");
+    row(grid, "shell.key-moves", "shell.key-moves-does");
+    row(grid, "shell.key-passes", "shell.key-passes-does");
+    row(grid, "shell.key-turn", "shell.key-turn-does");
+    row(grid, "shell.key-log", "shell.key-log-does");
+    row(grid, "shell.key-sheet", "shell.key-sheet-does");
+    row(grid, "shell.key-hand-out", "shell.key-hand-out-does");
     return grid;
+  }
+
+  private void head(GridPane grid, String key) {
+    Label head = new Label(texts.say(key));
+    head.getStyleClass().add(Looks.PANEL_HEAD);
+    grid.add(head, 0, grid.getRowCount(), 2, 1);
   }
 
   private void row(GridPane grid, String key, String does) {

@@ -8,6 +8,8 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
+import java.nio.file.attribute.FileAttribute;
+import java.nio.file.attribute.PosixFilePermissions;
 import java.util.HashMap;
 import java.util.Map;
 import sillet.desktop.theme.TextSize;
@@ -81,7 +83,7 @@ final class SettingsFile {
   }
 
   private void write(Settings settings) throws IOException {
-    Files.createDirectories(folder);
+    Files.createDirectories(folder, onlyOwner());
     Path beside = folder.resolve(NAME + ".new");
     String text =
         THEME
@@ -94,6 +96,15 @@ final class SettingsFile {
             + "\n";
     Files.writeString(beside, text, StandardCharsets.UTF_8);
     Files.move(beside, file, ATOMIC_MOVE, REPLACE_EXISTING);
+  }
+
+  /** The folder is the logbook's too, and nobody else's business. */
+  private FileAttribute<?>[] onlyOwner() {
+    return folder.getFileSystem().supportedFileAttributeViews().contains("posix")
+        ? new FileAttribute<?>[] {
+          PosixFilePermissions.asFileAttribute(PosixFilePermissions.fromString("rwx------"))
+        }
+        : new FileAttribute<?>[0];
   }
 
   private static TextSize textSize(String written) {

@@ -18,6 +18,8 @@ import javafx.stage.Window;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import sillet.desktop.drawing.Picture;
+import sillet.desktop.theme.TextSize;
+import sillet.desktop.theme.Theme;
 import sillet.logbook.actions.NameShop;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.text.Message;
@@ -53,12 +55,14 @@ class ShopPlaceTest {
   @Test
   void showsEveryKeyAndGivesTheFocusBack() throws TimeoutException, IOException {
     begin();
+    new SettingsFile(folder).keep(new Settings(Theme.LIGHT, new TextSize(200)));
     try (TestWindow window = TestWindow.over(folder)) {
       window.untilShown("#bench-said");
       window.press(KeyCode.F3);
       Node before = Picture.onFxThread(() -> window.scene().getFocusOwner());
       window.press(KeyCode.F1);
       Scene sheet = dialog(window);
+      assertThat(sheet.getHeight()).isLessThanOrEqualTo(window.scene().getHeight());
       assertThat(labels(sheet)).contains(Texts.english().say("shell.key-theme-does"));
       Picture.onFxThread(() -> Picture.of(sheet)).save("dialog-keys");
       window.press(KeyCode.ENTER);
