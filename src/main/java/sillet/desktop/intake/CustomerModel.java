@@ -3,6 +3,7 @@ package sillet.desktop.intake;
 import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
+import java.util.function.Supplier;
 import org.jspecify.annotations.Nullable;
 import sillet.desktop.controls.Readers;
 import sillet.desktop.controls.TypedFieldModel;
@@ -15,16 +16,18 @@ public final class CustomerModel {
       TypedFieldModel.required(Readers.words(), Message.of("intake.customer.name-missing"));
   private final TypedFieldModel<String> phone = TypedFieldModel.optional(Readers.words());
   private final TypedFieldModel<String> note = TypedFieldModel.optional(Readers.words());
-  private final UUID newId;
+  private final Supplier<UUID> ids;
+  private UUID newId;
   private @Nullable Customer known;
 
   /**
    * Nobody yet.
    *
-   * @param newId identity of the person, should it be a new one
+   * @param ids a new identity each time, should it be a new person
    */
-  public CustomerModel(UUID newId) {
-    this.newId = newId;
+  public CustomerModel(Supplier<UUID> ids) {
+    this.ids = ids;
+    this.newId = ids.get();
   }
 
   public TypedFieldModel<String> name() {
@@ -57,6 +60,8 @@ public final class CustomerModel {
   public void someoneNew() {
     if (known != null) {
       known = null;
+      // the known one may have been made on this page a moment ago, under the identity given then
+      newId = ids.get();
       phone.fill("");
       note.fill("");
     }

@@ -57,7 +57,8 @@ final class CustomerPanel extends VBox {
   }
 
   private void typed(String now) {
-    if (filling) {
+    boolean namesKnown = model.known().filter(one -> one.name().equals(now)).isPresent();
+    if (filling || namesKnown) {
       return;
     }
     if (model.known().isPresent()) {
@@ -93,7 +94,8 @@ final class CustomerPanel extends VBox {
     chosen.accept(customer);
   }
 
-  private void show() {
+  /** Shows whether the person is known, and locks what is only to look at. */
+  void show() {
     boolean isKnown = model.known().isPresent();
     phone.setEditable(!isKnown);
     note.setEditable(!isKnown);

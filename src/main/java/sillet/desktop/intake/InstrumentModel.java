@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
 import java.util.function.Function;
+import java.util.function.Supplier;
 import org.jspecify.annotations.Nullable;
 import sillet.desktop.controls.Readers;
 import sillet.desktop.controls.TypedFieldModel;
@@ -15,7 +16,7 @@ import sillet.logbook.units.LengthUnit;
 
 /** The instrument: one the logbook knows, or a new one. */
 public final class InstrumentModel {
-  private final UUID newId;
+  private final Supplier<UUID> ids;
   private final TypedFieldModel<String> maker = TypedFieldModel.optional(Readers.words());
   private final TypedFieldModel<String> model =
       TypedFieldModel.required(Readers.words(), Message.of("intake.instrument.model-missing"));
@@ -24,18 +25,20 @@ public final class InstrumentModel {
   private final NeckFields neck;
   private final SaddleFields saddle;
   private InstrumentKind kind = InstrumentKind.ELECTRIC;
+  private UUID newId;
   private @Nullable Instrument known;
 
   /**
    * No instrument yet.
    *
-   * @param newId its identity, should it be a new one
+   * @param ids a new identity each time, should it be a new one
    * @param unit the shop's
    * @param unusualScale warnings for a scale that is out of the ordinary
    */
   public InstrumentModel(
-      UUID newId, LengthUnit unit, Function<Length, List<Message>> unusualScale) {
-    this.newId = newId;
+      Supplier<UUID> ids, LengthUnit unit, Function<Length, List<Message>> unusualScale) {
+    this.ids = ids;
+    this.newId = ids.get();
     this.neck = new NeckFields(unit, unusualScale);
     this.saddle = new SaddleFields(unit);
   }
@@ -97,6 +100,8 @@ public final class InstrumentModel {
   /** It is a new one after all. */
   public void anotherOne() {
     known = null;
+    // the known one may have been made on this page a moment ago, under the identity given then
+    newId = ids.get();
     List.of(maker, model, serial, tag).forEach(field -> field.fill(""));
     neck.scaleTreble().fill("");
     neck.scaleBass().fill("");

@@ -17,8 +17,8 @@ import sillet.logbook.strings.Tuning;
 import sillet.logbook.visits.Visit;
 
 /**
- * The whole page. Identities are given once, so that saving again after a failure never makes a
- * second person or instrument.
+ * The whole page. Saving again after a failure never makes a second person or instrument: an
+ * identity stays until somebody or something else is typed.
  */
 public final class IntakeModel {
   private final UsualThings usual;
@@ -40,8 +40,8 @@ public final class IntakeModel {
   public IntakeModel(
       Shop shop, UsualThings usual, LocalDate today, Supplier<UUID> ids, Unusual unusual) {
     this.usual = usual;
-    this.customer = new CustomerModel(ids.get());
-    this.instrument = new InstrumentModel(ids.get(), shop.lengthUnit(), unusual::scale);
+    this.customer = new CustomerModel(ids);
+    this.instrument = new InstrumentModel(ids, shop.lengthUnit(), unusual::scale);
     this.strings =
         new StringsModel(ids.get(), shop.lengthUnit(), shop.referenceHz(), today, unusual::gauge);
     this.arrival = new ArrivalModel(today);

@@ -165,6 +165,7 @@ public final class IntakeScreen implements Screen {
 
   private void notTaken() {
     trouble.setText(texts.say("intake.not-taken"));
+    customer.show();
     instrument.show();
   }
 

@@ -1,5 +1,6 @@
 package sillet.desktop.visit;
 
+import java.math.BigDecimal;
 import java.util.Optional;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
@@ -17,7 +18,6 @@ import sillet.desktop.visit.readings.ReadingTerms;
 import sillet.desktop.visit.readings.ShownFrets;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Texts;
-import sillet.logbook.units.Figures;
 
 /** Which frets have cells, what the notes are compared with, how far one reading scatters. */
 final class ReadingTermsBar extends BorderPane {
@@ -39,7 +39,7 @@ final class ReadingTermsBar extends BorderPane {
     this.scatter =
         TypedFieldModel.optional(Readers.number("0.01", "20", texts.say("visit.terms.cents")));
     frets.fill(model.frets().written());
-    scatter.fill(Figures.fixed(model.terms().sdCents(), 1));
+    scatter.fill(scatterInFull());
     said.setMinWidth(0);
     HBox fields =
         new HBox(
@@ -118,8 +118,13 @@ final class ReadingTermsBar extends BorderPane {
     say();
   }
 
+  /** Rounded it would be taken for another figure as soon as the field is left. */
+  private String scatterInFull() {
+    return BigDecimal.valueOf(model.terms().sdCents()).toPlainString();
+  }
+
   private void scatterTyped() {
-    if (scatter.look()) {
+    if (scatter.look() && !scatter.typedProperty().get().equals(scatterInFull())) {
       Optional<Double> sd = scatter.value();
       if (sd.isPresent() && sd.get() != model.terms().sdCents()) {
         model.readUnder(new ReadingTerms(model.terms().against(), sd.get()));

@@ -209,4 +209,24 @@ class IntakeModelTest {
     assertThat(model.look()).isTrue();
     assertThat(visit().strings()).isEqualTo(last);
   }
+
+  /** Person and instrument were saved before taking in failed; then somebody else is typed. */
+  @Test
+  void makesAnotherPersonAndInstrumentAfterAHalfFailedSave() {
+    typeAnElectric();
+    List<Action> halfDone = model.actions(2417, "Edda");
+    Customer saved = ((AddCustomer) halfDone.get(0)).customer();
+    Instrument kept = ((AddInstrument) halfDone.get(1)).instrument();
+    model.customer().choose(saved);
+    model.instrument().choose(kept);
+    assertThat(model.actions(2417, "Edda")).hasExactlyElementsOfTypes(TakeIn.class);
+    model.customer().someoneNew();
+    model.instrument().anotherOne();
+    typeAnElectric();
+    model.customer().name().fill("Tove Lindqvarn");
+    List<Action> again = model.actions(2417, "Edda");
+    assertThat(((AddCustomer) again.get(0)).customer().id()).isNotEqualTo(saved.id());
+    assertThat(((AddInstrument) again.get(1)).instrument().id()).isNotEqualTo(kept.id());
+    assertThat(model.actions(2417, "Edda")).as("from then on the same").isEqualTo(again);
+  }
 }

@@ -23,6 +23,8 @@ public final class CheckRow {
   private final Map<Moment, TypedFieldModel<Length>> values = new EnumMap<>(Moment.class);
   private final Map<Moment, BenchCheck> recorded = new EnumMap<>(Moment.class);
   private CheckMethod method;
+  private CheckMethod methodFilled;
+  private String fretFilled;
 
   CheckRow(
       CheckPlace place,
@@ -31,8 +33,10 @@ public final class CheckRow {
       BiFunction<CheckKind, Length, List<Message>> unusual) {
     this.place = place;
     this.method = place.usualMethod();
+    this.methodFilled = method;
+    this.fretFilled = written(place.usualFret());
     this.fret = TypedFieldModel.optional(Readers.whole(1, fretsOnNeck, ""));
-    fret.fill(place.usualFret() == 0 ? "" : Integer.toString(place.usualFret()));
+    fret.fill(fretFilled);
     for (Moment moment : Moment.values()) {
       values.put(
           moment,
@@ -40,6 +44,10 @@ public final class CheckRow {
               .sayingBack(length -> length.other(unit))
               .warning(length -> unusual.apply(place.kind(), length)));
     }
+  }
+
+  private static String written(int fret) {
+    return fret == 0 ? "" : Integer.toString(fret);
   }
 
   public CheckKind kind() {
@@ -77,7 +85,12 @@ public final class CheckRow {
     method = how;
   }
 
-  /** Takes what the record holds; a field in which something else was typed keeps that. */
+  /**
+   * Takes what the record holds; a field in which something else was typed keeps that, and so do
+   * the fret and the method if another one was chosen.
+   *
+   * @param check the newest for its moment
+   */
   void take(BenchCheck check) {
     BenchCheck before = recorded.put(check.moment(), check);
     if (check.equals(before)) {
@@ -88,12 +101,34 @@ public final class CheckRow {
     if (typed.isBlank() || (before != null && typed.equals(before.typed()))) {
       field.fill(check.typed());
     }
-    fret.fill(check.fret() == 0 ? "" : Integer.toString(check.fret()));
-    method = check.method();
+    takeFret(written(check.fret()));
+    takeMethod(check.method());
   }
 
-  /** The check to be saved; empty if there is nothing new or it cannot be read. */
+  private void takeFret(String known) {
+    String typed = fret.typedProperty().get();
+    if (typed.equals(fretFilled) || typed.equals(known)) {
+      fret.fill(known);
+      fretFilled = known;
+    }
+  }
+
+  private void takeMethod(CheckMethod known) {
+    if (method == methodFilled || method == known) {
+      method = known;
+      methodFilled = known;
+    }
+  }
+
+  /**
+   * The check to be saved; empty if there is nothing new or it cannot be read. A check is
+   * corrected, not taken back: where a recorded figure was cleared it is shown again.
+   */
   Optional<BenchCheck> toSave(Moment moment) {
+    BenchCheck known = recorded.get(moment);
+    if (known != null && value(moment).typedProperty().get().isBlank()) {
+      value(moment).fill(known.typed());
+    }
     Optional<Length> length = value(moment).value();
     if (length.isEmpty() || !fret.look()) {
       return Optional.empty();
@@ -107,7 +142,7 @@ public final class CheckRow {
             moment,
             length.get().mm(),
             length.get().typed());
-    return check.equals(recorded.get(moment)) ? Optional.empty() : Optional.of(check);
+    return check.equals(known) ? Optional.empty() : Optional.of(check);
   }
 
   /** What the record holds for a moment; null if nothing. */

@@ -55,11 +55,17 @@ public final class ChecksModel {
     return rows.computeIfAbsent(place, made -> new CheckRow(made, unit, frets, unusual));
   }
 
-  /** Takes what the logbook now holds. */
+  /** Takes what the logbook now holds; checks that were corrected since are passed over. */
   public void take(VisitRecord record) {
+    Map<CheckPlace, Map<Moment, BenchCheck>> newest = new LinkedHashMap<>();
     for (BenchCheck check : record.checks()) {
-      row(CheckPlace.of(check)).take(check);
+      Map<Moment, BenchCheck> there =
+          newest.computeIfAbsent(CheckPlace.of(check), first -> new LinkedHashMap<>());
+      // put in anew, so that the one made last is taken last
+      there.remove(check.moment());
+      there.put(check.moment(), check);
     }
+    newest.forEach((place, checks) -> checks.values().forEach(row(place)::take));
   }
 
   /** Shows the rows of the inner strings too, or hides those in which nothing stands. */

@@ -13,10 +13,15 @@ public final class RoomRow {
   /** What the fields cannot show: half of the last digit of a shop that types thousandths. */
   private static final double SHOWN_MM = 0.0128;
 
+  /** A length that went to the record and came back differs by rounding of the machine at most. */
+  private static final double SAME_MM = 1e-6;
+
   private final int string;
   private final LengthUnit unit;
   private final TypedFieldModel<Length> back;
   private final TypedFieldModel<Length> forward;
+  private String backFilled = "";
+  private String forwardFilled = "";
   private double movedMm;
   private @Nullable Travel recorded;
 
@@ -46,22 +51,38 @@ public final class RoomRow {
   }
 
   /**
-   * Takes what the record holds.
+   * Takes what the record holds; a field in which something else was typed keeps that.
    *
    * @param travel as the instrument came in; null if not measured
    * @param moved what the saddle went since then, millimetres away from the neck
    */
   void take(@Nullable Travel travel, double moved) {
     if (travel != null && (!travel.equals(recorded) || moved != movedMm)) {
-      fill(back, travel.backMm(), -moved);
-      fill(forward, travel.forwardMm(), moved);
+      if (untouched(back, backFilled, movedMm, travel.backMm())) {
+        backFilled = fill(back, travel.backMm(), -moved);
+      }
+      if (untouched(forward, forwardFilled, -movedMm, travel.forwardMm())) {
+        forwardFilled = fill(forward, travel.forwardMm(), moved);
+      }
     }
     movedMm = moved;
     recorded = travel;
   }
 
-  private void fill(TypedFieldModel<Length> field, @Nullable Double mm, double moved) {
-    field.fill(mm == null ? "" : InUnit.written(Math.max(0, mm + moved), unit));
+  private String fill(TypedFieldModel<Length> field, @Nullable Double mm, double moved) {
+    String text = mm == null ? "" : InUnit.written(Math.max(0, mm + moved), unit);
+    field.fill(text);
+    return text;
+  }
+
+  /** True if the field still says what was filled in, or what it says is what was saved. */
+  private static boolean untouched(
+      TypedFieldModel<Length> field, String filled, double moved, @Nullable Double saved) {
+    if (field.typedProperty().get().equals(filled)) {
+      return true;
+    }
+    Double typed = asReceived(field, moved);
+    return typed != null && saved != null && Math.abs(typed - saved) < SAME_MM;
   }
 
   /** The travel to be saved, counted back to how the saddle came in; empty if nothing is new. */

@@ -95,4 +95,62 @@ class ChecksModelTest {
     assertThat(model.made(Moment.RECEIVED)).isEqualTo(1);
     assertThat(model.made(Moment.LEFT)).isZero();
   }
+
+  private static BenchCheck relief(int fret, CheckMethod method, Moment moment, String typed) {
+    double mm = Double.parseDouble(typed);
+    return new BenchCheck(CheckKind.RELIEF, 0, fret, method, moment, mm, typed);
+  }
+
+  @Test
+  void keepsAFretAndAMethodJustChosenWhenTheRecordArrives() {
+    model.take(TestVisits.checked(blank, RELIEF));
+    CheckRow row = row(CheckKind.RELIEF, 0);
+    row.fret().typedProperty().set("8");
+    row.measuredBy(CheckMethod.STRAIGHTEDGE);
+    model.take(
+        TestVisits.checked(blank, RELIEF, relief(7, CheckMethod.STRING, Moment.LEFT, "0.2")));
+    assertThat(row.fret().typedProperty().get()).isEqualTo("8");
+    assertThat(row.method()).isEqualTo(CheckMethod.STRAIGHTEDGE);
+    assertThat(row.value(Moment.LEFT).typedProperty().get()).isEqualTo("0.2");
+  }
+
+  @Test
+  void followsTheRecordAgainOnceAChosenFretAndMethodWereSaved() {
+    model.take(TestVisits.checked(blank, RELIEF));
+    CheckRow row = row(CheckKind.RELIEF, 0);
+    row.fret().typedProperty().set("8");
+    row.measuredBy(CheckMethod.STRAIGHTEDGE);
+    BenchCheck saved = model.commit(row, Moment.RECEIVED, VISIT).orElseThrow().checks().get(0);
+    model.take(TestVisits.checked(blank, RELIEF, saved));
+    BenchCheck later = relief(9, CheckMethod.STRING, Moment.RECEIVED, "0.31");
+    model.take(TestVisits.checked(blank, RELIEF, saved, later));
+    assertThat(row.fret().typedProperty().get()).isEqualTo("9");
+    assertThat(row.method()).isEqualTo(CheckMethod.STRING);
+  }
+
+  @Test
+  void aCheckThatWasCorrectedSinceChangesNothing() {
+    BenchCheck corrected = relief(8, CheckMethod.STRAIGHTEDGE, Moment.RECEIVED, "0.28");
+    VisitRecord record = TestVisits.checked(blank, RELIEF, corrected);
+    model.take(record);
+    CheckRow row = row(CheckKind.RELIEF, 0);
+    row.fret().typedProperty().set("7");
+    row.measuredBy(CheckMethod.STRING);
+    model.take(record);
+    assertThat(row.recorded(Moment.RECEIVED)).isEqualTo(corrected);
+    assertThat(row.fret().typedProperty().get()).isEqualTo("7");
+    assertThat(row.method()).isEqualTo(CheckMethod.STRING);
+    assertThat(row.value(Moment.RECEIVED).typedProperty().get()).isEqualTo("0.28");
+  }
+
+  @Test
+  void showsARecordedFigureAgainThatWasCleared() {
+    model.take(TestVisits.checked(blank, RELIEF));
+    CheckRow row = row(CheckKind.RELIEF, 0);
+    row.value(Moment.RECEIVED).typedProperty().set(" ");
+    assertThat(model.commit(row, Moment.RECEIVED, VISIT)).isEmpty();
+    assertThat(row.value(Moment.RECEIVED).typedProperty().get()).isEqualTo("0.31");
+    assertThat(model.commit(row, Moment.LEFT, VISIT)).isEmpty();
+    assertThat(row.value(Moment.LEFT).typedProperty().get()).isEmpty();
+  }
 }

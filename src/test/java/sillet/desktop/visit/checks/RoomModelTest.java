@@ -56,4 +56,32 @@ class RoomModelTest {
     assertThat(model.commit(row, VISIT)).isEmpty();
     assertThat(row.back().problemProperty().get()).isPresent();
   }
+
+  @Test
+  void keepsWhatIsTypedInOneFieldWhenTheOtherOneIsSaved() {
+    RoomModel model = of(TestVisits.six(List.of()));
+    RoomRow row = model.rows().get(0);
+    row.back().typedProperty().set("6.5");
+    row.forward().typedProperty().set("1.");
+    model.take(TestVisits.six(List.of(new Travel(1, 6.5, null))));
+    assertThat(row.back().typedProperty().get()).isEqualTo("6.50");
+    assertThat(row.forward().typedProperty().get()).isEqualTo("1.");
+    row.forward().typedProperty().set("1.0");
+    assertThat(model.commit(row, VISIT)).contains(new RecordTravel(VISIT, List.of(KNOWN)));
+  }
+
+  /** What was typed and saved is no draft any more: it follows the saddle. */
+  @Test
+  void showsTheRoomAfterAMoveAlsoWhereItWasTyped() {
+    RoomModel model = of(TestVisits.six(List.of()));
+    RoomRow row = model.rows().get(0);
+    row.back().typedProperty().set("6.5");
+    row.forward().typedProperty().set("1");
+    VisitRecord saved = TestVisits.six(List.of(KNOWN));
+    model.take(saved);
+    model.take(TestVisits.moved(saved, 1, 1, 0.5));
+    assertThat(row.back().typedProperty().get()).isEqualTo("6.00");
+    assertThat(row.forward().typedProperty().get()).isEqualTo("1.50");
+    assertThat(model.commit(row, VISIT)).isEmpty();
+  }
 }
