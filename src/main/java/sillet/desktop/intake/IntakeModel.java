@@ -99,8 +99,9 @@ public final class IntakeModel {
     return usual.tunings(instrument.kind(), strings.lines().size());
   }
 
-  /** Judges every field. */
+  /** Judges every field; the hand may still be in the last gauge. */
   public boolean look() {
+    gaugesTyped();
     boolean owner = customer.look();
     boolean brought = instrument.look();
     boolean strung = strings.look();

@@ -53,7 +53,7 @@ final class MadeMode {
 
   private void begin() {
     VisitModel visit = desk.model();
-    if (!visit.open() || visit.pass() != visit.lastPass()) {
+    if (!visit.open() || visit.pass() != visit.lastPass() || desk.saves().movesPending()) {
       return;
     }
     LengthUnit unit = desk.desk().atBench().shop().lengthUnit();
@@ -92,7 +92,8 @@ final class MadeMode {
     VisitModel visit = desk.model();
     if (model == null) {
       panel.actions(begin);
-      begin.setDisable(!visit.open() || visit.pass() != visit.lastPass() || nothingRead());
+      boolean closed = !visit.open() || visit.pass() != visit.lastPass();
+      begin.setDisable(closed || desk.saves().movesPending() || nothingRead());
     } else {
       panel.actions(cancel, record);
       record.setDisable(!model.complete());

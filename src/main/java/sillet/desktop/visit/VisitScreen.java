@@ -79,7 +79,13 @@ public final class VisitScreen implements Screen {
     MoveAdvisor advisor = advisor();
     VisitModel visit = new VisitModel(record, advisor, desk.atBench().clock());
     Saves onTheWay =
-        new Saves(desk.background(), desk.sign(), desk.atBench().clock(), this::keep, this::kept);
+        new Saves(
+            desk.background(),
+            desk.sign(),
+            desk.atBench().clock(),
+            this::perform,
+            this::read,
+            this::kept);
     VisitDesk together = new VisitDesk(desk, visit, onTheWay);
     VisitParts made =
         new VisitParts(
@@ -95,9 +101,8 @@ public final class VisitScreen implements Screen {
     }
   }
 
-  private VisitRecord keep(Action action) {
+  private void perform(Action action) {
     desk.logbook().perform(action, desk.atBench().technician());
-    return read();
   }
 
   private void kept(VisitRecord record) {

@@ -5,7 +5,9 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
+import sillet.acoustics.wire.Construction;
 import sillet.logbook.moves.BenchString;
+import sillet.logbook.strings.StringMake;
 import sillet.logbook.text.Message;
 import sillet.logbook.units.Figures;
 import sillet.logbook.units.LengthUnit;
@@ -23,6 +25,10 @@ public record Plausibility(LengthUnit unit) {
   private static final Span CLEARANCE_MM = new Span(0, 2);
   private static final Span SCALE_MM = new Span(250, 1000);
   private static final Span GAUGE_IN = new Span(0.006, 0.150);
+
+  /** Plain steel strings end about here (common practice, no source). */
+  private static final double PLAIN_IN = 0.030;
+
   private static final Span CENTS = new Span(-100, 100);
   private static final Span HUMIDITY_PCT = new Span(5, 99);
 
@@ -36,6 +42,7 @@ public record Plausibility(LengthUnit unit) {
     List<Message> unusual = new ArrayList<>();
     scaleMm(string.string().scaleMm()).ifPresent(unusual::add);
     gaugeIn(string.string().make().gaugeIn()).ifPresent(unusual::add);
+    plain(string.string().make()).ifPresent(unusual::add);
     look(string.heights().action12Mm(), this::actionMm).ifPresent(unusual::add);
     look(string.heights().nutgap1Mm(), this::clearanceMm).ifPresent(unusual::add);
     look(string.heights().reliefMm(), this::reliefMm).ifPresent(unusual::add);
@@ -83,6 +90,22 @@ public record Plausibility(LengthUnit unit) {
    */
   public Optional<Message> scaleMm(double mm) {
     return SCALE_MM.holds(mm) ? Optional.empty() : length("plausible.scale", mm, SCALE_MM);
+  }
+
+  /**
+   * Looks for a wound string that was taken for a plain one.
+   *
+   * @param make of the string
+   * @return a sentence if it is of plain steel, and thicker than plain strings are but not than any
+   */
+  public Optional<Message> plain(StringMake make) {
+    double gaugeIn = make.gaugeIn();
+    boolean between = gaugeIn > PLAIN_IN && gaugeIn <= GAUGE_IN.to();
+    boolean thick = between && make.construction() == Construction.PLAIN_STEEL;
+    return thick
+        ? Optional.of(
+            Message.of("plausible.plain", Figures.gauge(make.gaugeIn()), Figures.gauge(PLAIN_IN)))
+        : Optional.empty();
   }
 
   /**

@@ -5,9 +5,9 @@ import sillet.logbook.units.LengthUnit;
 import sillet.logbook.units.Pitch;
 
 /**
- * The shop's own settings, as they stand on the job sheet and in every calculation.
+ * The shop's own settings, as they enter every calculation.
  *
- * @param name as it stands on the job sheet
+ * @param name what it is called
  * @param lengthUnit the unit people type without a suffix
  * @param referenceHz what A4 is here, hertz
  * @param breakingSharePercent beyond this share of its breaking tension a string is flagged; 75 as
@@ -33,7 +33,7 @@ public record Shop(
   /**
    * A shop with the usual settings.
    *
-   * @param name as it stands on the job sheet
+   * @param name what it is called
    * @param technicians who works here
    * @return millimetres, A4 at 440 Hz, three quarters of the breaking tension
    */

@@ -11,6 +11,8 @@ import sillet.logbook.units.Tries;
 
 /** The readings of a visit as they count: of each note the newest, of each pass its own. */
 final class PassReadings {
+  private static final int OCTAVE = 12;
+
   private final List<Reading> all;
 
   PassReadings(List<Reading> all) {
@@ -37,12 +39,18 @@ final class PassReadings {
         open = reading.tries();
       } else {
         put(frets, reading.fret(), reading.tries());
-        newest = reading;
+        newest = deciding(newest, reading);
       }
     }
     Reference against = newest == null ? Reference.OPEN : newest.against();
     double sd = newest == null ? NoteReadings.USUAL_SD_CENTS : newest.sdCents();
     return new NoteReadings(frets, open, against, sd);
+  }
+
+  /** Whose terms hold for the string: fret 12's where it is read, else those of the newest note. */
+  private static @Nullable Reading deciding(@Nullable Reading before, Reading reading) {
+    boolean octaveHolds = before != null && before.fret() == OCTAVE && reading.fret() != OCTAVE;
+    return reading.tries() == null || octaveHolds ? before : reading;
   }
 
   private static void put(SortedMap<Integer, Tries> frets, int fret, @Nullable Tries tries) {

@@ -25,11 +25,19 @@ import sillet.logbook.units.Figures;
 record ProvedAdvice(@Nullable MoveAdvice advice, @Nullable MoveProof proof) {
   private static final double MM_PER_M = 1e3;
 
+  /** What holds of a string whatever its moves did. */
+  private static final Set<String> STANDING = Set.of("move.wild-try", "move.strain");
+
   static ProvedAdvice of(@Nullable MoveAdvice now, @Nullable StringPass before) {
     MoveFigures figures = now == null ? null : now.figures();
     MoveFigures earlier = figuresOf(before);
     Double made = before == null ? null : before.madeMm();
-    if (now == null || figures == null || earlier == null || made == null) {
+    if (now == null
+        || figures == null
+        || earlier == null
+        || made == null
+        || before == null
+        || before.string().readings().against() != now.string().readings().against()) {
       return new ProvedAdvice(now, null);
     }
     PassProof proof =
@@ -73,6 +81,7 @@ record ProvedAdvice(@Nullable MoveAdvice advice, @Nullable MoveProof proof) {
       findings.add(Finding.READING);
       notes.add(Message.of("move.not-as-predicted", before, after));
     }
+    now.notes().stream().filter(note -> STANDING.contains(note.key())).forEach(notes::add);
     if (said.withinOneCent()) {
       notes.add(Message.of("move.within-one-cent", before, after));
     } else {

@@ -38,18 +38,23 @@ final class StringHeights {
 
   Heights of(int string) {
     return new Heights(
-        along(string, c -> c.kind() == CheckKind.ACTION && open(c) && c.fret() == OCTAVE),
-        along(string, c -> c.kind() == CheckKind.FIRST_FRET_CLEARANCE && open(c)),
-        along(string, c -> c.kind() == CheckKind.RELIEF && c.method() == CheckMethod.STRAIGHTEDGE));
+        along(string, CheckKind.ACTION, c -> open(c) && c.fret() == OCTAVE),
+        along(string, CheckKind.FIRST_FRET_CLEARANCE, StringHeights::open),
+        along(string, CheckKind.RELIEF, c -> c.method() == CheckMethod.STRAIGHTEDGE));
   }
 
   private static boolean open(BenchCheck check) {
     return check.method() == CheckMethod.OPEN;
   }
 
-  private @Nullable Double along(int string, Predicate<BenchCheck> wanted) {
+  /**
+   * The newest check of each string counts; one made at another fret or otherwise tells nothing.
+   */
+  private @Nullable Double along(int string, CheckKind kind, Predicate<BenchCheck> comparable) {
+    NavigableMap<Integer, BenchCheck> newest = new TreeMap<>();
+    checks.stream().filter(c -> c.kind() == kind).forEach(c -> newest.put(c.string(), c));
     NavigableMap<Integer, Double> measured = new TreeMap<>();
-    checks.stream().filter(wanted).forEach(c -> measured.put(c.string(), c.valueMm()));
+    newest.values().stream().filter(comparable).forEach(c -> measured.put(c.string(), c.valueMm()));
     Double whole = measured.remove(BenchCheck.WHOLE_NECK);
     return measured.isEmpty() ? whole : between(string, measured);
   }

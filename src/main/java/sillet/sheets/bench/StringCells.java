@@ -74,7 +74,9 @@ final class StringCells {
       return null;
     }
     try {
-      return new StringMake(gaugeIn, construction, coreIn, unitMass);
+      StringMake make = new StringMake(gaugeIn, construction, coreIn, unitMass);
+      cells.warn(Columns.GAUGE, USUAL.plain(make));
+      return make;
     } catch (Rejection rejection) {
       // each figure alone was right, so the core does not fit the gauge
       cells.refuse(Columns.CORE, rejection.reason());

@@ -18,30 +18,29 @@ public final class Checked {
   public static @Nullable Double action12Mm(List<BenchCheck> checks, int string, Moment moment) {
     return newest(
         checks,
-        check ->
-            check.kind() == CheckKind.ACTION
-                && check.method() == CheckMethod.OPEN
-                && check.fret() == OCTAVE
-                && check.string() == string
-                && check.moment() == moment);
+        c -> c.kind() == CheckKind.ACTION && c.string() == string && c.moment() == moment,
+        c -> c.method() == CheckMethod.OPEN && c.fret() == OCTAVE);
   }
 
   /** The relief by straightedge, millimetres; null if it was not measured. */
   public static @Nullable Double reliefMm(List<BenchCheck> checks, int string, Moment moment) {
     return newest(
         checks,
-        check ->
-            check.kind() == CheckKind.RELIEF
-                && check.method() == CheckMethod.STRAIGHTEDGE
-                && (check.string() == string || check.string() == BenchCheck.WHOLE_NECK)
-                && check.moment() == moment);
+        c ->
+            c.kind() == CheckKind.RELIEF
+                && (c.string() == string || c.string() == BenchCheck.WHOLE_NECK)
+                && c.moment() == moment,
+        c -> c.method() == CheckMethod.STRAIGHTEDGE);
   }
 
-  private static @Nullable Double newest(List<BenchCheck> checks, Predicate<BenchCheck> wanted) {
-    Double found = null;
-    for (BenchCheck check : checks) {
-      found = wanted.test(check) ? Double.valueOf(check.valueMm()) : found;
-    }
-    return found;
+  /** The newest of one thing counts; where it was measured otherwise, there is no such figure. */
+  private static @Nullable Double newest(
+      List<BenchCheck> checks, Predicate<BenchCheck> thing, Predicate<BenchCheck> comparable) {
+    return checks.stream()
+        .filter(thing)
+        .reduce((older, newer) -> newer)
+        .filter(comparable)
+        .map(BenchCheck::valueMm)
+        .orElse(null);
   }
 }

@@ -99,6 +99,15 @@ class IntakeModelTest {
   }
 
   @Test
+  void windsAThickStringAlsoWhenTheHandIsStillInItsGauge() {
+    typeAnElectric();
+    model.strings().lines().get(2).gauge().fill("24");
+    assertThat(model.look()).isTrue();
+    assertThat(visit().strings().strings().get(2).make())
+        .isEqualTo(StringMake.of(.024, Construction.WOUND_STEEL));
+  }
+
+  @Test
   void keepsAConstructionThatWasChosen() {
     typeAnElectric();
     model.strings().lines().get(2).construction(Construction.WOUND_NICKEL);

@@ -27,6 +27,7 @@ class SavesTest {
   private final List<String> signs = new ArrayList<>();
   private final Deque<Runnable> work = new ArrayDeque<>();
   private boolean diskFull;
+  private boolean unreadable;
 
   private final Background later =
       new Background() {
@@ -55,12 +56,24 @@ class SavesTest {
       };
 
   private final Saves saves =
-      new Saves(later, sign, Clock.fixed(TestDesk.NOW, ZoneOffset.UTC), this::keep, kept -> {});
+      new Saves(
+          later,
+          sign,
+          Clock.fixed(TestDesk.NOW, ZoneOffset.UTC),
+          this::perform,
+          this::read,
+          kept -> {});
 
-  private VisitRecord keep(Action action) {
+  private void perform(Action action) {
     tried.add(action);
     if (diskFull) {
       throw Rejection.of("visit.no-such", "0");
+    }
+  }
+
+  private VisitRecord read() {
+    if (unreadable) {
+      throw Rejection.of("visit.no-such", "1");
     }
     return record;
   }
@@ -79,7 +92,7 @@ class SavesTest {
   void keepsActionsInTheirOrderOneAfterTheOther() {
     saves.keep(work("one"));
     saves.keep(work("two"));
-    assertThat(work).hasSize(1);
+    assertThat(work).as("handed on at once, so that closing waits behind both").hasSize(2);
     assertThat(saves.pending()).isTrue();
     doAll();
     assertThat(tried).containsExactly(work("one"), work("two"));
@@ -113,5 +126,31 @@ class SavesTest {
     doAll();
     assertThat(saves.pending()).isFalse();
     assertThat(signs).endsWith("saved");
+  }
+
+  @Test
+  void letsNothingOvertakeWhatFailed() {
+    diskFull = true;
+    saves.keep(work("one"));
+    saves.keep(work("two"));
+    doAll();
+    assertThat(tried).containsExactly(work("one"));
+    diskFull = false;
+    saves.tryAgain();
+    doAll();
+    assertThat(tried).containsExactly(work("one"), work("one"), work("two"));
+    assertThat(saves.pending()).isFalse();
+  }
+
+  @Test
+  void doesNothingTwiceWhenOnlyReadingAnewFails() {
+    unreadable = true;
+    saves.keep(work("one"));
+    doAll();
+    assertThat(saves.pending()).isFalse();
+    assertThat(signs).containsExactly("saved");
+    saves.tryAgain();
+    doAll();
+    assertThat(tried).containsExactly(work("one"));
   }
 }

@@ -57,6 +57,14 @@ class PlausibilityTest {
   }
 
   @Test
+  void asksWhetherAThickPlainStringIsWound() {
+    assertThat(METRIC.of(string(648, 0.046, Heights.NOT_KNOWN)))
+        .extracting(Message::key)
+        .containsExactly("plausible.plain");
+    assertThat(METRIC.of(string(648, 0.026, Heights.NOT_KNOWN))).isEmpty();
+  }
+
+  @Test
   void looksAtEveryFigureOfAString() {
     BenchString odd = string(20, 0.2, new Heights(20.0, 3.0, 2.0));
     BenchString usual = string(648, 0.010, new Heights(1.6, 0.5, 0.2));

@@ -129,6 +129,43 @@ class VisitMovesTest {
     assertThat(heights.of(4).action12Mm()).isNull();
   }
 
+  @Test
+  void forgetsAHeightThatWasMeasuredAtAnotherFretAfterAll() {
+    for (int fret : new int[] {12, 15}) {
+      checks.add(
+          new BenchCheck(CheckKind.ACTION, 1, fret, CheckMethod.OPEN, Moment.RECEIVED, 1.6, "1.6"));
+    }
+    assertThat(StringHeights.received(checks).of(1).action12Mm()).isNull();
+  }
+
+  @Test
+  void keepsTheTermsOfTheOctaveWhateverIsTakenBackBeside() {
+    read(1, "5.0");
+    readings.add(new Reading(1, 1, 5, null, Reference.HARMONIC, 2.0, NOW));
+    var terms = reckon().get(0).get(0).string().readings();
+    assertThat(terms.against()).isEqualTo(Reference.OPEN);
+    assertThat(terms.sdCents()).isEqualTo(0.3);
+  }
+
+  @Test
+  void provesNothingAcrossTwoReferences() {
+    read(1, "5.0");
+    moves.add(new MadeMove(1, 1, 1.86, null, null, NOW));
+    readings.add(new Reading(2, 1, 12, Tries.parse("0.3"), Reference.HARMONIC, 0.3, NOW));
+    assertThat(reckon().get(1).get(0).proof()).isNull();
+  }
+
+  @Test
+  void keepsNamingAWildTryInALaterPass() {
+    read(1, "5.0");
+    moves.add(new MadeMove(1, 1, 1.86, null, null, NOW));
+    read(2, "0.2 0.3 9.0 0.2");
+    MoveAdvice advice = Objects.requireNonNull(reckon().get(1).get(0).advice());
+    assertThat(advice.notes())
+        .extracting(Message::key)
+        .containsExactly("move.wild-try", "move.within-one-cent");
+  }
+
   private void read(int pass, @Nullable String cents) {
     Tries tries = cents == null ? null : Tries.parse(cents);
     readings.add(new Reading(pass, 1, 12, tries, Reference.OPEN, 0.3, NOW));

@@ -1,6 +1,7 @@
 package sillet.sheets.bench;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.InstanceOfAssertFactories.STRING;
 
 import java.io.IOException;
 import java.nio.file.Path;
@@ -34,6 +35,14 @@ class WarningsTest {
         .isEqualTo(
             "line 2, column 8 (relief_mm): relief of 5.00 mm = 0.197 in; usual is -0.5 mm to 1.5"
                 + " mm");
+  }
+
+  @Test
+  void asksWhetherAThickPlainStringIsWound() throws IOException {
+    assertThat(Sheets.warnings(folder, Sheets.with("gauge_in", "0.046")))
+        .extracting(remark -> remark.said(Texts.english()))
+        .singleElement(STRING)
+        .contains(".046", "is the string wound?");
   }
 
   @Test
