@@ -2,12 +2,15 @@ package sillet.desktop.intake;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.IntConsumer;
+import java.util.stream.Stream;
 import sillet.desktop.controls.Desk;
 import sillet.logbook.actions.Action;
 import sillet.logbook.actions.AddCustomer;
 import sillet.logbook.actions.AddInstrument;
 import sillet.logbook.actions.KeepStringSet;
+import sillet.logbook.actions.TakeIn;
 import sillet.logbook.text.Message;
 
 /**
@@ -87,6 +90,12 @@ final class IntakeSaving {
       }
     }
     desk.sign().notSaved(why);
-    notTaken.run();
+    Optional<Integer> ticket = done.stream().flatMap(IntakeSaving::ticket).findFirst();
+    ticket.ifPresentOrElse(taken::accept, notTaken);
+  }
+
+  /** The visit is there, though something went wrong behind it. */
+  private static Stream<Integer> ticket(Action action) {
+    return action instanceof TakeIn in ? Stream.of(in.visit().ticket()) : Stream.empty();
   }
 }

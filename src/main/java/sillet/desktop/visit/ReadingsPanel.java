@@ -162,9 +162,12 @@ final class ReadingsPanel extends VBox {
 
   private void showHead() {
     boolean onePiece = drawing.picture().bridge() instanceof Bridge.OnePiece;
-    boolean predicted = model.strings().stream().anyMatch(string -> string.madeMm() == null);
+    boolean predicted =
+        drawing.picture().rows().stream()
+            .flatMap(row -> row.frets().stream())
+            .anyMatch(mark -> mark.predicted() != null);
     String moveHead = made == null ? texts.say("visit.words.head") : "";
-    head.show(onePiece, model.pass(), predicted && model.pass() == model.lastPass(), moveHead);
+    head.show(onePiece, model.pass(), predicted, moveHead);
   }
 
   private void showCallout() {

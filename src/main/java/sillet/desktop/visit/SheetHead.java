@@ -7,6 +7,7 @@ import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Region;
 import org.jspecify.annotations.Nullable;
+import sillet.desktop.drawing.ScreenDots;
 import sillet.desktop.drawing.strings.LegendGlyph;
 import sillet.desktop.drawing.strings.SheetGeometry;
 import sillet.desktop.drawing.strings.SheetMeasures;
@@ -76,7 +77,12 @@ final class SheetHead extends Region {
   @Override
   protected void layoutChildren() {
     List.<Node>of(title, legend, plan, move, actions).forEach(Node::autosize);
-    SheetGeometry sheet = drawing.geometry();
+    // the drawing below is as wide, but it is laid out after its head
+    SheetGeometry sheet =
+        new SheetGeometry(
+            drawing.picture(),
+            drawing.measures(),
+            new SheetGeometry.Frame(getWidth(), drawing.em(), ScreenDots.perInch()));
     double em = sheet.em();
     double words = sheet.words(0).x();
     double bridge = em * drawing.measures().bridge();

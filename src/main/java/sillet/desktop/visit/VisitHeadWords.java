@@ -106,7 +106,10 @@ final class VisitHeadWords {
             : texts.say("visit.head.handed-out", Days.near(out));
     if (!narrow) {
       String day = Days.near(arrival.takenIn());
-      lines.add(texts.say("visit.head.taken-in", day, arrival.takenInBy()));
+      lines.add(
+          arrival.takenInBy().isBlank()
+              ? texts.say("visit.head.taken-in-on", day)
+              : texts.say("visit.head.taken-in", day, arrival.takenInBy()));
     }
     lines.add(state);
     return lines;

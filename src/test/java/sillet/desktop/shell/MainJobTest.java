@@ -50,11 +50,13 @@ class MainJobTest {
       read(window, FIRST);
       window.untilSaid("Saved");
       movesAppear(window);
+      Picture.onFxThread(() -> Picture.of(window.scene())).save("window-first-pass");
       makeMoves(window);
       read(window, SECOND);
       window.untilSaid("\u22122.6 before, \u22120.3 now");
       assertThat(count(window, "within 1 cent")).isEqualTo(5);
       assertThat(window.texts()).contains("+5.0 before, +0.2 now", "leave it");
+      Picture.onFxThread(() -> Picture.of(window.scene())).save("window-second-pass");
       window.ask.file = Optional.of(sheet);
       window.press(KeyCode.CONTROL, KeyCode.E);
       window.untilSaid("Job sheet written");

@@ -86,11 +86,20 @@ public final class SampleVisits {
     return 2417;
   }
 
+  /** Takes the six-string in once more, under another number. */
+  public static void takeInAs(Logbook logbook, int ticket) {
+    Arrival arrival = new Arrival(DAY, "Edda", null, "Again", "", null, null);
+    StringsOn on = new StringsOn("", null, "", 440, sixStrings(648));
+    Visit visit =
+        new Visit(id("visit " + ticket), ticket, six().id(), null, arrival, on, List.of(), null);
+    logbook.perform(new TakeIn(visit), "Edda");
+  }
+
   public static Instrument six() {
     return electric("Ottersby", "Fieldfare", new Neck(6, 648, 648, 22, 305.0, false), SCREWS);
   }
 
-  static Instrument electric(String maker, String model, Neck neck, Saddle saddle) {
+  public static Instrument electric(String maker, String model, Neck neck, Saddle saddle) {
     return new Instrument(
         id(model), id("maren"), InstrumentKind.ELECTRIC, maker, model, "0382", "", neck, saddle);
   }
@@ -100,7 +109,7 @@ public final class SampleVisits {
         scaleMm, "E4 .010 p", "B3 .013 p", "G3 .017 p", "D3 .026 w", "A2 .036 w", "E2 .046 w");
   }
 
-  static List<FittedString> strings(double scaleMm, String... specs) {
+  public static List<FittedString> strings(double scaleMm, String... specs) {
     List<FittedString> strings = new ArrayList<>();
     for (String spec : specs) {
       String[] parts = spec.split(" ", -1);

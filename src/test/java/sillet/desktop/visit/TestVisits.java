@@ -27,7 +27,14 @@ public final class TestVisits {
     return visit(SampleVisits.six(), SampleVisits.sixStrings(648), travel);
   }
 
-  static VisitRecord visit(Instrument instrument, List<FittedString> strings, List<Travel> travel) {
+  /** Any instrument, nothing read, no room measured. */
+  public static VisitRecord of(Instrument instrument, List<FittedString> strings) {
+    return visit(instrument, strings, List.of());
+  }
+
+  /** Any instrument, nothing read. */
+  public static VisitRecord visit(
+      Instrument instrument, List<FittedString> strings, List<Travel> travel) {
     LocalDate day = LocalDate.of(2026, 12, 1);
     Arrival arrival = new Arrival(day, "Edda", day.plusDays(3), "Sour", "", null, null);
     Visit visit =

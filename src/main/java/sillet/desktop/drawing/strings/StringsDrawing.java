@@ -21,7 +21,9 @@ import sillet.desktop.drawing.Snap;
  */
 public final class StringsDrawing extends Drawn {
   private static final double LEAST_WIDTH_EM = 50;
-  private static final double WIDENED_EM = 8.2;
+
+  /** Room for three tries, in type sizes of a figure. */
+  private static final double WIDENED_FIGURES = 8.2;
 
   private record Place(int row, int fret) {}
 
@@ -185,7 +187,7 @@ public final class StringsDrawing extends Drawn {
   }
 
   private Box widenedBox(SheetGeometry sheet, Box box) {
-    double width = Math.max(box.width(), Snap.px(em() * WIDENED_EM));
+    double width = Math.max(box.width(), Snap.px(sheet.cells().figurePx() * WIDENED_FIGURES));
     double x = sheet.away() > 0 ? box.x() : box.right() - width;
     double over = sheet.away() > 0 ? Math.max(0, x + width - sheet.boardEnd()) : 0;
     double under = sheet.away() < 0 ? Math.max(0, sheet.boardEnd() - x) : 0;

@@ -23,7 +23,7 @@ import sillet.logbook.visits.Moment;
 
 /** The table of checks. */
 public final class ChecksPanel extends VBox {
-  private static final int COLUMNS = 5;
+  private static final int COLUMNS = 6;
 
   private final ChecksModel model;
   private final Texts texts;
@@ -90,8 +90,10 @@ public final class ChecksPanel extends VBox {
     heads();
     Map<Moment, List<CheckCell>> columns = new EnumMap<>(Moment.class);
     int line = 1;
+    CheckKind before = null;
     for (CheckRow row : model.rows()) {
-      row(row, line, columns);
+      row(row, line, row.kind() != before, columns);
+      before = row.kind();
       line++;
     }
     columns.values().forEach(ChecksPanel::downTheColumn);
@@ -100,6 +102,7 @@ public final class ChecksPanel extends VBox {
   private void heads() {
     String[] heads = {
       "",
+      narrow ? "" : texts.say("visit.checks.string-head"),
       texts.say("visit.checks.fret"),
       texts.say("visit.checks.how"),
       texts.say("moment.received"),
@@ -113,16 +116,17 @@ public final class ChecksPanel extends VBox {
     }
   }
 
-  private void row(CheckRow row, int line, Map<Moment, List<CheckCell>> columns) {
+  private void row(
+      CheckRow row, int line, boolean firstOfKind, Map<Moment, List<CheckCell>> columns) {
     String name = name(row);
-    Label label = new Label(name);
-    label.setMinWidth(0);
-    GridPane.setHgrow(label, Priority.ALWAYS);
-    label.setMaxWidth(Double.MAX_VALUE);
+    Label label = new Label(narrow ? name : texts.say(row.kind().key()));
+    label.setMinWidth(Region.USE_PREF_SIZE);
     if (narrow) {
       table.add(label, 0, 2 * line - 1, COLUMNS, 1);
     } else {
+      label.setVisible(firstOfKind);
       table.add(label, 0, line);
+      table.add(number(row), 1, line);
     }
     int figures = narrow ? 2 * line : line;
     if (row.fretChosen()) {
@@ -132,14 +136,24 @@ public final class ChecksPanel extends VBox {
       fret.setId("check-" + row.kind().word() + "-" + row.string() + "-fret");
       fret.getStyleClass().add("fret-cell");
       fret.setEditable(editable);
-      table.add(fret, 1, figures);
+      table.add(fret, 2, figures);
     }
-    table.add(method(row), 2, figures);
+    Node method = method(row);
+    GridPane.setHgrow(method, Priority.ALWAYS);
+    boolean noFret = narrow && !row.fretChosen();
+    table.add(method, noFret ? 2 : 3, figures, noFret ? 2 : 1, 1);
     for (Moment moment : Moment.values()) {
       CheckCell cell = cell(row, moment, name);
       columns.computeIfAbsent(moment, first -> new ArrayList<>()).add(cell);
-      table.add(cell, moment == Moment.RECEIVED ? 3 : 4, figures);
+      table.add(cell, moment == Moment.RECEIVED ? 4 : 5, figures);
     }
+  }
+
+  private static Label number(CheckRow row) {
+    boolean whole = row.string() == BenchCheck.WHOLE_NECK;
+    Label number = new Label(whole ? "" : Integer.toString(row.string()));
+    number.getStyleClass().addAll(Looks.STRONG, "check-number");
+    return number;
   }
 
   private CheckCell cell(CheckRow row, Moment moment, String name) {

@@ -92,6 +92,9 @@ public final class CellField extends StackPane {
     if (code == KeyCode.ENTER) {
       hand.done(cell);
       hand.go(cell, back ? Way.PREVIOUS_STRING : Way.NEXT_STRING);
+      if (field.isFocused()) {
+        field.selectAll();
+      }
       event.consume();
     } else if (code == KeyCode.TAB) {
       if (hand.go(cell, back ? Way.PREVIOUS_FRET : Way.NEXT_FRET)) {
