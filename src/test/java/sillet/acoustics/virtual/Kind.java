@@ -53,6 +53,11 @@ public enum Kind {
     return this == ACOUSTIC || this == NYLON || this == MANDOLIN;
   }
 
+  /** The set it is strung with, each gauge times a factor, rounded to half a thousandth. */
+  List<StringPlan> strings(double gaugeFactor, int semitonesLower) {
+    return strings().stream().map(plan -> plan.changed(gaugeFactor, semitonesLower)).toList();
+  }
+
   /** The set it is strung with, from the treble side. */
   List<StringPlan> strings() {
     return switch (this) {

@@ -7,7 +7,7 @@ import java.util.Arrays;
  * Place 0 is the nominal nut edge, not a fret.
  */
 public final class VirtualNeck {
-  static final int FRETS = 20;
+  static final int FRETS = 22;
 
   private final double scale;
   private final double[] x;
@@ -38,6 +38,13 @@ public final class VirtualNeck {
       y[n] = bow(relief, chord, x[n]) + (n == 0 ? 0 : heightErrors[n]);
     }
     return new VirtualNeck(scale, x, y);
+  }
+
+  /** The same neck with one fret elsewhere, by so much toward the bridge. */
+  VirtualNeck withFretMoved(int fret, double by) {
+    double[] moved = x.clone();
+    moved[fret] += by;
+    return new VirtualNeck(scale, moved, y);
   }
 
   private static double place(double scale, int fret) {

@@ -3,16 +3,16 @@ package sillet.acoustics.virtual;
 import java.util.Arrays;
 
 /**
- * One string on its instrument: what it is made of, what it lies on, who presses it. Every question
- * names where saddle and nut stand, as setbacks from the saddle's nominal place and from where the
- * nut is; the open string is tuned first, always.
+ * One string on its instrument: what it is made of, what it lies on, who presses it, what is heard
+ * of it. Every question names where saddle and nut stand, as setbacks from the saddle's nominal
+ * place and from where the nut is; the open string is tuned first, always.
  */
 public final class VirtualString {
   private final VirtualWire wire;
   private final VirtualNeck neck;
   private final Rest rest;
   private final Finger finger;
-  private final double openHz;
+  private final Sound sound;
 
   /**
    * What a string rests on.
@@ -32,27 +32,79 @@ public final class VirtualString {
       Ends ends,
       double slippingLength,
       double axialGive,
-      double ramp) {}
+      double ramp) {
+    Rest raised(double atNut, double atSaddle) {
+      return new Rest(
+          nutHeight + atNut,
+          saddleHeight + atSaddle,
+          nutOffset,
+          ends,
+          slippingLength,
+          axialGive,
+          ramp);
+    }
 
-  VirtualString(VirtualWire wire, VirtualNeck neck, Rest rest, Finger finger, double openHz) {
+    Rest nutAway(double by) {
+      return new Rest(
+          nutHeight, saddleHeight, nutOffset + by, ends, slippingLength, axialGive, ramp);
+    }
+  }
+
+  /**
+   * What it sounds like.
+   *
+   * @param openHz pitch heard of the open string
+   * @param mix of partials that is heard
+   * @param ripple of its mass
+   */
+  record Sound(double openHz, PartialMix mix, MassRipple ripple) {
+    static Sound plain(double openHz) {
+      return new Sound(openHz, PartialMix.FUNDAMENTAL, MassRipple.NONE);
+    }
+  }
+
+  VirtualString(VirtualWire wire, VirtualNeck neck, Rest rest, Finger finger, Sound sound) {
     this.wire = wire;
     this.neck = neck;
     this.rest = rest;
     this.finger = finger;
-    this.openHz = openHz;
+    this.sound = sound;
+  }
+
+  VirtualString withSlotHigher(double by) {
+    return new VirtualString(wire, neck, rest.raised(by, 0), finger, sound);
+  }
+
+  VirtualString withNutAway(double by) {
+    return new VirtualString(wire, neck, rest.nutAway(by), finger, sound);
+  }
+
+  VirtualString withFretMoved(int fret, double by) {
+    return new VirtualString(wire, neck.withFretMoved(fret, by), rest, finger, sound);
+  }
+
+  VirtualString withRipple(MassRipple ripple) {
+    Sound uneven = new Sound(sound.openHz(), sound.mix(), ripple);
+    return new VirtualString(wire, neck, rest, finger, uneven);
+  }
+
+  /** Another wire in its place, tuned to another pitch, its saddle raised. */
+  VirtualString restrung(VirtualWire other, double openHz, double saddleHigher) {
+    Sound fresh = new Sound(openHz, sound.mix(), MassRipple.NONE);
+    return new VirtualString(other, neck, rest.raised(0, saddleHigher), finger, fresh);
   }
 
   /** Fretted note minus open string, in cents of the equal temperament. */
   public double centsAgainstOpen(int fret, double setback, double nutSetback) {
-    return cents(fret, setback, nutSetback, openHz);
+    return cents(fret, setback, nutSetback, sound.openHz());
   }
 
   /** Fretted note minus the harmonic over fret 12, an octave down. */
   public double centsAgainstHarmonic(int fret, double setback, double nutSetback) {
     double length = openLength(setback, nutSetback);
     double tension = openTension(length);
-    double second = open().hz(tension, wire.unitMass(tension), length, 2);
-    return cents(fret, setback, nutSetback, second / 2);
+    double octave = heard(open(), tension, length, 2);
+    return cents(fret, setback, nutSetback, octave / 2);
   }
 
   /** Clearance of the open string over a fret. */
@@ -72,9 +124,8 @@ public final class VirtualString {
     TautPath before = nutToFinger(fret, setback, nutSetback);
     TautPath after = fingerToSaddle(fret, setback);
     double tension = stretched(openTension(length), length, before.length() + after.length());
-    double hz =
-        new BeamString(wire.bending(), rest.ends().fret(), rest.ends().saddle())
-            .hz(tension, wire.unitMass(tension), after.lastStretch(), 1);
+    BeamString fretted = new BeamString(wire.bending(), rest.ends().fret(), rest.ends().saddle());
+    double hz = heard(fretted, tension, after.lastStretch(), 1);
     return 1200 * Math.log(hz / referenceHz) / Math.log(2) - 100 * fret;
   }
 
@@ -82,8 +133,24 @@ public final class VirtualString {
     return new BeamString(wire.bending(), rest.ends().nut(), rest.ends().saddle());
   }
 
+  /** What is heard differs from the first mode by a factor that hardly depends on the tension. */
   private double openTension(double length) {
-    return open().tension(openHz, wire::unitMass, length);
+    double first = sound.openHz();
+    double tension = open().tension(first, wire::unitMass, length);
+    if (!sound.equals(Sound.plain(sound.openHz()))) {
+      for (int round = 0; round < 2; round++) {
+        first *= sound.openHz() / heard(open(), tension, length, 1);
+        tension = open().tension(first, wire::unitMass, length);
+      }
+    }
+    return tension;
+  }
+
+  private double heard(BeamString string, double tension, double length, int mode) {
+    double mass = wire.unitMass(tension);
+    return sound
+        .mix()
+        .heard(q -> string.hz(tension, mass, length, q) * sound.ripple().factor(length, q), mode);
   }
 
   private double openLength(double setback, double nutSetback) {

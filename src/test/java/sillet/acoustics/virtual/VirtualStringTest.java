@@ -20,7 +20,11 @@ class VirtualStringTest {
     VirtualString.Rest rest = new VirtualString.Rest(1e-9, 2e-9, 0, ends, 0, 0, 0);
     VirtualString string =
         new VirtualString(
-            new VirtualWire(4e-4, 1e4, 1e-12), neck, rest, new Finger(0.3, 1e-9), 330);
+            new VirtualWire(4e-4, 1e4, 1e-12),
+            neck,
+            rest,
+            new Finger(0.3, 1e-9),
+            VirtualString.Sound.plain(330));
     for (int fret = 1; fret <= 12; fret++) {
       assertThat(string.centsAgainstOpen(fret, 0, 0)).isCloseTo(0, within(1e-4));
     }

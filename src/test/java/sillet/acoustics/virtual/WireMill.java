@@ -38,6 +38,35 @@ public final class WireMill {
     return new Drawn(wound(plan, diameter, core, modulus), core);
   }
 
+  /**
+   * The string of another set, tuned to another pitch. Nylon is softer under less stress: modulus
+   * 4.5 + 39 s GPa, s the stress in GPa (J. Woodhouse, N. Lynch-Aird, Acta Acustica united with
+   * Acustica 105, 516 (2019), as quoted elsewhere); the filaments of a wound one carry about 0.15
+   * GPa (assumed).
+   */
+  Drawn redraw(StringPlan usual, StringPlan tuned, Kind kind, double scale) {
+    StringPlan fresh =
+        new StringPlan(usual.hz(), tuned.gauge(), usual.construction(), usual.coreShare());
+    Drawn drawn = draw(fresh, kind, scale);
+    if (!usual.construction().nylon()) {
+      return drawn;
+    }
+    VirtualWire wire = drawn.wire();
+    boolean wound = usual.construction() == Construct.WOUND_NYLON;
+    double wider = wound ? tuned.gauge() / usual.gauge() : 1;
+    double speed = 2 * scale * usual.hz();
+    double area = Math.PI / 4 * tuned.diameter() * tuned.diameter();
+    double stress = wound ? 0.15 : wire.slackMass() * speed * speed / area / 1e9;
+    double less = Math.pow(tuned.hz() / usual.hz(), 2);
+    double softer = (4.5 + 39 * stress * less) / (4.5 + 39 * stress);
+    return new Drawn(
+        new VirtualWire(
+            wire.slackMass() * wider * wider,
+            wire.axial() * wider * wider * softer,
+            wire.bending() * Math.pow(wider, 4) * softer),
+        drawn.core());
+  }
+
   private VirtualWire wound(StringPlan plan, double diameter, double core, double modulus) {
     boolean hexagon = luck.chance(0.5);
     double area = hexagon ? Math.sqrt(3) / 2 * core * core : Math.PI / 4 * core * core;

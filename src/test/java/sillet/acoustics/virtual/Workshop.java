@@ -53,10 +53,33 @@ public final class Workshop {
               1 / luck.between(3e6, 2e7),
               ramp);
       Finger finger = new Finger(luck.between(0.15, 0.5), luck.between(2e-5, 1.5e-4));
-      VirtualString string = new VirtualString(drawn.wire(), neck, rest, finger, plan.hz());
+      VirtualString.Sound sound = new VirtualString.Sound(plan.hz(), mix(), MassRipple.NONE);
+      VirtualString string = new VirtualString(drawn.wire(), neck, rest, finger, sound);
       strings.add(new VirtualInstrument.Course(plan, drawn, string));
     }
     return new VirtualInstrument(kind, neck, strings);
+  }
+
+  /** Other strings on an instrument; its neck, nut, bridge and whoever presses stay. */
+  public VirtualInstrument restring(VirtualInstrument old, SetChange change) {
+    WireMill mill = new WireMill(luck);
+    List<StringPlan> usual = old.kind().strings();
+    List<StringPlan> tuned = old.kind().strings(change.gaugeFactor(), change.semitonesLower());
+    List<VirtualInstrument.Course> strings = new ArrayList<>();
+    for (int i = 0; i < usual.size(); i++) {
+      WireMill.Drawn drawn =
+          mill.redraw(usual.get(i), tuned.get(i), old.kind(), old.neck().scale());
+      double higherAtSaddle = 2 * (change.higherAtTwelve() + luck.normal(0, 5e-5));
+      VirtualString string =
+          old.strings().get(i).string().restrung(drawn.wire(), tuned.get(i).hz(), higherAtSaddle);
+      strings.add(new VirtualInstrument.Course(tuned.get(i), drawn, string));
+    }
+    return new VirtualInstrument(old.kind(), old.neck(), strings);
+  }
+
+  /** A tuner that follows the first partial, with some of the next two in it. */
+  private PartialMix mix() {
+    return new PartialMix(luck.between(0, 0.2), luck.between(0, 0.1));
   }
 
   /** How strings are held: about one clamped end in all, 1 +- 0.2, and a bridge that yields. */
