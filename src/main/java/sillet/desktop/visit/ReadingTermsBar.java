@@ -28,6 +28,7 @@ final class ReadingTermsBar extends BorderPane {
   private final TypedFieldModel<ShownFrets> frets;
   private final TypedFieldModel<Double> scatter;
   private final Label said = new Label();
+  private final ToggleGroup references = new ToggleGroup();
 
   ReadingTermsBar(VisitModel model, Texts texts, Runnable fretsChanged, Runnable termsChanged) {
     this.model = model;
@@ -59,7 +60,16 @@ final class ReadingTermsBar extends BorderPane {
     say();
   }
 
-  private final ToggleGroup references = new ToggleGroup();
+  /** In a narrow window the keys stand under the fields. */
+  void narrow(boolean wanted) {
+    setCenter(null);
+    setBottom(null);
+    if (wanted) {
+      setBottom(said);
+    } else {
+      setCenter(said);
+    }
+  }
 
   private Label name(String key) {
     Label label = new Label(texts.say(key));

@@ -249,6 +249,7 @@ final class VisitParts {
     readings.setShape(wanted);
     page.setShape(wanted, em);
     checksPanel.setNarrow(wanted == SheetShape.WIDE);
+    terms.narrow(wanted == SheetShape.NARROW);
     head.show(model, wanted);
     sections.refresh(wanted == SheetShape.NARROW);
   }

@@ -116,6 +116,7 @@ class VisitGalleryTest {
     draw(new Look("6-dark", Theme.DARK, 100, 1280, 800), VisitGalleryTest::sixAgain);
     draw(new Look("6-1920", Theme.LIGHT, 100, 1920, 1080), VisitGalleryTest::six);
     draw(new Look("6-150", Theme.DARK, 150, 1280, 800), VisitGalleryTest::six);
+    draw(new Look("6-150-tall", Theme.LIGHT, 150, 1280, 2400), VisitGalleryTest::six);
     draw(new Look("6-tall", Theme.LIGHT, 100, 1280, 1300), VisitGalleryTest::six);
   }
 
