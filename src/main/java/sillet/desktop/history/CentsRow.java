@@ -3,7 +3,7 @@ package sillet.desktop.history;
 import java.time.LocalDate;
 import java.util.OptionalDouble;
 import sillet.desktop.drawing.Box;
-import sillet.desktop.drawing.Drawn;
+import sillet.desktop.drawing.DrawnBand;
 import sillet.desktop.drawing.Pen;
 import sillet.desktop.drawing.Stroke;
 
@@ -11,7 +11,7 @@ import sillet.desktop.drawing.Stroke;
  * One string's row of the plot: its own zero line, an open dot as received, a full dot as left, the
  * two joined; a bar hangs at the visit that is looked at. Beyond ten cents a dot stays at the edge.
  */
-final class CentsRow extends Drawn {
+final class CentsRow extends DrawnBand {
   private static final double MOST_CENTS = 10;
   private static final double APART_EM = 0.5;
   private static final double RADIUS_EM = 0.29;
@@ -22,10 +22,10 @@ final class CentsRow extends Drawn {
   private final int chosenTicket;
 
   CentsRow(CentsHistory history, YearAxis axis, int chosenTicket) {
+    super(20, 6, 2.43);
     this.history = history;
     this.axis = axis;
     this.chosenTicket = chosenTicket;
-    setMouseTransparent(true);
   }
 
   @Override
@@ -74,25 +74,5 @@ final class CentsRow extends Drawn {
     double reach = height / 2 - pen.em(RADIUS_EM + 0.07);
     double clamped = Math.max(-MOST_CENTS, Math.min(MOST_CENTS, cents));
     return height / 2 - clamped / MOST_CENTS * reach;
-  }
-
-  @Override
-  protected double computePrefWidth(double height) {
-    return em() * 20;
-  }
-
-  @Override
-  protected double computeMinWidth(double height) {
-    return em() * 6;
-  }
-
-  @Override
-  protected double computePrefHeight(double width) {
-    return Math.round(em() * 2.43);
-  }
-
-  @Override
-  protected double computeMinHeight(double width) {
-    return computePrefHeight(width);
   }
 }

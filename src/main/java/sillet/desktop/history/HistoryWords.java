@@ -2,6 +2,7 @@ package sillet.desktop.history;
 
 import java.util.ArrayList;
 import java.util.List;
+import sillet.desktop.controls.Eighths;
 import sillet.logbook.instruments.Instrument;
 import sillet.logbook.instruments.Neck;
 import sillet.logbook.moves.Direction;
@@ -18,7 +19,6 @@ import sillet.logbook.visits.WorkLine;
 final class HistoryWords {
   private static final int MM_DECIMALS = 2;
   private static final int INCH_DECIMALS = 3;
-  private static final int EIGHTHS = 8;
 
   private final Texts texts;
   private final LengthUnit unit;
@@ -90,19 +90,10 @@ final class HistoryWords {
     if (move.turns() == null) {
       return "";
     }
-    long eighths = Math.round(Math.abs(move.turns()) * EIGHTHS);
-    long whole = eighths / EIGHTHS;
-    long above = eighths % EIGHTHS;
-    long below = EIGHTHS;
-    while (above > 0 && above % 2 == 0) {
-      above /= 2;
-      below /= 2;
-    }
-    String fraction = above == 0 ? "" : above + "/" + below;
-    String figure = whole == 0 && above > 0 ? fraction : (whole + " " + fraction).strip();
-    return eighths <= EIGHTHS
-        ? texts.say("history.turn", figure)
-        : texts.say("history.turns", figure);
+    Eighths turns = Eighths.of(move.turns());
+    return turns.turns() <= 1
+        ? texts.say("history.turn", turns.written())
+        : texts.say("history.turns", turns.written());
   }
 
   /** How far a saddle was moved and which way. */

@@ -2,19 +2,19 @@ package sillet.desktop.history;
 
 import java.time.LocalDate;
 import java.util.List;
-import sillet.desktop.drawing.Drawn;
+import sillet.desktop.drawing.DrawnBand;
 import sillet.desktop.drawing.Lettering;
 import sillet.desktop.drawing.Pen;
 
 /** The years under the plots. */
-final class YearRow extends Drawn {
+final class YearRow extends DrawnBand {
   private static final int MOST_YEARS = 8;
 
   private final YearAxis axis;
 
   YearRow(YearAxis axis) {
+    super(20, 6, 1.71);
     this.axis = axis;
-    setMouseTransparent(true);
   }
 
   @Override
@@ -25,25 +25,5 @@ final class YearRow extends Drawn {
       double x = axis.share(year) * width;
       pen.textAround(Integer.toString(year.getYear()), type, x + pen.em(0.29), height / 2);
     }
-  }
-
-  @Override
-  protected double computePrefWidth(double height) {
-    return em() * 20;
-  }
-
-  @Override
-  protected double computeMinWidth(double height) {
-    return em() * 6;
-  }
-
-  @Override
-  protected double computePrefHeight(double width) {
-    return Math.round(em() * 1.71);
-  }
-
-  @Override
-  protected double computeMinHeight(double width) {
-    return computePrefHeight(width);
   }
 }

@@ -1,13 +1,13 @@
 package sillet.desktop.start;
 
 import sillet.desktop.drawing.Box;
-import sillet.desktop.drawing.Drawn;
+import sillet.desktop.drawing.DrawnBand;
 import sillet.desktop.drawing.Lettering;
 import sillet.desktop.drawing.Pen;
 import sillet.desktop.drawing.Stroke;
 
 /** Strings nobody has read yet, from nut to bridge: what a visit begins with. An ornament. */
-final class EmptyBoard extends Drawn {
+final class EmptyBoard extends DrawnBand {
   private static final double[] GAUGES = {.010, .013, .017, .026, .036, .046};
   private static final double[] SADDLES = {0.15, 0.25, 0.4, 0.2, 0.32, 0.48};
   private static final int FRETS = 22;
@@ -19,9 +19,9 @@ final class EmptyBoard extends Drawn {
   private final String bridge;
 
   EmptyBoard(String nut, String bridge) {
+    super(24, 16, 13.14);
     this.nut = nut;
     this.bridge = bridge;
-    setMouseTransparent(true);
   }
 
   @Override
@@ -101,25 +101,5 @@ final class EmptyBoard extends Drawn {
     pen.textAround(bridge, soft.endingThere(), width, y);
     Lettering bold = Lettering.bold(1, pen.inks().ink()).centred();
     pen.textAround(Integer.toString(READ_FRET), bold, fretX(READ_FRET, boardEnd), y);
-  }
-
-  @Override
-  protected double computePrefWidth(double height) {
-    return em() * 24;
-  }
-
-  @Override
-  protected double computeMinWidth(double height) {
-    return em() * 16;
-  }
-
-  @Override
-  protected double computePrefHeight(double width) {
-    return Math.round(em() * 13.14);
-  }
-
-  @Override
-  protected double computeMinHeight(double width) {
-    return computePrefHeight(width);
   }
 }

@@ -5,17 +5,10 @@ import java.util.function.Consumer;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.input.KeyCode;
-import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
-import javafx.scene.layout.HBox;
-import javafx.scene.layout.Region;
-import javafx.scene.layout.VBox;
-import sillet.desktop.controls.Columns;
 import sillet.desktop.controls.Desk;
 import sillet.desktop.controls.KeyHint;
-import sillet.desktop.controls.Narrow;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.actions.NameShop;
@@ -28,7 +21,7 @@ public final class ShopScreen implements Screen {
   private final Consumer<Shop> named;
   private final StartModel model;
   private final ShopForm form;
-  private final ScrollPane page;
+  private final StartPage page;
 
   /**
    * The shop of the logbook on a desk.
@@ -46,16 +39,14 @@ public final class ShopScreen implements Screen {
     save.setId("save-shop");
     save.getStyleClass().add(Looks.PRIMARY);
     this.form = new ShopForm(model, desk.texts(), save);
-    VBox content = new VBox();
-    Narrow narrow = new Narrow(content);
-    Columns columns = new Columns(narrow.narrowProperty(), 65, 35);
-    columns.getStyleClass().add("start-columns");
-    columns.show(form, StartBeside.later(desk.texts(), ways::demo, this::open));
-    content.getChildren().addAll(heading(), columns, narrow.measure());
-    content.getStyleClass().add("start-page");
-    this.page = new ScrollPane(content);
-    page.setFitToWidth(true);
-    page.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+    Label name = new Label(say("start.shop"));
+    name.getStyleClass().add(Looks.PAGE_NAME);
+    this.page =
+        new StartPage(
+            name,
+            desk.texts().say("start.lies-at", desk.logbook().place()),
+            form,
+            StartBeside.later(desk.texts(), ways::demo, this::open));
   }
 
   @Override
@@ -76,21 +67,9 @@ public final class ShopScreen implements Screen {
   @Override
   public Map<KeyCombination, Runnable> keys() {
     return Map.of(
-        key(KeyCode.S), this::save,
-        key(KeyCode.D), ways::demo,
-        key(KeyCode.O), this::open);
-  }
-
-  private HBox heading() {
-    Label name = new Label(say("start.shop"));
-    name.getStyleClass().add(Looks.PAGE_NAME);
-    name.setMinWidth(Region.USE_PREF_SIZE);
-    Label place = new Label(desk.texts().say("start.lies-at", desk.logbook().place()));
-    place.getStyleClass().add(Looks.SOFT);
-    place.setWrapText(true);
-    HBox line = new HBox(name, place);
-    line.getStyleClass().add("start-heading");
-    return line;
+        StartPage.key(KeyCode.S), this::save,
+        StartPage.key(KeyCode.D), ways::demo,
+        StartPage.key(KeyCode.O), this::open);
   }
 
   private void save() {
@@ -115,9 +94,5 @@ public final class ShopScreen implements Screen {
 
   private String say(String key) {
     return desk.texts().say(key);
-  }
-
-  private static KeyCombination key(KeyCode code) {
-    return new KeyCodeCombination(code, KeyCombination.SHORTCUT_DOWN);
   }
 }

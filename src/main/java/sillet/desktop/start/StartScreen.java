@@ -4,17 +4,10 @@ import java.util.Map;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.input.KeyCode;
-import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
-import javafx.scene.layout.HBox;
-import javafx.scene.layout.Region;
-import javafx.scene.layout.VBox;
 import sillet.desktop.controls.Ask;
-import sillet.desktop.controls.Columns;
 import sillet.desktop.controls.KeyHint;
-import sillet.desktop.controls.Narrow;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Texts;
@@ -26,7 +19,7 @@ public final class StartScreen implements Screen {
   private final Ask ask;
   private final Texts texts;
   private final ShopForm form;
-  private final ScrollPane page;
+  private final StartPage page;
 
   /**
    * A first start.
@@ -43,13 +36,14 @@ public final class StartScreen implements Screen {
     this.ask = ask;
     this.texts = texts;
     this.form = form();
-    VBox content = new VBox();
-    Narrow narrow = new Narrow(content);
-    content.getChildren().addAll(heading(place), columns(narrow), narrow.measure());
-    content.getStyleClass().add("start-page");
-    this.page = new ScrollPane(content);
-    page.setFitToWidth(true);
-    page.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+    Label program = new Label(texts.say("start.program"));
+    program.getStyleClass().add("start-name");
+    this.page =
+        new StartPage(
+            program,
+            texts.say("start.promise", place),
+            form,
+            StartBeside.first(texts, ways::demo, this::open, model));
     page.disableProperty().bind(model.busyProperty());
   }
 
@@ -71,9 +65,9 @@ public final class StartScreen implements Screen {
   @Override
   public Map<KeyCombination, Runnable> keys() {
     return Map.of(
-        key(KeyCode.ENTER), this::begin,
-        key(KeyCode.D), ways::demo,
-        key(KeyCode.O), this::open);
+        StartPage.key(KeyCode.ENTER), this::begin,
+        StartPage.key(KeyCode.D), ways::demo,
+        StartPage.key(KeyCode.O), this::open);
   }
 
   private void begin() {
@@ -82,30 +76,6 @@ public final class StartScreen implements Screen {
 
   private void open() {
     ask.fileToOpen().ifPresent(ways::open);
-  }
-
-  private static KeyCombination key(KeyCode code) {
-    return new KeyCodeCombination(code, KeyCombination.SHORTCUT_DOWN);
-  }
-
-  private HBox heading(String place) {
-    Label program = new Label(texts.say("start.program"));
-    program.getStyleClass().add("start-name");
-    Label promise = new Label(texts.say("start.promise", place));
-    program.setMinWidth(Region.USE_PREF_SIZE);
-    promise.getStyleClass().add(Looks.SOFT);
-    promise.setMinWidth(0);
-    promise.setWrapText(true);
-    HBox line = new HBox(program, promise);
-    line.getStyleClass().add("start-heading");
-    return line;
-  }
-
-  private Columns columns(Narrow narrow) {
-    Columns columns = new Columns(narrow.narrowProperty(), 65, 35);
-    columns.show(form, StartBeside.first(texts, ways::demo, this::open, model));
-    columns.getStyleClass().add("start-columns");
-    return columns;
   }
 
   private ShopForm form() {

@@ -1,5 +1,6 @@
 package sillet.desktop.visit;
 
+import java.util.List;
 import java.util.concurrent.Callable;
 import java.util.concurrent.TimeoutException;
 import java.util.function.Consumer;
@@ -40,6 +41,12 @@ final class VisitWindow implements AutoCloseable {
     Picture.startToolkit();
     Platform.setImplicitExit(false);
     return new VisitWindow(told);
+  }
+
+  /** A six-string that nobody has read. */
+  static VisitWindow blank() throws TimeoutException {
+    return over(
+        visits -> visits.takeIn(SampleVisits.six(), SampleVisits.sixStrings(648), List.of()));
   }
 
   private Stage show() {

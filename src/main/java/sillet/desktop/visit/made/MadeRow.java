@@ -2,7 +2,7 @@ package sillet.desktop.visit.made;
 
 import java.time.Instant;
 import org.jspecify.annotations.Nullable;
-import sillet.desktop.visit.words.Eighths;
+import sillet.desktop.controls.Eighths;
 import sillet.logbook.moves.Direction;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveFigures;

@@ -1,5 +1,6 @@
 package sillet.desktop.visit.picture;
 
+import sillet.desktop.controls.Eighths;
 import sillet.desktop.drawing.MarkShape;
 import sillet.desktop.drawing.strings.Bridge;
 import sillet.desktop.drawing.strings.Lie;
@@ -8,7 +9,6 @@ import sillet.desktop.drawing.strings.SaddleMark;
 import sillet.desktop.drawing.strings.SheetShape;
 import sillet.desktop.drawing.strings.StringsPicture;
 import sillet.desktop.drawing.strings.WordColumns;
-import sillet.desktop.visit.words.Eighths;
 import sillet.desktop.visit.words.StringWords;
 import sillet.logbook.moves.Direction;
 import sillet.logbook.text.Texts;

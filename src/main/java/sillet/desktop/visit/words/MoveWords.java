@@ -2,6 +2,7 @@ package sillet.desktop.visit.words;
 
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
+import sillet.desktop.controls.Eighths;
 import sillet.desktop.visit.readings.CentsText;
 import sillet.logbook.moves.Direction;
 import sillet.logbook.moves.MoveAdvice;

@@ -1,6 +1,7 @@
 package sillet.desktop.visit.words;
 
 import org.jspecify.annotations.Nullable;
+import sillet.desktop.controls.Eighths;
 import sillet.logbook.moves.Direction;
 
 /**

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import sillet.desktop.controls.Eighths;
 import sillet.desktop.visit.TestVisits;
 import sillet.logbook.moves.Direction;
 import sillet.logbook.moves.MoveAdvisor;

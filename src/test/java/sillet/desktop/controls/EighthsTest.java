@@ -1,4 +1,4 @@
-package sillet.desktop.visit.words;
+package sillet.desktop.controls;
 
 import static org.assertj.core.api.Assertions.assertThat;
 

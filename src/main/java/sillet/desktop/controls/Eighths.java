@@ -1,4 +1,4 @@
-package sillet.desktop.visit.words;
+package sillet.desktop.controls;
 
 /**
  * Turns of a screw in eighths, as a hand can set them.
