@@ -18,45 +18,66 @@ import sillet.acoustics.wire.StringSpec;
 
 /** Types what can be known of a string, with the errors of rule and gauge, and reads the tuner. */
 final class Technician {
-  /** Scatter of one reading of the difference, cents. */
-  private static final double SCATTER = 0.1;
-
   /** What the tuner shows, cents. */
   private static final double SHOWN_TO = 0.1;
 
   private final Luck luck;
-  private final double foundShare;
+  private final Habits habits;
 
   /**
-   * A technician.
+   * How a technician works.
    *
+   * @param scatter of one reading of the difference, standard deviation in cents
    * @param foundShare how far from its best place a saddle is found, standard deviation as a share
    *     of the scale
    */
-  Technician(Luck luck, double foundShare) {
+  record Habits(double scatter, double foundShare) {
+    /** Saddles are found 2 mm (sd) off on a scale of 648. */
+    static Habits usual(double scatter) {
+      return new Habits(scatter, 2.0 / 648);
+    }
+  }
+
+  Technician(Luck luck, Habits habits) {
     this.luck = luck;
-    this.foundShare = foundShare;
+    this.habits = habits;
+  }
+
+  /** The strings of an instrument as chance has it: heights measured, harmonic or open string. */
+  List<BenchString> takeIn(VirtualInstrument instrument) {
+    boolean heights = luck.chance(0.5);
+    Reference against = luck.chance(0.3) ? Reference.HARMONIC : Reference.OPEN;
+    return takeIn(instrument, heights, against);
   }
 
   /** The strings of an instrument, its saddles standing where chance left them. */
-  List<BenchString> takeIn(VirtualInstrument instrument) {
+  List<BenchString> takeIn(VirtualInstrument instrument, boolean heights, Reference against) {
     double true0 = instrument.neck().scale();
     double scale = Math.rint((true0 + luck.noise(3e-4)) / 5e-4) * 5e-4;
-    boolean heights = luck.chance(0.5);
-    Reference against = luck.chance(0.3) ? Reference.HARMONIC : Reference.OPEN;
     List<BenchString> strings = new ArrayList<>();
     for (VirtualInstrument.Course course : instrument.strings()) {
       StringSpec spec = spec(course);
-      double hz = course.plan().hz();
-      Clearances clearances =
-          heights ? measured(course.string()) : Clearances.usual(spec.construction());
-      StringLie typed =
-          StringLie.nominal(StringEstimate.of(spec, hz, scale), hz, scale, clearances);
       Truth truth = new Truth(course.string(), true0);
-      double found = truth.bestForOctave(against) + luck.noise(foundShare * true0);
-      strings.add(new BenchString(instrument.kind(), truth, typed, against, found));
+      double found = truth.bestForOctave(against) + luck.noise(habits.foundShare() * true0);
+      strings.add(
+          new BenchString(
+              instrument.kind(),
+              truth,
+              spec,
+              lie(course, spec, scale, heights),
+              heights,
+              against,
+              found));
     }
     return strings;
+  }
+
+  private StringLie lie(
+      VirtualInstrument.Course course, StringSpec spec, double scale, boolean heights) {
+    double hz = course.plan().hz();
+    Clearances clearances =
+        heights ? measured(course.string()) : Clearances.usual(spec.construction());
+    return StringLie.nominal(StringEstimate.of(spec, hz, scale), hz, scale, clearances);
   }
 
   /** One try at a fret with the saddle as found, as the tuner shows it. */
@@ -66,9 +87,10 @@ final class Technician {
 
   /** One try at a fret with the saddle elsewhere. */
   FretReading read(BenchString string, int fret, double setback) {
-    double heard = string.truth().cents(fret, string.against(), setback) + luck.noise(SCATTER);
+    double heard =
+        string.truth().cents(fret, string.against(), setback) + luck.noise(habits.scatter());
     double shown = Math.rint(heard / SHOWN_TO) * SHOWN_TO;
-    return new FretReading(fret, shown, Math.hypot(SCATTER, SHOWN_TO / Math.sqrt(12)));
+    return new FretReading(fret, shown, Math.hypot(habits.scatter(), SHOWN_TO / Math.sqrt(12)));
   }
 
   /** Where a saddle comes to stand when it is set by hand. */
@@ -86,7 +108,7 @@ final class Technician {
   }
 
   /** The packet; now and then a core or a unit mass is known. */
-  private StringSpec spec(VirtualInstrument.Course course) {
+  StringSpec spec(VirtualInstrument.Course course) {
     Construction construction = Construction.valueOf(course.plan().construction().name());
     boolean core = construction.wound() && construction.steel() && luck.chance(0.25);
     boolean mass = luck.chance(0.15);

@@ -1,6 +1,6 @@
 /**
- * The test bench of the moves: a technician who knows what is on the packet and reads a tuner, sets
- * virtual instruments by {@code acoustics.moves} and by the plain length rule, and the truth is
- * taken from the virtual instrument.
+ * The test bench of the whole neck: a technician who knows what is on the packet and reads a tuner
+ * takes in virtual instruments; moves are worked out by {@code acoustics} and by plain rules, and
+ * the truth is asked of the virtual instrument. {@code WholeNeckTable} prints how good that is.
  */
 package sillet.acoustics.bench;

@@ -1,0 +1,106 @@
+package sillet.acoustics.bench;
+
+import java.util.ArrayList;
+import java.util.List;
+import sillet.acoustics.moves.FretReading;
+import sillet.acoustics.moves.Reference;
+import sillet.acoustics.virtual.Luck;
+import sillet.acoustics.virtual.Workshop;
+
+/**
+ * Nine frets read with 0.4 cent of scatter, one move, and the rms that is then left over frets 1 to
+ * 12 against what the best possible move would leave.
+ */
+final class NeckTask implements Task {
+  static final String MODEL = "all strings together";
+  static final String ONE_BY_ONE = "string by string";
+  static final String LINEAR = "plain linear fit";
+  static final String RULE = "usual rule, fret 12 alone";
+
+  static final double SCATTER = 0.4;
+  private static final int[] FRETS = {1, 2, 3, 5, 7, 9, 12, 15, 17};
+
+  static Row row(NutRoom nut, String way) {
+    String task =
+        switch (nut) {
+          case FIXED -> "neck, saddles alone";
+          case EACH -> "neck, every nut edge movable";
+          case WHOLE -> "neck, nut movable as a whole";
+        };
+    return new Row(task, way);
+  }
+
+  @Override
+  public void run(Case one, Score score) {
+    Luck luck = one.luck(this, 1);
+    Technician technician = new Technician(luck, Technician.Habits.usual(SCATTER));
+    Workshop workshop = new Workshop(one.luck(this, 0), 0);
+    List<BenchString> strings =
+        technician.takeIn(workshop.build(one.kind()), luck.chance(0.5), Reference.OPEN);
+    List<List<FretReading>> readings = new ArrayList<>();
+    for (BenchString string : strings) {
+      readings.add(technician.read(string, FRETS));
+    }
+    for (NutRoom nut : NutRoom.values()) {
+      new Round(strings, readings, nut, score).run();
+    }
+  }
+
+  /** One way the nut may move. */
+  private record Round(
+      List<BenchString> strings, List<List<FretReading>> readings, NutRoom nut, Score score) {
+    void run() {
+      List<double[]> best = best();
+      count(ONE_BY_ONE, Solver.oneByOne(strings, readings, nut), best);
+      if (nut != NutRoom.WHOLE) {
+        count(LINEAR, plain(true), best);
+        count(RULE, plain(false), best);
+      }
+    }
+
+    private List<double[]> best() {
+      if (nut != NutRoom.WHOLE) {
+        return strings.stream()
+            .map(string -> string.truth().bestForNeck(nut == NutRoom.EACH))
+            .toList();
+      }
+      double[] together = Truth.bestForWholeNut(strings.stream().map(BenchString::truth).toList());
+      List<double[]> best = new ArrayList<>();
+      for (int i = 0; i < strings.size(); i++) {
+        best.add(new double[] {together[i], together[strings.size()]});
+      }
+      return best;
+    }
+
+    private List<Move> plain(boolean fit) {
+      List<Move> moves = new ArrayList<>();
+      for (int i = 0; i < strings.size(); i++) {
+        double scale = strings.get(i).typed().scale();
+        List<FretReading> read = readings.get(i);
+        FretReading octave =
+            read.stream().filter(reading -> reading.fret() == 12).findFirst().orElseThrow();
+        Move usual = PlainMethods.usualRule(scale, octave);
+        moves.add(
+            fit
+                ? PlainMethods.linearFit(scale, read, nut == NutRoom.EACH)
+                : Move.plain(usual.saddle(), 0));
+      }
+      return moves;
+    }
+
+    private void count(String way, List<Move> moves, List<double[]> best) {
+      for (int i = 0; i < strings.size(); i++) {
+        BenchString string = strings.get(i);
+        Truth truth = string.truth();
+        Move move = moves.get(i);
+        Tally tally = score.of(row(nut, way), string.kind());
+        tally.rms(
+            truth.rms(string.found() + move.saddle(), -move.nut()),
+            truth.rms(best.get(i)[0], best.get(i)[1]));
+        if (move.hasInterval()) {
+          tally.interval(move.low(), best.get(i)[0] - string.found(), move.high());
+        }
+      }
+    }
+  }
+}

@@ -1,0 +1,95 @@
+package sillet.acoustics.bench;
+
+import java.io.PrintStream;
+import java.util.Locale;
+import java.util.StringJoiner;
+import sillet.acoustics.virtual.Kind;
+
+/** Lines of the table: task, figure, bar, met or not. Rows nothing was counted for are left out. */
+final class Printout {
+  private static final String LINE = "%-32s %-44s %8s  %-10s %s%n";
+
+  private final PrintStream out;
+  private final Score score;
+
+  Printout(PrintStream out, Score score) {
+    this.out = out;
+    this.score = score;
+  }
+
+  void head() {
+    out.printf(Locale.ROOT, LINE, "task", "figure", "value", "bar", "met");
+  }
+
+  void octave(Row row, boolean judged) {
+    if (!score.has(row)) {
+      return;
+    }
+    Tally all = score.of(row);
+    line(row, "median left, cents", all.median(), judged ? 0.10 : Double.NaN);
+    line(row, "95th percentile, cents", all.ninetyFifth(), judged ? 0.30 : Double.NaN);
+    coverage(row, judged);
+  }
+
+  void neck(Row row, double bar) {
+    if (!score.has(row)) {
+      return;
+    }
+    Tally all = score.of(row);
+    line(row, "mean rms after/at best", all.ratio(), bar);
+    if (all.intervals() > 0) {
+      coverage(row, !Double.isNaN(bar));
+    }
+  }
+
+  void coverage(Row row, boolean judged) {
+    Tally all = score.of(row);
+    double share = 100 * all.coverage();
+    String met = judged ? yes(share >= 93 && share <= 98) : "";
+    print(row, "95 % interval holds, %", number("%.1f", share), judged ? "93-98" : "", met);
+    StringJoiner families = new StringJoiner(" ");
+    boolean within = true;
+    for (Kind kind : Kind.values()) {
+      double own = 100 * score.of(row, kind).coverage();
+      families.add(
+          kind.name().toLowerCase(Locale.ROOT) + " " + String.format(Locale.ROOT, "%.1f", own));
+      within &= own >= 90 && own <= 99;
+    }
+    print(row, "  " + families, "", judged ? "90-99" : "", judged ? yes(within) : "");
+  }
+
+  void line(Row row, String figure, double value, double atMost) {
+    boolean judged = !Double.isNaN(atMost);
+    String bar = judged ? "<= " + atMost : "";
+    print(row, figure, number("%.3f", value), bar, judged ? yes(value <= atMost) : "");
+  }
+
+  /** A share in per cent and the least or most it may be. */
+  void share(Row row, String figure, double bar, boolean atLeast) {
+    if (!score.has(row)) {
+      return;
+    }
+    double value = 100 * score.of(row).share();
+    boolean met = atLeast ? value >= bar : value <= bar;
+    boolean judged = !Double.isNaN(bar);
+    String sign = atLeast ? ">= " : "<= ";
+    print(
+        row,
+        figure,
+        number("%.1f", value),
+        judged ? sign + number("%.0f", bar) : "",
+        judged ? yes(met) : "");
+  }
+
+  private void print(Row row, String figure, String value, String bar, String met) {
+    out.printf(Locale.ROOT, LINE, row.task(), row.way() + ": " + figure, value, bar, met);
+  }
+
+  private static String number(String format, double value) {
+    return String.format(Locale.ROOT, format, value);
+  }
+
+  private static String yes(boolean met) {
+    return met ? "yes" : "NO";
+  }
+}

@@ -1,0 +1,56 @@
+package sillet.acoustics.bench;
+
+import java.util.Locale;
+
+/**
+ * Prints how good the whole neck is on virtual instruments that are not the estimation model: task,
+ * figure, bar, met or not.
+ *
+ * <p>Run with {@code mvn -q test-compile exec:java
+ * -Dexec.mainClass=sillet.acoustics.bench.WholeNeckTable -Dexec.args="400 1"}; the arguments are
+ * the number of instruments and the seed.
+ */
+public final class WholeNeckTable {
+  private static final double NO_BAR = Double.NaN;
+
+  private WholeNeckTable() {}
+
+  /** Prints the table on standard output. */
+  public static void main(String[] arguments) {
+    int instruments = arguments.length > 0 ? Integer.parseInt(arguments[0]) : 400;
+    long seed = arguments.length > 1 ? Long.parseLong(arguments[1]) : 1;
+    long start = System.nanoTime();
+    Score score = new WholeNeckRun(instruments, seed, WholeNeckRun.everything()).run();
+    System.out.printf(
+        Locale.ROOT,
+        "%d instruments, %d strings a task, seed %d, %.0f s%n",
+        instruments,
+        score.of(OctaveTask.MODEL).size(),
+        seed,
+        (System.nanoTime() - start) / 1e9);
+    Printout print = new Printout(System.out, score);
+    print.head();
+    octave(print);
+    neck(print, NutRoom.FIXED, 1.015);
+    neck(print, NutRoom.EACH, 1.16);
+    neck(print, NutRoom.WHOLE, NO_BAR);
+  }
+
+  private static void octave(Printout print) {
+    print.octave(OctaveTask.MODEL, true);
+    print.octave(OctaveTask.RULE, false);
+    print.octave(OctaveTask.TWO_PASSES, false);
+    print.share(OctaveTask.STRANGE, "%", NO_BAR, false);
+    print.octave(OctaveTask.UNREAD, false);
+    print.octave(OctaveTask.FAR, false);
+    print.octave(OctaveTask.FAR_RULE, false);
+    print.octave(OctaveTask.RAMP, false);
+  }
+
+  private static void neck(Printout print, NutRoom nut, double bar) {
+    print.neck(NeckTask.row(nut, NeckTask.MODEL), bar);
+    print.neck(NeckTask.row(nut, NeckTask.ONE_BY_ONE), NO_BAR);
+    print.neck(NeckTask.row(nut, NeckTask.LINEAR), NO_BAR);
+    print.neck(NeckTask.row(nut, NeckTask.RULE), NO_BAR);
+  }
+}

@@ -1,0 +1,77 @@
+package sillet.acoustics.bench;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.List;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
+import sillet.acoustics.virtual.Kind;
+
+/**
+ * A small run of {@link WholeNeckTable} against looser bars, so that no change spoils it unnoticed.
+ */
+class WholeNeckTest {
+  private static Score score;
+
+  @BeforeAll
+  static void moveOnce() {
+    score = new WholeNeckRun(120, 1, WholeNeckRun.everything()).run();
+  }
+
+  @Test
+  void triesEnoughStringsOfEveryKind() {
+    assertThat(score.of(OctaveTask.MODEL).size()).isGreaterThanOrEqualTo(600);
+    for (Kind kind : Kind.values()) {
+      assertThat(score.of(OctaveTask.MODEL, kind).size()).as(kind.name()).isGreaterThan(100);
+    }
+  }
+
+  @Test
+  void leavesFretTwelveTrue() {
+    for (Row row : List.of(OctaveTask.MODEL, OctaveTask.TWO_PASSES, OctaveTask.RAMP)) {
+      assertThat(score.of(row).median()).as(row.way()).isLessThanOrEqualTo(0.10);
+      assertThat(score.of(row).ninetyFifth()).as(row.way()).isLessThanOrEqualTo(0.30);
+      assertThat(score.of(row).coverage()).as(row.way()).isBetween(0.92, 0.99);
+    }
+    for (Kind kind : Kind.values()) {
+      Tally own = score.of(OctaveTask.MODEL, kind);
+      assertThat(own.ninetyFifth()).as(kind.name()).isLessThanOrEqualTo(0.30);
+      assertThat(own.coverage()).as(kind.name()).isBetween(0.88, 1.0);
+    }
+  }
+
+  @Test
+  void staysTrueOverLongMoves() {
+    assertThat(score.of(OctaveTask.FAR).ninetyFifth()).isLessThanOrEqualTo(0.30);
+    assertThat(score.of(OctaveTask.FAR).coverage()).isBetween(0.91, 0.99);
+    assertThat(score.of(OctaveTask.FAR_RULE).ninetyFifth()).isGreaterThan(0.45);
+    assertThat(score.of(OctaveTask.RULE).coverage()).isLessThan(0.92);
+  }
+
+  @Test
+  void aSecondPassGoesAsPredicted() {
+    assertThat(score.of(OctaveTask.STRANGE).share()).isLessThan(0.01);
+  }
+
+  @Test
+  void holdsTheBestPlaceWhereFretTwelveWasNotRead() {
+    assertThat(score.of(OctaveTask.UNREAD).coverage()).isGreaterThan(0.90);
+    assertThat(score.of(OctaveTask.UNREAD).width())
+        .isGreaterThan(5 * score.of(OctaveTask.MODEL).width());
+  }
+
+  @Test
+  void comesNearTheBestPlacesForTheNeck() {
+    neck(NutRoom.FIXED, NeckTask.ONE_BY_ONE, 1.025);
+    neck(NutRoom.EACH, NeckTask.ONE_BY_ONE, 1.28);
+    neck(NutRoom.WHOLE, NeckTask.ONE_BY_ONE, 1.09);
+    assertThat(score.of(NeckTask.row(NutRoom.FIXED, NeckTask.RULE)).ratio()).isGreaterThan(1.08);
+    assertThat(score.of(NeckTask.row(NutRoom.EACH, NeckTask.RULE)).ratio()).isGreaterThan(3);
+  }
+
+  private static void neck(NutRoom nut, String way, double atMost) {
+    Tally tally = score.of(NeckTask.row(nut, way));
+    assertThat(tally.ratio()).as(nut.name()).isLessThanOrEqualTo(atMost);
+    assertThat(tally.coverage()).as(nut.name()).isBetween(0.90, 0.995);
+  }
+}
