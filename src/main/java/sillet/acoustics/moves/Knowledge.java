@@ -5,6 +5,8 @@ import java.util.List;
 import org.hipparchus.linear.RealMatrix;
 import sillet.acoustics.neck.FrettedPitch;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.Solved;
 

@@ -3,6 +3,8 @@ package sillet.acoustics.moves;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.wire.StringConstants;
 
 /**

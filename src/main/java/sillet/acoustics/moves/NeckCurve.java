@@ -1,6 +1,8 @@
 package sillet.acoustics.moves;
 
 import sillet.acoustics.neck.FrettedPitch;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 
 /** Cents at frets 1 to 12 against the open string: as read, by the model where unread. */
 final class NeckCurve {

@@ -6,6 +6,7 @@ import java.util.List;
 import org.hipparchus.linear.RealMatrix;
 import sillet.acoustics.neck.FrettedPitch;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.solve.NotSolved;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.Solved;

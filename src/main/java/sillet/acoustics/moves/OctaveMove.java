@@ -2,6 +2,7 @@ package sillet.acoustics.moves;
 
 import sillet.acoustics.neck.FrettedPitch;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.solve.Outcome;
 
 /**

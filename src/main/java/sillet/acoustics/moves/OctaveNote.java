@@ -3,6 +3,7 @@ package sillet.acoustics.moves;
 import sillet.acoustics.neck.FrettedPitch;
 import sillet.acoustics.neck.StringLie;
 import sillet.acoustics.pitch.Cents;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.RootSearch;
 import sillet.acoustics.solve.Solved;

@@ -3,6 +3,7 @@ package sillet.acoustics.moves;
 import sillet.acoustics.neck.StringLie;
 import sillet.acoustics.pitch.Cents;
 import sillet.acoustics.pitch.EqualTemperament;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.solve.Outcome;
 
 /**

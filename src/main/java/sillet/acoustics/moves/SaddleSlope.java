@@ -1,6 +1,7 @@
 package sillet.acoustics.moves;
 
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.Reference;
 
 /** What a saddle move does to fret 12. */
 final class SaddleSlope {

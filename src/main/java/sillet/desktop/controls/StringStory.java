@@ -5,7 +5,7 @@ import java.util.List;
 import java.util.NavigableMap;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
-import sillet.acoustics.moves.TrySpread;
+import sillet.acoustics.readings.TrySpread;
 import sillet.logbook.strings.FittedString;
 import sillet.logbook.visits.MadeMove;
 import sillet.logbook.visits.Reading;

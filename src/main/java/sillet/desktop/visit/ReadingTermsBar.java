@@ -10,7 +10,7 @@ import javafx.scene.control.ToggleGroup;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Region;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.desktop.controls.Readers;
 import sillet.desktop.controls.TypedFieldModel;
 import sillet.desktop.theme.Looks;

@@ -6,7 +6,7 @@ import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.UUID;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.logbook.actions.Action;
 import sillet.logbook.actions.HandOut;
 import sillet.logbook.actions.LogWork;

@@ -4,7 +4,7 @@ import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.logbook.units.Tries;
 
 /**

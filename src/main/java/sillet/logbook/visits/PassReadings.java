@@ -5,7 +5,7 @@ import java.util.List;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.logbook.moves.NoteReadings;
 import sillet.logbook.units.Tries;
 

@@ -2,7 +2,7 @@ package sillet.logbook.visits;
 
 import java.time.Instant;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.logbook.units.Tries;
 
 /**

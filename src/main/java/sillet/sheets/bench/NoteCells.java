@@ -3,7 +3,7 @@ package sillet.sheets.bench;
 import java.util.Locale;
 import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.logbook.moves.NoteReadings;
 import sillet.logbook.plausible.Plausibility;
 import sillet.logbook.text.Message;

@@ -5,7 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.function.Function;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.wire.Construction;
 import sillet.logbook.instruments.InstrumentKind;
 import sillet.logbook.instruments.SaddleKind;

@@ -9,7 +9,7 @@ import java.util.Map;
 import java.util.UUID;
 import org.jdbi.v3.core.Handle;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.logbook.units.Decimal;
 import sillet.logbook.units.Tries;
 import sillet.logbook.visits.BenchCheck;

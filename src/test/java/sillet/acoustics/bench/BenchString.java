@@ -1,7 +1,7 @@
 package sillet.acoustics.bench;
 
-import sillet.acoustics.moves.Reference;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.virtual.Kind;
 import sillet.acoustics.wire.StringSpec;
 

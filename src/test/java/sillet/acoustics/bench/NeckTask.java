@@ -2,8 +2,8 @@ package sillet.acoustics.bench;
 
 import java.util.ArrayList;
 import java.util.List;
-import sillet.acoustics.moves.FretReading;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.virtual.Luck;
 import sillet.acoustics.virtual.Workshop;
 

@@ -1,7 +1,7 @@
 package sillet.acoustics.bench;
 
 import java.util.List;
-import sillet.acoustics.moves.FretReading;
+import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.moves.MoveEstimate;
 import sillet.acoustics.moves.PassProof;
 import sillet.acoustics.moves.SecondPass;

@@ -1,7 +1,7 @@
 package sillet.acoustics.bench;
 
 import java.util.List;
-import sillet.acoustics.moves.FretReading;
+import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.neck.CurveFit;
 import sillet.acoustics.pitch.Cents;
 

@@ -3,7 +3,7 @@ package sillet.acoustics.bench;
 import java.util.ArrayList;
 import java.util.List;
 import sillet.acoustics.moves.Aim;
-import sillet.acoustics.moves.FretReading;
+import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.moves.MoveEstimate;
 import sillet.acoustics.moves.MoveSolver;
 import sillet.acoustics.moves.MoveTask;

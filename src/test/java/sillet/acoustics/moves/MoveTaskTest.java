@@ -13,6 +13,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.Solved;
 import sillet.acoustics.wire.StringConstants;

@@ -13,6 +13,8 @@ import org.junit.jupiter.params.provider.CsvSource;
 import sillet.acoustics.neck.Clearances;
 import sillet.acoustics.neck.FrettedPitch;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.solve.NotSolved;
 import sillet.acoustics.stiff.EndCondition;
 import sillet.acoustics.stiff.OpenTension;

@@ -13,6 +13,8 @@ import sillet.acoustics.neck.Clearances;
 import sillet.acoustics.neck.FrettedPitch;
 import sillet.acoustics.neck.StringLie;
 import sillet.acoustics.pitch.Cents;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.solve.NotSolved;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.wire.Construction;

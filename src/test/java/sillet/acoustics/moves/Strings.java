@@ -3,6 +3,8 @@ package sillet.acoustics.moves;
 import java.util.List;
 import sillet.acoustics.neck.Clearances;
 import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.readings.FretReading;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.wire.StringConstants;
 
 /** Strings that several tests use: constants, pitches and heights of physics table 2.8 [D]. */

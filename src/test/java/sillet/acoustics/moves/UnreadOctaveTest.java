@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import org.junit.jupiter.api.Test;
+import sillet.acoustics.readings.FretReading;
 
 class UnreadOctaveTest {
   private static final FretReading THREE = new FretReading(3, 1.0, 0.5);

@@ -6,7 +6,7 @@ import java.util.List;
 import java.util.concurrent.TimeoutException;
 import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.Test;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.units.Tries;
 import sillet.logbook.visits.Reading;

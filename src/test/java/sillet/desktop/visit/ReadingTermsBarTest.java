@@ -11,7 +11,7 @@ import javafx.event.ActionEvent;
 import javafx.scene.control.TextField;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.desktop.drawing.Picture;
 import sillet.desktop.visit.readings.ReadingTerms;
 import sillet.logbook.moves.MoveAdvisor;

@@ -6,7 +6,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.UUID;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.wire.Construction;
 import sillet.logbook.actions.AddCustomer;
 import sillet.logbook.actions.AddInstrument;

@@ -7,7 +7,7 @@ import java.time.ZoneOffset;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import sillet.acoustics.moves.Aim;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.desktop.visit.readings.Cell;
 import sillet.desktop.visit.readings.ReadingTerms;
 import sillet.desktop.visit.readings.ShownFrets;

@@ -9,7 +9,7 @@ import java.util.Objects;
 import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
 import sillet.acoustics.moves.Aim;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.acoustics.wire.Construction;
 import sillet.logbook.text.Message;
 import sillet.logbook.units.Tries;

@@ -2,7 +2,7 @@ package sillet.desktop.visit.readings;
 
 import java.util.OptionalInt;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.TrySpread;
+import sillet.acoustics.readings.TrySpread;
 import sillet.logbook.text.Message;
 
 /**

@@ -1,7 +1,7 @@
 package sillet.desktop.visit.readings;
 
 import java.util.List;
-import sillet.acoustics.moves.Reference;
+import sillet.acoustics.readings.Reference;
 import sillet.logbook.moves.NoteReadings;
 import sillet.logbook.visits.Reading;
 

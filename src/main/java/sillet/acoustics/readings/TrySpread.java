@@ -1,4 +1,4 @@
-package sillet.acoustics.moves;
+package sillet.acoustics.readings;
 
 import java.util.Arrays;
 import java.util.OptionalInt;

@@ -1,4 +1,4 @@
-package sillet.acoustics.moves;
+package sillet.acoustics.readings;
 
 /**
  * What the tuner said of one fretted note, its tries already taken together.

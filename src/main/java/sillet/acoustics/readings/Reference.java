@@ -1,4 +1,4 @@
-package sillet.acoustics.moves;
+package sillet.acoustics.readings;
 
 /** What a fretted note was compared with. */
 public enum Reference {

@@ -1,4 +1,4 @@
-package sillet.acoustics.moves;
+package sillet.acoustics.readings;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
