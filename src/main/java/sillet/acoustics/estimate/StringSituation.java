@@ -14,10 +14,9 @@ import sillet.acoustics.wire.StringConstants;
  *
  * @param lie the string on its neck
  * @param fretting how it is pressed
- * @param fretPlaces by fret (place 0 unused): how far the fret lies from where the scale puts it,
- *     m, positive toward the bridge; frets beyond the end of the array lie where they should
+ * @param fretPlaces where the frets lie
  */
-public record StringSituation(StringLie lie, Fretting fretting, double[] fretPlaces) {
+public record StringSituation(StringLie lie, Fretting fretting, FretPlaces fretPlaces) {
 
   /** Cents at a fret against the open string; NaN where no tension brings the string to pitch. */
   public double cents(int fret) {
@@ -35,11 +34,8 @@ public record StringSituation(StringLie lie, Fretting fretting, double[] fretPla
 
   /** What the fret's own place adds, cents: a fret toward the bridge shortens the note. */
   public double placeCents(int fret) {
-    if (fret < 1 || fret >= fretPlaces.length) {
-      return 0;
-    }
     double length = lie.scale() / EqualTemperament.ratio(fret) + lie.saddleSetback();
-    return -Cents.ofRatio(1 - fretPlaces[fret] / length);
+    return -Cents.ofRatio(1 - fretPlaces.at(fret) / length);
   }
 
   /** The same place with the string lying otherwise. */

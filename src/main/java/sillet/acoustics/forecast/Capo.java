@@ -52,7 +52,7 @@ public final class Capo {
   public static Fretting fretting(Fretting fretting, int fret) {
     requireFret(fret);
     int joint = Math.max(OCTAVE + 1, fretting.bodyJoint() - fret);
-    return new Fretting(fretting.grip(), fretting.fingerDepth(), joint);
+    return fretting.withBodyJoint(joint);
   }
 
   /**

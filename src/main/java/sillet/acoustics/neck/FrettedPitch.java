@@ -151,13 +151,32 @@ public final class FrettedPitch {
   private double stretch(int fret, double sounding) {
     double toSaddle = lie.scale() / EqualTemperament.ratio(fret);
     double behind = lie.scale() - toSaddle + lie.nutSetback();
-    double depth = fretting.fingerDepth();
+    double space =
+        lie.scale() * (1 / EqualTemperament.ratio(fret - 1) - 1 / EqualTemperament.ratio(fret));
+    double depth = fretting.fingerDepth() + fretting.fingerShare() * space;
     double height = heightAtNut(fret);
-    // the string goes on down its slope to the finger, then straight to the nut
-    double down = depth / (toSaddle + lie.saddleSetback());
-    double toFinger = sounding * down;
-    double toNut = hypot(behind - depth, height + (height + rise) * down);
-    return (sounding + toFinger + toNut - openLength) / openLength;
+    double sounded = toSaddle + lie.saddleSetback();
+    if (fretting.press() == 0 || depth == 0) {
+      // the string goes on down its slope to the finger, then straight to the nut
+      double down = depth / sounded;
+      double toFinger = sounding * down;
+      double toNut = hypot(behind - depth, height + (height + rise) * down);
+      return (sounding + toFinger + toNut - openLength) / openLength;
+    }
+    double below = (height + rise) * depth / sounded + fretting.press();
+    double pressed = hypot(depth, below) + backToNut(behind, depth, below, height, space);
+    return (sounding + pressed - openLength) / openLength;
+  }
+
+  /** From the finger to the nut, over the fret before where the string meets it. */
+  private static double backToNut(
+      double behind, double depth, double below, double height, double space) {
+    double rest = behind - space;
+    double overFretBefore = -below + (height + below) * (space - depth) / (behind - depth);
+    if (overFretBefore >= 0 || !(rest > 0) || depth >= space) {
+      return hypot(behind - depth, height + below);
+    }
+    return hypot(space - depth, below) + hypot(rest, height);
   }
 
   /** Height of the nut's edge over the top of the fret, which the bow puts lower: b_n. */

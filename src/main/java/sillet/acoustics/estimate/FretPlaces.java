@@ -1,0 +1,42 @@
+package sillet.acoustics.estimate;
+
+import java.util.Arrays;
+
+/** How far each fret lies from where the scale puts it, in m, positive toward the bridge. */
+public final class FretPlaces {
+  /** Every fret where it should be. */
+  public static final FretPlaces TRUE = new FretPlaces(new double[0]);
+
+  private final double[] byFret;
+
+  private FretPlaces(double[] byFret) {
+    this.byFret = byFret;
+  }
+
+  /**
+   * Places by fret.
+   *
+   * @param byFret index is the fret, index 0 of no meaning; frets beyond its end lie true; finite
+   * @throws IllegalArgumentException if a place is not finite
+   */
+  public static FretPlaces of(double... byFret) {
+    for (double place : byFret) {
+      if (!Double.isFinite(place)) {
+        throw new IllegalArgumentException("a fret lies at " + place);
+      }
+    }
+    return new FretPlaces(byFret.clone());
+  }
+
+  /** Metres toward the bridge; 0 for a fret nothing is known of. */
+  public double at(int fret) {
+    return fret >= 1 && fret < byFret.length ? byFret[fret] : 0;
+  }
+
+  /** The same frets, one of them elsewhere. */
+  FretPlaces with(int fret, double place) {
+    double[] changed = Arrays.copyOf(byFret, Math.max(byFret.length, fret + 1));
+    changed[fret] = place;
+    return new FretPlaces(changed);
+  }
+}
