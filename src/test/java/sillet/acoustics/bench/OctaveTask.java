@@ -1,10 +1,10 @@
 package sillet.acoustics.bench;
 
 import java.util.List;
-import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.moves.MoveEstimate;
 import sillet.acoustics.moves.PassProof;
 import sillet.acoustics.moves.SecondPass;
+import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.virtual.Luck;
 import sillet.acoustics.virtual.Workshop;
 

@@ -1,9 +1,9 @@
 package sillet.acoustics.bench;
 
 import java.util.List;
-import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.neck.CurveFit;
 import sillet.acoustics.pitch.Cents;
+import sillet.acoustics.readings.FretReading;
 
 /** What can be reckoned without a model, to compare with. */
 final class PlainMethods {

@@ -3,10 +3,10 @@ package sillet.acoustics.bench;
 import java.util.ArrayList;
 import java.util.List;
 import sillet.acoustics.moves.Aim;
-import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.moves.MoveEstimate;
 import sillet.acoustics.moves.MoveSolver;
 import sillet.acoustics.moves.MoveTask;
+import sillet.acoustics.readings.FretReading;
 
 /** Puts a string on the bench before {@code acoustics}. */
 final class Solver {
