@@ -29,7 +29,8 @@ public abstract class Drawn extends Region {
           colour("pencil", Color.BLACK),
           colour("sheet", Color.WHITE),
           colour("field", Color.WHITE),
-          colour("bench", Color.WHITE));
+          colour("bench", Color.WHITE),
+          colour("lamp", Color.WHITE));
 
   private static final List<CssMetaData<? extends Styleable, ?>> CSS_META_DATA = joined();
 
@@ -80,7 +81,8 @@ public abstract class Drawn extends Region {
         colourAt(5),
         colourAt(6),
         colourAt(7),
-        colourAt(8));
+        colourAt(8),
+        colourAt(9));
   }
 
   @Override

@@ -13,6 +13,7 @@ import javafx.scene.paint.Color;
  * @param sheet the ground of a panel
  * @param field the ground where one types
  * @param bench the ground of the window
+ * @param lamp the ground of what is lit: focus and selection
  */
 public record Inks(
     Color ink,
@@ -22,4 +23,5 @@ public record Inks(
     Color pencil,
     Color sheet,
     Color field,
-    Color bench) {}
+    Color bench,
+    Color lamp) {}

@@ -13,6 +13,9 @@ final class BoardLines {
   private static final Set<Integer> SINGLE_DOTS = Set.of(3, 5, 7, 9, 15, 17, 19, 21);
   private static final Set<Integer> DOUBLE_DOTS = Set.of(12, 24);
   private static final double DOT_EM = 0.29;
+  private static final double[] NUMBER_SIZES = {1.14, 1, 0.93};
+  private static final double LEAST_NUMBER = 0.86;
+  private static final double NUMBER_GAP_EM = 0.29;
 
   private final Pen pen;
   private final SheetGeometry sheet;
@@ -105,7 +108,7 @@ final class BoardLines {
 
   /** Numbers above the frets: the read ones bold, others where there is room. */
   void paintNumbers(SheetWords words, TakenRoom taken) {
-    Lettering read = Lettering.bold(1.14, pen.inks().ink()).centred();
+    Lettering read = readNumbers();
     Lettering other = Lettering.plain(0.86, pen.inks().soft()).centred();
     double y = sheet.headLineY();
     double top = sheet.rows().top();
@@ -115,7 +118,8 @@ final class BoardLines {
       pen.textAround(number(fret), read, x, y);
     }
     for (int fret = frets; fret >= 1; fret--) {
-      boolean named = SINGLE_DOTS.contains(fret) || DOUBLE_DOTS.contains(fret) || fret == frets;
+      boolean dotted = SINGLE_DOTS.contains(fret) || DOUBLE_DOTS.contains(fret);
+      boolean named = dotted || fret == frets || sheet.column();
       double x = strip.neckFretXAt(fret, top);
       if (named && taken.takeIfFree(x, pen.em(1.14), pen.em(0.29))) {
         pen.textAround(number(fret), other, x, y);
@@ -126,6 +130,28 @@ final class BoardLines {
     if (taken.takeIfFree(nut, width, pen.em(0.43))) {
       pen.textAround(words.nut(), other, nut, y);
     }
+  }
+
+  /** The largest type in which no number of a read fret touches its neighbour's. */
+  private Lettering readNumbers() {
+    for (double size : NUMBER_SIZES) {
+      Lettering type = Lettering.bold(size, pen.inks().ink()).centred();
+      if (free(type)) {
+        return type;
+      }
+    }
+    return Lettering.bold(LEAST_NUMBER, pen.inks().ink()).centred();
+  }
+
+  private boolean free(Lettering type) {
+    TakenRoom taken = new TakenRoom();
+    return sheet.picture().board().readFrets().stream()
+        .allMatch(
+            fret ->
+                taken.takeIfFree(
+                    strip.neckFretXAt(fret, sheet.rows().top()),
+                    type.width(number(fret), pen.em(1)),
+                    pen.em(NUMBER_GAP_EM)));
   }
 
   private static String number(int fret) {

@@ -7,12 +7,14 @@ import sillet.desktop.drawing.Snap;
 /**
  * Where reading cells stand: each hangs beside its fret line on the side of the bridge, with room
  * for the bar on the line. Cells take the largest size their neighbours allow; where read frets
- * stand too close, cells move up the neck rather than overlap. Holds no JavaFX types.
+ * stand too close, cells move up the neck rather than overlap; where that is not enough, the cells
+ * of one fret stand in a column behind the board. Holds no JavaFX types.
  */
 public final class CellGrid {
   static final double HANG_EM = 0.57;
   private static final double BEFORE_NEXT_EM = 0.79;
   private static final double BETWEEN_EM = 0.29;
+  private static final double HALF_MARK_EM = 0.32;
   private static final double LEAST_FIGURE_PX = 16;
   private static final double LEAST_FIGURE_EM = 1;
   private static final double FIGURE_IN_WIDTH = 3.4;
@@ -24,6 +26,7 @@ public final class CellGrid {
   private final Frame frame;
   private final List<Integer> readFrets;
   private final double widthPx;
+  private final boolean column;
 
   /**
    * What the grid keeps to.
@@ -46,12 +49,18 @@ public final class CellGrid {
     this.measures = measures;
     this.frame = frame;
     this.readFrets = picture.board().readFrets();
-    this.widthPx = Math.floor(widestThatFits());
+    this.column = picture.board().column() != null;
+    this.widthPx = Math.floor(column ? columnPx(measures, frame.em()) : widestThatFits());
   }
 
   /** A cell whose figures can be read at arm's length. */
   static double leastWidthPx(double em) {
     return FIGURE_IN_WIDTH * Math.max(LEAST_FIGURE_PX, LEAST_FIGURE_EM * em);
+  }
+
+  /** Width of the one column of cells behind the board. */
+  static double columnPx(SheetMeasures measures, double em) {
+    return Math.max(measures.widestCell() * em, leastWidthPx(em));
   }
 
   private double widestThatFits() {
@@ -87,6 +96,23 @@ public final class CellGrid {
     return towardBridge(strip.neckFretX(row, neckFret));
   }
 
+  /** Whether cells have room beside every read fret and none hides the mark of the next. */
+  boolean fit() {
+    if (column || widthPx < leastWidthPx(frame.em())) {
+      return column;
+    }
+    double mark = frame.em() * HALF_MARK_EM;
+    for (int row = 0; row < rows.count(); row++) {
+      double[] edges = nearEdges(row);
+      for (int i = 0; i + 1 < edges.length; i++) {
+        if (edges[i] + widthPx > lineX(row, readFrets.get(i + 1)) - mark) {
+          return false;
+        }
+      }
+    }
+    return true;
+  }
+
   /** Width of every cell in px. */
   public double widthPx() {
     return widthPx;
@@ -106,10 +132,10 @@ public final class CellGrid {
   /** The cell of one string at one read fret of the neck. */
   public Box cell(int row, int neckFret) {
     int place = readFrets.indexOf(neckFret);
-    if (place < 0) {
+    if (place < 0 && !column) {
       throw new IllegalArgumentException("No cells at fret " + neckFret + ", only at " + readFrets);
     }
-    double near = Snap.px(nearEdges(row)[place]);
+    double near = Snap.px(column ? towardBridge(frame.endX()) - widthPx : nearEdges(row)[place]);
     double left = frame.away() > 0 ? near : -near - widthPx;
     double height = heightPx();
     return new Box(left, Snap.px(rows.y(row) - height / 2), widthPx, height);

@@ -1,6 +1,7 @@
 package sillet.desktop.drawing.strings;
 
 import javafx.scene.paint.Color;
+import org.jspecify.annotations.Nullable;
 import sillet.desktop.drawing.Box;
 import sillet.desktop.drawing.Pen;
 import sillet.desktop.drawing.Snap;
@@ -8,17 +9,26 @@ import sillet.desktop.drawing.Stroke;
 
 /**
  * Draws readings on their fret lines: a bar from the string's edge, up for sharp and down for flat;
- * a diamond within a cent; an arrowhead beyond ten; a tick in pencil for what is predicted.
+ * a diamond within a cent; an arrowhead beyond ten; a tick in pencil for what is predicted. What
+ * the model only estimates is drawn thin.
  */
 public final class CentsBars {
   /** Bars end here; beyond stands an arrowhead. */
   static final double MOST_CENTS = 10;
 
   private static final double BAR_EM = 0.64;
-  private static final double DIAMOND_EM = 0.47;
-  private static final double TICK_EM = 0.64;
   private static final double HEAD_EM = 0.5;
   private static final double HEAD_GAP_EM = 0.14;
+
+  /** Sizes of a mark in em, and the least width of its lines in px. */
+  private record Weight(double bar, double diamond, double tick, double line, double leastPx) {
+    static final Weight READ = new Weight(BAR_EM, 0.47, 0.64, 0.14, 2);
+    static final Weight ESTIMATED = new Weight(0.18, 0.32, 0.43, 0.07, 1);
+
+    static Weight of(FretMark mark) {
+      return mark.estimated() ? ESTIMATED : READ;
+    }
+  }
 
   private final Pen pen;
   private final double cent;
@@ -48,19 +58,20 @@ public final class CentsBars {
     }
     Double cents = mark.cents();
     if (cents != null) {
-      reading(cents, mark.stale(), lineX, y, stringWidth);
+      reading(mark, cents, lineX, y, stringWidth);
     }
     Double predicted = mark.predicted();
     boolean diamondStays = FretMark.isTrue(cents) && FretMark.isTrue(predicted);
     if (predicted != null && !mark.stale() && !diamondStays) {
-      tick(predicted, lineX, y, stringWidth);
+      tick(predicted, Weight.of(mark), lineX, y, stringWidth);
     }
   }
 
-  private void reading(double cents, boolean stale, double x, double y, double stringWidth) {
-    Color colour = stale ? pen.inks().line() : pen.inks().ink();
+  private void reading(FretMark mark, double cents, double x, double y, double stringWidth) {
+    Color colour = mark.stale() ? pen.inks().line() : pen.inks().ink();
+    Weight weight = Weight.of(mark);
     if (FretMark.isTrue(cents)) {
-      diamond(colour, stale ? colour : pen.inks().field(), x, y);
+      diamond(new Stroke(colour, width(weight)), weight, mark.stale() ? colour : null, x, y);
       return;
     }
     double side = -Math.signum(cents);
@@ -69,11 +80,12 @@ public final class CentsBars {
     boolean beyond = Math.abs(cents) > MOST_CENTS;
     double head = beyond ? pen.em(HEAD_EM + HEAD_GAP_EM) : 0;
     double end = foot + side * Math.max(1, length - head);
-    pen.block(colour, Box.between(x - pen.em(BAR_EM / 2), foot, pen.em(BAR_EM), end));
+    double bar = mark.estimated() ? pen.atLeast(2, weight.bar()) : pen.em(weight.bar());
+    pen.block(colour, Box.between(x - bar / 2, foot, bar, end));
     if (beyond) {
       double neck = pen.edge(end + side * pen.em(HEAD_GAP_EM));
       double tip = neck + side * pen.em(HEAD_EM);
-      double half = pen.em(0.4);
+      double half = pen.em(mark.estimated() ? 0.29 : 0.4);
       pen.area(colour, x - half, neck, x, tip, x + half, neck);
     }
   }
@@ -87,19 +99,23 @@ public final class CentsBars {
     pen.openBlock(stroke, Color.TRANSPARENT, Box.between(x - width / 2, foot, width, end));
   }
 
-  private void diamond(Color line, Color ground, double x, double y) {
-    double half = pen.em(DIAMOND_EM);
+  private double width(Weight weight) {
+    return pen.atLeast(weight.leastPx(), weight.line());
+  }
+
+  private void diamond(Stroke stroke, Weight weight, @Nullable Color filled, double x, double y) {
+    double half = pen.em(weight.diamond());
+    Color ground = filled == null ? pen.inks().field() : filled;
     pen.area(ground, x - half, y, x, y - half, x + half, y, x, y + half);
-    double inset = half - pen.atLeast(2, 0.14) * 0.7;
-    Stroke stroke = new Stroke(line, pen.atLeast(2, 0.14));
+    double inset = half - stroke.width() * 0.7;
     pen.outlined(stroke, x - inset, y, x, y - inset, x + inset, y, x, y + inset);
   }
 
   /** Stands where a bar of so many cents would end; between the string's edges near zero. */
-  private void tick(double cents, double x, double y, double stringWidth) {
+  private void tick(double cents, Weight weight, double x, double y, double stringWidth) {
     double held = Math.max(-MOST_CENTS, Math.min(MOST_CENTS, cents));
     double foot = y - Math.max(-1, Math.min(1, cents)) * stringWidth / 2;
-    double half = pen.em(TICK_EM);
+    double half = pen.em(weight.tick());
     Stroke stroke = new Stroke(pen.inks().pencil(), pen.atLeast(2, 0.13));
     pen.level(x - half, x + half, foot - held * cent, stroke);
   }

@@ -5,7 +5,8 @@ import sillet.desktop.drawing.Box;
 
 /**
  * Where a finding's balloon stands and where its leader begins, in px. Above the bar where the row
- * has room, else behind the cell. Holds no JavaFX types.
+ * has room, else behind the cell; one of a whole fret stands under the fret's number, one of a
+ * string on the string, where the drawing is broken. Holds no JavaFX types.
  *
  * @param fromX begin of the leader
  * @param fromY begin of the leader
@@ -19,16 +20,32 @@ record FindingLeader(double fromX, double fromY, double x, double y) {
   private static final double ROOM_EM = 1.42;
 
   static FindingLeader of(SheetGeometry sheet, FindingMark finding) {
+    if (finding.row() == FindingMark.ALL_STRINGS) {
+      double top = sheet.rows().top();
+      double x = sheet.strip().neckFretXAt(finding.fret(), top);
+      double bottom = sheet.rows().bottom();
+      double foot = sheet.strip().neckFretXAt(finding.fret(), bottom);
+      return new FindingLeader(foot, bottom, x, top);
+    }
     double y = sheet.rows().y(finding.row());
+    if (finding.fret() == FindingMark.ON_STRING) {
+      double broken = (sheet.breakNearX() + sheet.breakFarX()) / 2;
+      return new FindingLeader(broken, y, broken, y);
+    }
     if (finding.fret() == FindingMark.AT_SADDLE) {
       return atSaddle(sheet, finding.row(), y);
+    }
+    if (finding.fret() == 0 && sheet.measures().tight()) {
+      double nut = sheet.strip().fretX(finding.row(), 0) + sheet.away() * sheet.em() / 2;
+      return new FindingLeader(nut, y, nut, y);
     }
     StringRow string = sheet.picture().rows().get(finding.row());
     int neckFret = finding.fret() + string.startFret();
     double x = sheet.strip().neckFretX(finding.row(), neckFret);
     double em = sheet.em();
     boolean roomAbove = sheet.rows().rowPx() - sheet.cells().heightPx() >= ROOM_EM * em;
-    if (roomAbove || !sheet.picture().board().readFrets().contains(neckFret)) {
+    boolean besideCell = sheet.picture().board().readFrets().contains(neckFret) && !sheet.column();
+    if (roomAbove || !besideCell) {
       double fromY = y - Math.min(1.2, Math.max(0.5, barTop(sheet, string, finding.fret()))) * em;
       double up = sheet.cells().heightPx() / 2 + OVER_CELL_EM * em;
       return new FindingLeader(x, fromY, x + sheet.away() * ASIDE_EM * em, y - up);

@@ -13,6 +13,7 @@ public final class LegendGlyph extends Glyph {
   public enum Sign {
     TEN_CENTS,
     READ,
+    ESTIMATED,
     PREDICTED,
     PASS_BEFORE
   }
@@ -34,6 +35,8 @@ public final class LegendGlyph extends Glyph {
     switch (sign) {
       case TEN_CENTS -> tenCents(pen, width / 2, y);
       case READ -> pen.block(pen.inks().ink(), block);
+      case ESTIMATED ->
+          pen.block(pen.inks().ink(), Box.around(width / 2, y, pen.atLeast(2, 0.18), pen.em(1.29)));
       case PREDICTED ->
           pen.level(0, width, y, new Stroke(pen.inks().pencil(), pen.atLeast(2, 0.13)));
       case PASS_BEFORE -> pen.openBlock(new Stroke(pen.inks().line(), 1), Color.TRANSPARENT, block);

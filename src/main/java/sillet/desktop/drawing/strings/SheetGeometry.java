@@ -90,6 +90,9 @@ public final class SheetGeometry {
   private double lastFretX() {
     double zero = em(measures.names() + NUT_EM);
     double room = firstBreak() - em(measures.gaps().boardToBreak() + BOARD_BEYOND_FRET_EM) - zero;
+    if (column()) {
+      return fromNutSide(zero + room - CellGrid.columnPx(measures, frame.em()));
+    }
     double cell = em(CellGrid.HANG_EM) + CellGrid.leastWidthPx(frame.em());
     double roomForCell = firstBreak() - em(BEFORE_BREAK_EM) - cell - zero;
     double share = NeckStripGeometry.shareOfLastReadFret(picture);
@@ -112,6 +115,11 @@ public final class SheetGeometry {
         em(margin),
         frame.dotsPerInch(),
         measures.along());
+  }
+
+  /** Whether the cells of one fret stand behind the board. */
+  boolean column() {
+    return picture.board().column() != null;
   }
 
   /** The column of string names, beside the nut. */

@@ -3,8 +3,8 @@ package sillet.desktop.drawing.strings;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import javafx.geometry.Rectangle2D;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Node;
@@ -22,14 +22,9 @@ import sillet.desktop.drawing.Snap;
 public final class StringsDrawing extends Drawn {
   private static final double LEAST_WIDTH_EM = 50;
 
-  /** Room for three tries, in type sizes of a figure. */
-  private static final double WIDENED_FIGURES = 8.2;
-
-  private record Place(int row, int fret) {}
-
   private final SheetWords sheetWords;
   private final double dotsPerInch;
-  private final Map<Place, Node> cells = new HashMap<>();
+  private final PlacedCells cells = new PlacedCells();
   private final Map<Integer, Node> words = new HashMap<>();
   private final List<Balloon> balloons = new ArrayList<>();
   private final TargetGlide targets = new TargetGlide(this::requestLayout);
@@ -37,7 +32,6 @@ public final class StringsDrawing extends Drawn {
   private StringsPicture picture;
   private SheetShape shape = SheetShape.USUAL;
   private boolean glide = true;
-  private @Nullable Place widened;
   private @Nullable Node wordsHead;
 
   /**
@@ -88,7 +82,7 @@ public final class StringsDrawing extends Drawn {
    * its inline style, its type size.
    */
   public void setCell(int row, int neckFret, Node cell) {
-    swap(cells.put(new Place(row, neckFret), cell), cell);
+    swap(cells.put(new CellPlace(row, neckFret), cell), cell);
   }
 
   /** Puts words, most often {@link MoveWords}, at the end of a string. */
@@ -113,27 +107,22 @@ public final class StringsDrawing extends Drawn {
 
   /** Takes all cells and words away, before another instrument is shown. */
   public void clearPlaced() {
-    getChildren().removeAll(cells.values());
+    getChildren().removeAll(cells.nodes());
     getChildren().removeAll(words.values());
     cells.clear();
     words.clear();
-    widened = null;
     requestLayout();
   }
 
   /** Gives one cell the room for several tries while they are typed. */
   public void widen(int row, int neckFret) {
-    widened = new Place(row, neckFret);
-    Node cell = cells.get(widened);
-    if (cell != null) {
-      cell.toFront();
-    }
+    cells.widen(new CellPlace(row, neckFret));
     requestLayout();
   }
 
   /** All cells at their usual width again. */
   public void narrow() {
-    widened = null;
+    cells.narrow();
     requestLayout();
   }
 
@@ -144,9 +133,23 @@ public final class StringsDrawing extends Drawn {
 
   /** The sheet as it is laid out at the present width. */
   public SheetGeometry geometry() {
+    return geometry(picture);
+  }
+
+  /** Whether each read fret of a picture has room for cells of its own at the present width. */
+  public boolean cellsFit(StringsPicture other) {
+    return geometry(other).cells().fit();
+  }
+
+  /** The read fret and string nearest to a point; empty beside the board. */
+  public Optional<CellPlace> near(double x, double y) {
+    return PlacedCells.near(geometry(), x, y);
+  }
+
+  private SheetGeometry geometry(StringsPicture shown) {
     double width = Math.max(getWidth(), em() * LEAST_WIDTH_EM);
     return new SheetGeometry(
-        picture, measures(), new SheetGeometry.Frame(width, em(), dotsPerInch));
+        shown, SheetMeasures.of(shape, shown), new SheetGeometry.Frame(width, em(), dotsPerInch));
   }
 
   @Override
@@ -158,7 +161,7 @@ public final class StringsDrawing extends Drawn {
   protected void layoutChildren() {
     super.layoutChildren();
     SheetGeometry sheet = geometry();
-    cells.forEach((place, cell) -> layoutCell(sheet, place, cell));
+    cells.layout(sheet);
     words.forEach((row, node) -> put(node, sheet.words(row)));
     if (wordsHead != null) {
       put(wordsHead, sheet.wordsHead());
@@ -168,30 +171,6 @@ public final class StringsDrawing extends Drawn {
       double size = balloons.get(i).prefWidth(-1);
       put(balloons.get(i), Box.around(leader.x(), leader.y(), size, size));
     }
-  }
-
-  private void layoutCell(SheetGeometry sheet, Place place, Node cell) {
-    boolean there =
-        place.row() < picture.rows().size() && picture.board().readFrets().contains(place.fret());
-    cell.setVisible(there);
-    if (!there) {
-      return;
-    }
-    Box box = sheet.cells().cell(place.row(), place.fret());
-    String style = String.format(Locale.ROOT, "-fx-font-size: %.2fpx;", sheet.cells().figurePx());
-    if (!style.equals(cell.getStyle())) {
-      cell.setStyle(style);
-      cell.applyCss();
-    }
-    put(cell, place.equals(widened) ? widenedBox(sheet, box) : box);
-  }
-
-  private Box widenedBox(SheetGeometry sheet, Box box) {
-    double width = Math.max(box.width(), Snap.px(sheet.cells().figurePx() * WIDENED_FIGURES));
-    double x = sheet.away() > 0 ? box.x() : box.right() - width;
-    double over = sheet.away() > 0 ? Math.max(0, x + width - sheet.boardEnd()) : 0;
-    double under = sheet.away() < 0 ? Math.max(0, sheet.boardEnd() - x) : 0;
-    return new Box(x - over + under, box.y(), width, box.height());
   }
 
   private static void put(Node node, Box box) {

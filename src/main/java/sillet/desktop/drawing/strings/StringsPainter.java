@@ -22,16 +22,20 @@ final class StringsPainter {
     BridgeLines bridge = new BridgeLines(pen, sheet);
     BoardLines board = new BoardLines(pen, sheet);
     bridge.paintGround();
+    OpenColumn column = new OpenColumn(pen, sheet);
+    column.paintGround();
     board.paint();
     StringLines.paint(pen, sheet, widths);
     bridge.paintOver();
     CentsBars.paint(pen, sheet, widths);
+    NutArrows.paint(pen, sheet);
     SaddlePlan plan = new SaddlePlan(pen, sheet);
     for (int row = 0; row < widths.length; row++) {
       saddle(plan, row, targets.shownMm(row));
     }
     TakenRoom headLine = new TakenRoom();
     new StringNames(pen, sheet).paint(words, headLine);
+    column.paintHead(headLine);
     board.paintNumbers(words, headLine);
     Rules rules = new Rules(pen, sheet);
     rules.paintNeckRule();

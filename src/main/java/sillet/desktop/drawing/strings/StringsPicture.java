@@ -3,6 +3,7 @@ package sillet.desktop.drawing.strings;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.stream.IntStream;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Everything the strings drawing shows.
@@ -14,6 +15,7 @@ import java.util.stream.IntStream;
  * @param findings those not dealt with yet
  * @param spreadMm string 1 to the last string at the bridge, for the scale across; empty where not
  *     known
+ * @param nuts nut edges that shall move
  */
 public record StringsPicture(
     List<StringRow> rows,
@@ -21,7 +23,8 @@ public record StringsPicture(
     Bridge bridge,
     Lie lie,
     List<FindingMark> findings,
-    OptionalDouble spreadMm) {
+    OptionalDouble spreadMm,
+    List<NutMark> nuts) {
   /** The most strings that are drawn. */
   public static final int MOST_STRINGS = 24;
 
@@ -31,8 +34,11 @@ public record StringsPicture(
    * @param frets number of the last fret
    * @param readFrets frets with a column of cells, in order, counted along the neck
    * @param straightFret the fret at a right angle to the neck, where strings differ in scale
+   * @param column where read frets stand too close for cells beside them: the one fret whose cells
+   *     are open, in a column behind the board; null where each fret has its own
    */
-  public record Board(int frets, List<Integer> readFrets, int straightFret) {
+  public record Board(
+      int frets, List<Integer> readFrets, int straightFret, @Nullable Column column) {
     public Board {
       if (frets < 1 || frets > 36) {
         throw new IllegalArgumentException("A board has 1 to 36 frets: " + frets);
@@ -40,10 +46,39 @@ public record StringsPicture(
       readFrets = readFrets.stream().distinct().sorted().toList();
     }
 
+    /** A board on which every read fret has cells of its own. */
+    public Board(int frets, List<Integer> readFrets, int straightFret) {
+      this(frets, readFrets, straightFret, null);
+    }
+
     /** A board for strings of one scale. */
     public static Board of(int frets, List<Integer> readFrets) {
       return new Board(frets, readFrets, 0);
     }
+
+    /** The same with the cells of one fret in a column. */
+    public Board with(Column open) {
+      return new Board(frets, readFrets, straightFret, open);
+    }
+  }
+
+  /**
+   * The open cells behind the board.
+   *
+   * @param fret counted from each string's own nut
+   * @param head stands above them
+   */
+  public record Column(int fret, String head) {}
+
+  /** A picture on which the nut stays. */
+  public StringsPicture(
+      List<StringRow> rows,
+      Board board,
+      Bridge bridge,
+      Lie lie,
+      List<FindingMark> findings,
+      OptionalDouble spreadMm) {
+    this(rows, board, bridge, lie, findings, spreadMm, List.of());
   }
 
   public StringsPicture {
@@ -52,6 +87,7 @@ public record StringsPicture(
     }
     rows = List.copyOf(rows);
     findings = List.copyOf(findings);
+    nuts = List.copyOf(nuts);
   }
 
   /** Strings that share a course with a neighbour lie in pairs. */

@@ -154,7 +154,7 @@ final class SheetScene {
     HBox.setHgrow(room, Priority.ALWAYS);
     HBox head = new HBox(10, readings, pass, room);
     LegendGlyph.Sign[] signs = LegendGlyph.Sign.values();
-    String[] words = {"10 cents", "read", "predicted", "pass 1"};
+    String[] words = {"10 cents", "read", "estimated", "predicted", "pass 1"};
     for (int i = 0; i < signs.length; i++) {
       Label word = new Label(words[i]);
       word.getStyleClass().add(Looks.NOTE);

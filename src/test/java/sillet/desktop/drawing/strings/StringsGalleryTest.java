@@ -46,6 +46,15 @@ class StringsGalleryTest {
   }
 
   @Test
+  void wholeNeck() throws IOException {
+    draw("neck", NeckSamples.of(Samples.six(), 5), SheetShape.USUAL, Theme.LIGHT, 100);
+    draw("neck-dark", NeckSamples.of(Samples.six(), 12), SheetShape.USUAL, Theme.DARK, 100);
+    draw("neck-wide", NeckSamples.of(Samples.six(), 1), SheetShape.WIDE, Theme.LIGHT, 100);
+    draw("neck-narrow", NeckSamples.of(Samples.six(), 17), SheetShape.NARROW, Theme.LIGHT, 150);
+    draw("neck-12", NeckSamples.of(Samples.twelve(), 3), SheetShape.USUAL, Theme.LIGHT, 100);
+  }
+
+  @Test
   void otherLies() throws IOException {
     draw("left-handed", Samples.six(Lie.of(true, false)), SheetShape.USUAL, Theme.LIGHT, 100);
     draw("turned", Samples.six(Lie.of(false, true)), SheetShape.USUAL, Theme.LIGHT, 100);
