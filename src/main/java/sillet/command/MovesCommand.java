@@ -11,7 +11,6 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
-import sillet.acoustics.moves.Aim;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.text.Message;
@@ -31,7 +30,7 @@ final class MovesCommand implements Callable<Integer> {
   private Path file;
 
   @Option(names = "--aim", paramLabel = "octave|neck", descriptionKey = "usage.moves.aim")
-  private Aim aim = Aim.OCTAVE;
+  private NamedAim aim = NamedAim.OCTAVE;
 
   @Option(names = "--out", paramLabel = "FILE", descriptionKey = "usage.moves.out")
   private @Nullable Path out;
@@ -65,7 +64,7 @@ final class MovesCommand implements Callable<Integer> {
 
   private void moves(BenchSheet sheet, MovesSheet moves) throws IOException {
     MoveAdvisor advisor = new MoveAdvisor(Shop.USUAL_BREAKING_SHARE_PERCENT);
-    sheet.inOrder(strings -> advisor.advise(strings, aim), moves::write);
+    sheet.inOrder(strings -> advisor.advise(strings, aim.choice()).strings(), moves::write);
   }
 
   private void refuseInputAsOutput(Path target) throws IOException {

@@ -9,6 +9,8 @@ import sillet.acoustics.wire.Construction;
 import sillet.logbook.actions.Action;
 import sillet.logbook.actions.AddCustomer;
 import sillet.logbook.actions.AddInstrument;
+import sillet.logbook.actions.ChooseAim;
+import sillet.logbook.actions.ForgetLearned;
 import sillet.logbook.actions.HandOut;
 import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
@@ -27,6 +29,8 @@ import sillet.logbook.instruments.Neck;
 import sillet.logbook.instruments.Saddle;
 import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.instruments.ScrewSense;
+import sillet.logbook.moves.AimChoice;
+import sillet.logbook.moves.NutMovable;
 import sillet.logbook.shop.Customer;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.strings.FittedString;
@@ -46,6 +50,7 @@ import sillet.logbook.visits.Reading;
 import sillet.logbook.visits.StringsOn;
 import sillet.logbook.visits.Travel;
 import sillet.logbook.visits.Visit;
+import sillet.logbook.visits.VisitAim;
 import sillet.logbook.visits.VisitNote;
 import sillet.logbook.visits.WorkLine;
 
@@ -202,6 +207,10 @@ public final class BenchDay {
     return new VisitNote(AT.plusSeconds(300), NoteKind.DECLINED, "\u201cno new nut, please\u201d");
   }
 
+  public static VisitAim aim() {
+    return new VisitAim(AimChoice.parse("1 5 7 12:2.5"), NutMovable.WHOLE);
+  }
+
   /** Every action, in an order that works in an empty logbook. */
   public static List<Action> actions() {
     Customer renamed = new Customer(CUSTOMER_ID, "Zo\u00eb Marsh", "0151 234567", "", "");
@@ -234,6 +243,9 @@ public final class BenchDay {
         new ReviseCustomer(renamed, 1),
         new RecordTravel(VISIT_ID, List.of(new Travel(2, 4.0, null))),
         new HandOut(VISIT_ID, DAY.plusDays(3)),
-        new ReviseInstrument(sold, 1));
+        new ReviseInstrument(sold, 1),
+        new ChooseAim(VISIT_ID, new VisitAim(AimChoice.NECK, NutMovable.NO)),
+        new ChooseAim(VISIT_ID, aim()),
+        new ForgetLearned(INSTRUMENT_ID, AT.minusSeconds(86400)));
   }
 }

@@ -7,6 +7,8 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 import sillet.logbook.actions.AddCustomer;
 import sillet.logbook.actions.AddInstrument;
+import sillet.logbook.actions.ChooseAim;
+import sillet.logbook.actions.ForgetLearned;
 import sillet.logbook.actions.HandOut;
 import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
@@ -18,7 +20,10 @@ import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.TakeIn;
 import sillet.logbook.actions.WriteNote;
 import sillet.logbook.shop.Shop;
+import sillet.logbook.visits.InstrumentPast;
 import sillet.logbook.visits.Travel;
+import sillet.logbook.visits.Visit;
+import sillet.logbook.visits.VisitAim;
 import sillet.logbook.visits.VisitRecord;
 import sillet.store.reading.Kept;
 
@@ -67,6 +72,29 @@ class LogbookRoundTripTest {
   }
 
   @Test
+  void knowsThePastOfAnInstrumentAndFromWhenItTeaches() {
+    takeIn();
+    VisitRecord first = logbook.visits().byTicket(BenchDay.TICKET).orElseThrow();
+    assertThat(logbook.visits().past(first)).isEqualTo(InstrumentPast.NONE);
+    Visit again =
+        new Visit(
+            BenchDay.SECOND_VISIT_ID,
+            BenchDay.TICKET + 7,
+            BenchDay.INSTRUMENT_ID,
+            null,
+            BenchDay.visit().arrival(),
+            BenchDay.visit().strings(),
+            List.of(),
+            null);
+    perform(new TakeIn(again));
+    perform(new ForgetLearned(BenchDay.INSTRUMENT_ID, BenchDay.AT));
+    perform(new ForgetLearned(BenchDay.INSTRUMENT_ID, BenchDay.AT.plusSeconds(5)));
+    VisitRecord second = logbook.visits().byTicket(again.ticket()).orElseThrow();
+    assertThat(logbook.visits().past(second))
+        .isEqualTo(new InstrumentPast(List.of(first), BenchDay.AT.plusSeconds(5)));
+  }
+
+  @Test
   void keepsAVisitWithEverythingThatWasAddedToIt() {
     takeIn();
     perform(new RecordChecks(BenchDay.VISIT_ID, BenchDay.checks()));
@@ -74,6 +102,8 @@ class LogbookRoundTripTest {
     perform(new RecordMoves(BenchDay.VISIT_ID, BenchDay.moves()));
     perform(new LogWork(BenchDay.VISIT_ID, BenchDay.work()));
     perform(new WriteNote(BenchDay.VISIT_ID, BenchDay.note()));
+    perform(new ChooseAim(BenchDay.VISIT_ID, VisitAim.USUAL));
+    perform(new ChooseAim(BenchDay.VISIT_ID, BenchDay.aim()));
     VisitRecord expected =
         new VisitRecord(
             BenchDay.visit(),
@@ -83,7 +113,8 @@ class LogbookRoundTripTest {
             BenchDay.readings(),
             BenchDay.moves(),
             List.of(BenchDay.work()),
-            List.of(BenchDay.note()));
+            List.of(BenchDay.note()),
+            BenchDay.aim());
     assertThat(logbook.visits().byTicket(BenchDay.TICKET)).contains(expected);
     assertThat(logbook.visits().byId(BenchDay.VISIT_ID)).contains(expected);
     assertThat(logbook.visits().ofInstrument(BenchDay.INSTRUMENT_ID)).containsExactly(expected);

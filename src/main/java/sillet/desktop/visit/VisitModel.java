@@ -79,7 +79,8 @@ public final class VisitModel {
         readings,
         record.moves(),
         record.work(),
-        record.notes());
+        record.notes(),
+        record.aim());
   }
 
   public VisitRecord record() {

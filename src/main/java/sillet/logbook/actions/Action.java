@@ -20,6 +20,8 @@ public sealed interface Action
         RecordMoves,
         LogWork,
         WriteNote,
+        ChooseAim,
+        ForgetLearned,
         HandOut {
 
   /**

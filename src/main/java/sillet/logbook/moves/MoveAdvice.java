@@ -1,7 +1,6 @@
 package sillet.logbook.moves;
 
 import java.util.List;
-import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import sillet.logbook.text.Message;
 
@@ -11,19 +10,24 @@ import sillet.logbook.text.Message;
  * @param string what it was reckoned from
  * @param figures the figures; null if they could not be solved, the notes say why
  * @param verdict what to do with them
- * @param findings causes only; empty for a clean string
+ * @param neck its notes by fret, now and after the move, in the order of the frets; empty without
+ *     figures
+ * @param findings causes that concern this string, in the order in which to look; empty for a clean
+ *     string
  * @param notes sentences for people, the most important first
  */
 public record MoveAdvice(
     BenchString string,
     @Nullable MoveFigures figures,
     Verdict verdict,
-    Set<Finding> findings,
+    List<FretCents> neck,
+    List<FindingReport> findings,
     List<Message> notes) {
 
   /** Copies the lists. */
   public MoveAdvice {
-    findings = Set.copyOf(findings);
+    neck = List.copyOf(neck);
+    findings = List.copyOf(findings);
     notes = List.copyOf(notes);
   }
 }

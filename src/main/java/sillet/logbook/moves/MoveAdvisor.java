@@ -1,9 +1,7 @@
 package sillet.logbook.moves;
 
 import java.util.ArrayList;
-import java.util.EnumSet;
 import java.util.List;
-import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import sillet.acoustics.moves.Aim;
 import sillet.acoustics.moves.MoveEstimate;
@@ -35,10 +33,18 @@ public final class MoveAdvisor {
    *
    * @param strings all of the same instrument, each with at least one reading
    * @param aim what shall become true
-   * @return one advice for each string, in the same order; figures that cannot be solved are
-   *     missing and say why
+   * @return one advice for each string, in the same order, and what concerns all; figures that
+   *     cannot be solved are missing and say why
    */
-  public List<MoveAdvice> advise(List<BenchString> strings, Aim aim) {
+  public InstrumentAdvice advise(List<BenchString> strings, AimChoice aim) {
+    List<MoveAdvice> advice =
+        each(strings, aim.kind() == AimChoice.Kind.OCTAVE ? Aim.OCTAVE : Aim.NECK);
+    List<FindingReport> findings =
+        advice.stream().flatMap(one -> one.findings().stream()).distinct().toList();
+    return new InstrumentAdvice(advice, findings, null);
+  }
+
+  private List<MoveAdvice> each(List<BenchString> strings, Aim aim) {
     List<MoveTask> tasks = strings.stream().map(s -> AcousticString.task(s, aim)).toList();
     boolean nutAsOne =
         aim == Aim.NECK && strings.stream().anyMatch(s -> s.room().nut() == NutMovable.WHOLE);
@@ -64,10 +70,7 @@ public final class MoveAdvisor {
 
   private MoveAdvice advice(BenchString string, MoveTask task, Outcome<MoveEstimate> outcome) {
     MoveNotes notes = new MoveNotes(string);
-    Set<Finding> findings = EnumSet.noneOf(Finding.class);
-    if (notes.wildTries()) {
-      findings.add(Finding.READING);
-    }
+    List<FindingReport> findings = notes.wildTries();
     Verdict verdict = Verdict.LEAVE;
     MoveFigures figures = null;
     if (outcome instanceof Solved<MoveEstimate> solved) {
@@ -78,7 +81,7 @@ public final class MoveAdvisor {
       notes.notSolved(not.because());
     }
     notes.strain(AcousticString.shareOfBreaking(string.string()), breakingShare);
-    return new MoveAdvice(string, figures, verdict, findings, notes.all());
+    return new MoveAdvice(string, figures, verdict, List.of(), findings, notes.all());
   }
 
   private static MoveFigures figures(BenchString string, MoveEstimate estimate) {

@@ -32,23 +32,30 @@ final class MoveNotes {
   }
 
   /** Names each try that lies apart from the others. */
-  boolean wildTries() {
-    boolean found = false;
+  List<FindingReport> wildTries() {
+    List<FindingReport> found = new ArrayList<>();
     for (Map.Entry<Integer, Tries> entry : string.readings().frets().entrySet()) {
       Tries tries = entry.getValue();
       OptionalInt wild = AcousticString.spread(tries, string.readings()).wildTry();
       if (wild.isPresent()) {
         var one = tries.cents().get(wild.getAsInt());
-        notes.add(
+        Message said =
             Message.of(
                 "move.wild-try",
                 Integer.toString(wild.getAsInt() + 1),
                 Integer.toString(entry.getKey()),
-                Figures.fixed(one.value(), one.decimals())));
-        found = true;
+                Figures.fixed(one.value(), one.decimals()));
+        notes.add(said);
+        found.add(reading(entry.getKey(), said));
       }
     }
     return found;
+  }
+
+  private FindingReport reading(int fret, Message evidence) {
+    int number = string.string().number();
+    Message again = Message.of("finding.reading.do");
+    return new FindingReport(Finding.READING, number, fret, false, 0, evidence, again, null);
   }
 
   void notSolved(String because) {

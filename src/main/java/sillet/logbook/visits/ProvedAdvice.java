@@ -1,13 +1,13 @@
 package sillet.logbook.visits;
 
 import java.util.ArrayList;
-import java.util.EnumSet;
 import java.util.List;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import sillet.acoustics.moves.PassProof;
 import sillet.acoustics.moves.SecondPass;
 import sillet.logbook.moves.Finding;
+import sillet.logbook.moves.FindingReport;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.moves.MoveFigures;
@@ -72,14 +72,14 @@ record ProvedAdvice(@Nullable MoveAdvice advice, @Nullable MoveProof proof) {
             now.string().room().screwMm());
     Verdict verdict =
         proof.withinOneCent() ? Verdict.LEAVE : MoveAdvisor.verdict(now.string(), next);
-    Set<Finding> findings = EnumSet.noneOf(Finding.class);
-    findings.addAll(now.findings());
+    List<FindingReport> findings = new ArrayList<>(now.findings());
     List<Message> notes = new ArrayList<>();
     String before = Figures.signed(said.centsBefore(), 1);
     String after = Figures.signed(said.centsNow(), 1);
     if (!said.asPredicted()) {
-      findings.add(Finding.READING);
-      notes.add(Message.of("move.not-as-predicted", before, after));
+      Message evidence = Message.of("move.not-as-predicted", before, after);
+      findings.add(strange(now, evidence));
+      notes.add(evidence);
     }
     now.notes().stream().filter(note -> STANDING.contains(note.key())).forEach(notes::add);
     if (said.withinOneCent()) {
@@ -87,6 +87,12 @@ record ProvedAdvice(@Nullable MoveAdvice advice, @Nullable MoveProof proof) {
     } else {
       notes.addAll(MoveAdvisor.notes(now.string(), next, verdict));
     }
-    return new MoveAdvice(now.string(), next, verdict, findings, notes);
+    return new MoveAdvice(now.string(), next, verdict, now.neck(), findings, notes);
+  }
+
+  private static FindingReport strange(MoveAdvice now, Message evidence) {
+    int number = now.string().string().number();
+    Message again = Message.of("finding.reading.do");
+    return new FindingReport(Finding.READING, number, null, false, 0, evidence, again, null);
   }
 }

@@ -5,9 +5,9 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Aim;
-import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.moves.BenchString;
+import sillet.logbook.moves.FindingReport;
+import sillet.logbook.moves.InstrumentAdvice;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.moves.MoveFigures;
@@ -31,13 +31,26 @@ public final class VisitMoves {
   }
 
   /**
-   * Reckons a visit, fret 12 to become true.
+   * Reckons a visit by itself, for what was chosen to become true.
    *
    * @param record everything the logbook holds of it
    * @param advisor with the shop's own limits
    * @return the passes in order, at least one; in each the strings in order, string 1 first
    */
   public static List<List<StringPass>> of(VisitRecord record, MoveAdvisor advisor) {
+    return passes(record, InstrumentPast.NONE, advisor).stream().map(VisitPass::strings).toList();
+  }
+
+  /**
+   * Reckons a visit with what earlier ones have taught of the instrument.
+   *
+   * @param record everything the logbook holds of it
+   * @param past what came before
+   * @param advisor with the shop's own limits
+   * @return the passes in order, at least one
+   */
+  public static List<VisitPass> passes(
+      VisitRecord record, InstrumentPast past, MoveAdvisor advisor) {
     return new VisitMoves(record, advisor).passes();
   }
 
@@ -51,18 +64,35 @@ public final class VisitMoves {
     return new PassReadings(record.readings()).fretsRead();
   }
 
-  private List<List<StringPass>> passes() {
-    List<List<StringPass>> passes = new ArrayList<>();
+  private List<VisitPass> passes() {
+    List<VisitPass> passes = new ArrayList<>();
     int last = readings.lastPass(record.moves());
     for (int pass = 1; pass <= last; pass++) {
-      passes.add(strings(pass, passes.isEmpty() ? null : passes.get(passes.size() - 1)));
+      passes.add(pass(pass, passes.isEmpty() ? null : passes.get(passes.size() - 1).strings()));
     }
     return passes;
   }
 
-  private List<StringPass> strings(int pass, @Nullable List<StringPass> before) {
+  private VisitPass pass(int pass, @Nullable List<StringPass> before) {
     List<BenchString> bench = bench(pass);
-    Map<Integer, MoveAdvice> advice = advice(bench);
+    List<BenchString> read = bench.stream().filter(s -> !s.readings().frets().isEmpty()).toList();
+    InstrumentAdvice advice = advisor.advise(read, record.aim().aim());
+    List<StringPass> strings = strings(pass, bench, byNumber(advice), before);
+    List<FindingReport> found = new ArrayList<>(advice.findings());
+    for (StringPass string : strings) {
+      MoveAdvice said = string.advice();
+      if (said != null) {
+        said.findings().stream().filter(f -> !found.contains(f)).forEach(found::add);
+      }
+    }
+    return new VisitPass(strings, found, advice.bridge());
+  }
+
+  private List<StringPass> strings(
+      int pass,
+      List<BenchString> bench,
+      Map<Integer, MoveAdvice> advice,
+      @Nullable List<StringPass> before) {
     List<StringPass> result = new ArrayList<>();
     for (int i = 0; i < bench.size(); i++) {
       BenchString string = bench.get(i);
@@ -76,10 +106,9 @@ public final class VisitMoves {
     return result;
   }
 
-  private Map<Integer, MoveAdvice> advice(List<BenchString> bench) {
-    List<BenchString> read = bench.stream().filter(s -> !s.readings().frets().isEmpty()).toList();
+  private static Map<Integer, MoveAdvice> byNumber(InstrumentAdvice advice) {
     Map<Integer, MoveAdvice> result = new HashMap<>();
-    for (MoveAdvice one : advisor.advise(read, Aim.OCTAVE)) {
+    for (MoveAdvice one : advice.strings()) {
       result.put(one.string().string().number(), one);
     }
     return result;
@@ -110,7 +139,7 @@ public final class VisitMoves {
       }
     }
     var saddle = record.instrument().saddle();
-    boolean onePiece = saddle.kind() == SaddleKind.ONE_PIECE;
+    NutMovable nut = record.aim().nut();
     Double screw = saddle.screwPitchMm();
     for (Travel travel : record.visit().travel()) {
       if (travel.string() == string) {
@@ -118,11 +147,12 @@ public final class VisitMoves {
             screw,
             shifted(travel.backMm(), -movedMm),
             shifted(travel.forwardMm(), movedMm),
-            onePiece,
-            NutMovable.NO);
+            saddle.kind(),
+            saddle.thicknessMm(),
+            nut);
       }
     }
-    return new SaddleRoom(screw, null, null, onePiece, NutMovable.NO);
+    return new SaddleRoom(screw, null, null, saddle.kind(), saddle.thicknessMm(), nut);
   }
 
   private static @Nullable Double shifted(@Nullable Double room, double byMm) {

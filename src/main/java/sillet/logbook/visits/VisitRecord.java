@@ -16,6 +16,7 @@ import sillet.logbook.shop.Customer;
  * @param moves in the order they were made
  * @param work in the order it was done
  * @param notes in the order they were written
+ * @param aim what shall become true, and whether the nut can move
  */
 public record VisitRecord(
     Visit visit,
@@ -25,7 +26,8 @@ public record VisitRecord(
     List<Reading> readings,
     List<MadeMove> moves,
     List<WorkLine> work,
-    List<VisitNote> notes) {
+    List<VisitNote> notes,
+    VisitAim aim) {
 
   /** Copies the lists. */
   public VisitRecord {

@@ -41,7 +41,8 @@ final class BenchCells {
     Double forwardMm = cells.notBelowZero(Columns.ROOM_FORWARD);
     NutMovable nut = word(cells, Columns.NUT_MOVABLE, NutMovable.values(), NutMovable::word);
     // a sheet has no column for the kind of saddle, so no saddle counts as one piece
-    return new SaddleRoom(screwMm, backMm, forwardMm, false, nut == null ? NutMovable.NO : nut);
+    return new SaddleRoom(
+        screwMm, backMm, forwardMm, null, null, nut == null ? NutMovable.NO : nut);
   }
 
   /** One of the words a column knows, in any case of letters; null if blank or refused. */

@@ -3,7 +3,7 @@ package sillet.sheets.moves;
 import java.util.Comparator;
 import java.util.stream.Collectors;
 import sillet.logbook.moves.Direction;
-import sillet.logbook.moves.Finding;
+import sillet.logbook.moves.FindingReport;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.text.Texts;
 import sillet.logbook.units.Figures;
@@ -31,8 +31,9 @@ public final class AdviceCells {
   /** Causes, in an order that never changes. */
   public static String findings(MoveAdvice advice) {
     return advice.findings().stream()
-        .sorted(Comparator.naturalOrder())
-        .map(Finding::word)
+        .sorted(Comparator.comparing(FindingReport::kind))
+        .map(FindingReport::word)
+        .distinct()
         .collect(Collectors.joining(";"));
   }
 

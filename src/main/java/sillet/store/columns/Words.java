@@ -10,6 +10,7 @@ import sillet.acoustics.wire.Construction;
 import sillet.logbook.instruments.InstrumentKind;
 import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.instruments.ScrewSense;
+import sillet.logbook.moves.NutMovable;
 import sillet.logbook.strings.ConstructionWords;
 import sillet.logbook.units.LengthUnit;
 import sillet.logbook.visits.CheckKind;
@@ -29,6 +30,7 @@ public final class Words<E extends Enum<E>> {
           new Words<>(InstrumentKind.class, InstrumentKind::word),
           new Words<>(SaddleKind.class, SaddleKind::word),
           new Words<>(ScrewSense.class, ScrewSense::word),
+          new Words<>(NutMovable.class, NutMovable::word),
           new Words<>(LengthUnit.class, LengthUnit::word),
           new Words<>(Construction.class, ConstructionWords::of),
           new Words<>(CheckKind.class, CheckKind::word),

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
 import org.jdbi.v3.core.Handle;
+import sillet.logbook.visits.InstrumentPast;
 import sillet.logbook.visits.Visit;
 import sillet.logbook.visits.VisitRecord;
 import sillet.store.columns.Row;
@@ -90,6 +91,22 @@ public final class VisitQueries {
   }
 
   /**
+   * What is known of an instrument from before a visit.
+   *
+   * @param record the visit
+   * @return the visits of the same instrument with a lower ticket, and from when on they teach
+   */
+  public InstrumentPast past(VisitRecord record) {
+    UUID instrument = record.visit().instrumentId();
+    List<VisitRecord> earlier =
+        records("WHERE v.instrument_id = :asked ORDER BY v.taken_in, v.ticket", instrument).stream()
+            .filter(one -> one.visit().ticket() < record.visit().ticket())
+            .toList();
+    return new InstrumentPast(
+        earlier, session.read(handle -> AimRows.learnedFrom(handle, instrument)));
+  }
+
+  /**
    * The number for the next visit.
    *
    * @return one more than the highest there is, from 1
@@ -123,6 +140,7 @@ public final class VisitQueries {
         BenchRows.readings(handle, visit.id()),
         BenchRows.moves(handle, visit.id()),
         BenchRows.work(handle, visit.id()),
-        BenchRows.notes(handle, visit.id()));
+        BenchRows.notes(handle, visit.id()),
+        AimRows.of(handle, visit.id()));
   }
 }

@@ -9,6 +9,8 @@ import java.util.Map;
 import sillet.logbook.actions.Action;
 import sillet.logbook.actions.AddCustomer;
 import sillet.logbook.actions.AddInstrument;
+import sillet.logbook.actions.ChooseAim;
+import sillet.logbook.actions.ForgetLearned;
 import sillet.logbook.actions.HandOut;
 import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
@@ -45,6 +47,8 @@ public final class ActionForms {
           new Form("record moves", 1, RecordMoves.class),
           new Form("log work", 1, LogWork.class),
           new Form("write note", 1, WriteNote.class),
+          new Form("choose aim", 1, ChooseAim.class),
+          new Form("forget learned", 1, ForgetLearned.class),
           new Form("hand out", 1, HandOut.class));
 
   private final Gson gson = ActionJson.gson();

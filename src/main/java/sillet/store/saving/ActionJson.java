@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.util.function.Function;
+import sillet.logbook.moves.AimChoice;
 import sillet.store.columns.Words;
 
 /**
@@ -27,6 +28,8 @@ final class ActionJson {
                 LocalDate.class, new AsText<>(LocalDate::toString, LocalDate::parse).nullSafe())
             .registerTypeAdapter(
                 Instant.class, new AsText<>(Instant::toString, Instant::parse).nullSafe());
+    builder.registerTypeAdapter(
+        AimChoice.class, new AsText<>(AimChoice::word, AimChoice::parse).nullSafe());
     Words.all().forEach(words -> register(builder, words));
     return builder.create();
   }

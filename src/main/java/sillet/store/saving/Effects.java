@@ -3,6 +3,8 @@ package sillet.store.saving;
 import sillet.logbook.actions.Action;
 import sillet.logbook.actions.AddCustomer;
 import sillet.logbook.actions.AddInstrument;
+import sillet.logbook.actions.ChooseAim;
+import sillet.logbook.actions.ForgetLearned;
 import sillet.logbook.actions.HandOut;
 import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
@@ -56,6 +58,10 @@ final class Effects {
       BenchEffects.work(change, a.visitId(), a.line());
     } else if (action instanceof WriteNote a) {
       BenchEffects.note(change, a.visitId(), a.note());
+    } else if (action instanceof ChooseAim a) {
+      LearningEffects.aim(change, a.visitId(), a.aim());
+    } else if (action instanceof ForgetLearned a) {
+      LearningEffects.reset(change, a.instrumentId(), a.from());
     } else {
       throw new IllegalArgumentException("no effect known for " + action.name());
     }

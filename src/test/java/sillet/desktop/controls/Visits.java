@@ -24,6 +24,7 @@ import sillet.logbook.visits.MadeMove;
 import sillet.logbook.visits.Reading;
 import sillet.logbook.visits.StringsOn;
 import sillet.logbook.visits.Visit;
+import sillet.logbook.visits.VisitAim;
 import sillet.logbook.visits.VisitNote;
 import sillet.logbook.visits.VisitRecord;
 
@@ -110,6 +111,7 @@ public final class Visits {
             new StringsOn("", null, "", 440, strings),
             List.of(),
             null);
-    return new VisitRecord(visit, instrument, null, checks, readings, moves, List.of(), notes);
+    return new VisitRecord(
+        visit, instrument, null, checks, readings, moves, List.of(), notes, VisitAim.USUAL);
   }
 }

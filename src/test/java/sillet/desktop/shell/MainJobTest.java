@@ -15,9 +15,10 @@ import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import sillet.acoustics.moves.Aim;
 import sillet.acoustics.wire.Construction;
 import sillet.desktop.drawing.Picture;
+import sillet.logbook.instruments.SaddleKind;
+import sillet.logbook.moves.AimChoice;
 import sillet.logbook.moves.BenchString;
 import sillet.logbook.moves.Heights;
 import sillet.logbook.moves.MoveAdvice;
@@ -145,7 +146,8 @@ class MainJobTest {
 
   /** What the window says is what the advisor says of the same strings on their own. */
   private static void movesAppear(TestWindow window) {
-    List<MoveAdvice> advice = new MoveAdvisor(75).advise(benchStrings(), Aim.OCTAVE);
+    List<MoveAdvice> advice =
+        new MoveAdvisor(75).advise(benchStrings(), AimChoice.OCTAVE).strings();
     List<String> said = window.texts();
     for (MoveAdvice one : advice) {
       double mm = one.figures().saddleMm();
@@ -165,7 +167,7 @@ class MainJobTest {
               "one",
               new FittedString(i + 1, Pitch.parse(PITCHES.get(i), 440), 648, make),
               Heights.NOT_KNOWN,
-              new SaddleRoom(0.5, null, null, false, NutMovable.NO),
+              new SaddleRoom(0.5, null, null, SaddleKind.SCREW, null, NutMovable.NO),
               NoteReadings.of(Map.of(12, Tries.parse(FIRST.get(i))))));
     }
     return strings;

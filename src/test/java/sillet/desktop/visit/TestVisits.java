@@ -16,6 +16,7 @@ import sillet.logbook.visits.Reading;
 import sillet.logbook.visits.StringsOn;
 import sillet.logbook.visits.Travel;
 import sillet.logbook.visits.Visit;
+import sillet.logbook.visits.VisitAim;
 import sillet.logbook.visits.VisitRecord;
 
 /** Records of an invented visit without a logbook, for models. */
@@ -49,7 +50,15 @@ public final class TestVisits {
             null);
     Customer customer = null;
     return new VisitRecord(
-        visit, instrument, customer, List.of(), List.of(), List.of(), List.of(), List.of());
+        visit,
+        instrument,
+        customer,
+        List.of(),
+        List.of(),
+        List.of(),
+        List.of(),
+        List.of(),
+        VisitAim.USUAL);
   }
 
   /** The record with more readings at fret 12, string 1 first; a blank is not read. */
@@ -69,7 +78,8 @@ public final class TestVisits {
         readings,
         record.moves(),
         record.work(),
-        record.notes());
+        record.notes(),
+        record.aim());
   }
 
   /** The record with moves made after a pass. */
@@ -84,7 +94,8 @@ public final class TestVisits {
         record.readings(),
         moves,
         record.work(),
-        record.notes());
+        record.notes(),
+        record.aim());
   }
 
   /** The record with checks. */
@@ -97,6 +108,7 @@ public final class TestVisits {
         record.readings(),
         record.moves(),
         record.work(),
-        record.notes());
+        record.notes(),
+        record.aim());
   }
 }

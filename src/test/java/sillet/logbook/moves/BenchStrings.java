@@ -3,6 +3,7 @@ package sillet.logbook.moves;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import sillet.acoustics.wire.Construction;
+import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.strings.FittedString;
 import sillet.logbook.strings.StringMake;
 import sillet.logbook.units.Pitch;
@@ -32,7 +33,12 @@ final class BenchStrings {
 
   static SaddleRoom room(@Nullable Double backMm, @Nullable Double forwardMm, boolean onePiece) {
     return new SaddleRoom(
-        onePiece ? null : M3_PITCH_MM, backMm, forwardMm, onePiece, NutMovable.NO);
+        onePiece ? null : M3_PITCH_MM,
+        backMm,
+        forwardMm,
+        onePiece ? SaddleKind.ONE_PIECE : SaddleKind.SCREW,
+        null,
+        NutMovable.NO);
   }
 
   static BenchString string(

@@ -8,7 +8,6 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
-import sillet.acoustics.moves.Aim;
 import sillet.acoustics.readings.Reference;
 import sillet.acoustics.wire.Construction;
 import sillet.logbook.text.Message;
@@ -96,7 +95,7 @@ class MoveAdvisorTest {
   @Test
   void namesAWildTry() {
     MoveAdvice advice = advise(BenchStrings.plain10("5.0 5.1 4.9 15.0"));
-    assertThat(advice.findings()).containsExactly(Finding.READING);
+    assertThat(advice.findings()).extracting(FindingReport::kind).containsExactly(Finding.READING);
     assertThat(advice.notes().get(0)).isEqualTo(Message.of("move.wild-try", "4", "12", "15.0"));
   }
 
@@ -130,7 +129,7 @@ class MoveAdvisorTest {
   }
 
   private MoveAdvice advise(BenchString string) {
-    return advisor.advise(List.of(string), Aim.OCTAVE).get(0);
+    return advisor.advise(List.of(string), AimChoice.OCTAVE).strings().get(0);
   }
 
   private MoveFigures figures(BenchString string) {

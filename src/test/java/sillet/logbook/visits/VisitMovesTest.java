@@ -20,6 +20,7 @@ import sillet.logbook.instruments.Saddle;
 import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.instruments.ScrewSense;
 import sillet.logbook.moves.Finding;
+import sillet.logbook.moves.FindingReport;
 import sillet.logbook.moves.Heights;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveAdvisor;
@@ -99,7 +100,7 @@ class VisitMovesTest {
     read(2, "6.0");
     StringPass second = reckon().get(1).get(0);
     MoveAdvice advice = Objects.requireNonNull(second.advice());
-    assertThat(advice.findings()).containsExactly(Finding.READING);
+    assertThat(advice.findings()).extracting(FindingReport::kind).containsExactly(Finding.READING);
     assertThat(advice.notes().get(0))
         .isEqualTo(Message.of("move.not-as-predicted", "+8.0", "+6.0"));
   }
@@ -189,7 +190,8 @@ class VisitMovesTest {
             List.of(new Travel(1, 4.0, 2.0)),
             null);
     VisitRecord record =
-        new VisitRecord(visit, instrument, null, checks, readings, moves, List.of(), List.of());
+        new VisitRecord(
+            visit, instrument, null, checks, readings, moves, List.of(), List.of(), VisitAim.USUAL);
     return VisitMoves.of(record, new MoveAdvisor(75));
   }
 

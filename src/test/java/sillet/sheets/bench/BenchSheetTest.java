@@ -42,7 +42,8 @@ class BenchSheetTest {
     assertThat(string.string().make())
         .isEqualTo(new StringMake(0.105, Construction.WOUND_NICKEL, 0.045, 38.2));
     assertThat(string.heights()).isEqualTo(new Heights(2.4, 0.6, 0.35));
-    assertThat(string.room()).isEqualTo(new SaddleRoom(0.7, 6.0, 2.5, false, NutMovable.WHOLE));
+    assertThat(string.room())
+        .isEqualTo(new SaddleRoom(0.7, 6.0, 2.5, null, null, NutMovable.WHOLE));
     assertThat(string.readings().against()).isEqualTo(Reference.HARMONIC);
     assertThat(string.readings().sdCents()).isEqualTo(0.4);
     assertThat(string.readings().open().values()).containsExactly(-0.5);

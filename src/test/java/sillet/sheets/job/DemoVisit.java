@@ -30,6 +30,7 @@ import sillet.logbook.visits.StringPass;
 import sillet.logbook.visits.StringsOn;
 import sillet.logbook.visits.Travel;
 import sillet.logbook.visits.Visit;
+import sillet.logbook.visits.VisitAim;
 import sillet.logbook.visits.VisitMoves;
 import sillet.logbook.visits.VisitRecord;
 
@@ -95,7 +96,8 @@ public final class DemoVisit {
         readings,
         moves,
         List.of(),
-        List.of());
+        List.of(),
+        VisitAim.USUAL);
   }
 
   public List<List<StringPass>> passes() {

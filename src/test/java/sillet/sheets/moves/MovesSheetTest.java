@@ -6,11 +6,11 @@ import java.io.IOException;
 import java.io.StringWriter;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import org.junit.jupiter.api.Test;
 import sillet.acoustics.wire.Construction;
 import sillet.logbook.moves.BenchString;
 import sillet.logbook.moves.Finding;
+import sillet.logbook.moves.FindingReport;
 import sillet.logbook.moves.Heights;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveFigures;
@@ -25,6 +25,16 @@ import sillet.logbook.units.Pitch;
 import sillet.logbook.units.Tries;
 
 class MovesSheetTest {
+  private static final FindingReport READ_AGAIN =
+      new FindingReport(
+          Finding.READING,
+          1,
+          12,
+          false,
+          0,
+          Message.of("move.leave"),
+          Message.of("finding.reading.do"),
+          null);
   private static final String HEADER =
       "instrument,string,saddle_move_mm,saddle_low_mm,saddle_high_mm,turns,direction,nut_move_mm,"
           + "cents12_before,cents12_after,rms_before,rms_after,verdict,findings,note\n";
@@ -32,8 +42,7 @@ class MovesSheetTest {
   @Test
   void writesARowAsTheContractSays() throws IOException {
     assertThat(
-            written(
-                advice("Demo", figures(1.86, 3.72, null), Verdict.MOVE, Set.of(Finding.READING))))
+            written(advice("Demo", figures(1.86, 3.72, null), Verdict.MOVE, List.of(READ_AGAIN))))
         .isEqualTo(
             HEADER
                 + "Demo,1,1.860,1.660,2.060,3.72,away from neck,,5.00,0.01,2.50,0.50,move,reading,"
@@ -42,23 +51,23 @@ class MovesSheetTest {
 
   @Test
   void saysTheWayInWordsAndNeverAMinusZero() throws IOException {
-    assertThat(written(advice("Demo", figures(-0.42, null, -0.0), Verdict.LEAVE, Set.of())))
+    assertThat(written(advice("Demo", figures(-0.42, null, -0.0), Verdict.LEAVE, List.of())))
         .contains("Demo,1,-0.420,-0.620,-0.220,,toward neck,0.000,");
-    assertThat(written(advice("Demo", figures(-0.0004, 0.0, null), Verdict.LEAVE, Set.of())))
+    assertThat(written(advice("Demo", figures(-0.0004, 0.0, null), Verdict.LEAVE, List.of())))
         .contains("Demo,1,0.000,-0.200,0.200,0.00,stay,,");
   }
 
   @Test
   void leavesBlankWhatCouldNotBeSolved() throws IOException {
-    assertThat(written(advice("Demo", null, Verdict.LEAVE, Set.of())))
+    assertThat(written(advice("Demo", null, Verdict.LEAVE, List.of())))
         .isEqualTo(HEADER + "Demo,1,,,,,,,,,,,leave,,Leave it: less than the reading can tell.\n");
   }
 
   @Test
   void keepsHostileNamesOnOneLineAndHarmless() throws IOException {
-    assertThat(written(advice("=cmd|' /C calc'!A0", null, Verdict.LEAVE, Set.of())))
+    assertThat(written(advice("=cmd|' /C calc'!A0", null, Verdict.LEAVE, List.of())))
         .contains("\n'=cmd|' /C calc'!A0,1,");
-    assertThat(written(advice("two\nlines, \"so\"", null, Verdict.LEAVE, Set.of())))
+    assertThat(written(advice("two\nlines, \"so\"", null, Verdict.LEAVE, List.of())))
         .contains("\n\"two lines, \"\"so\"\"\",1,");
   }
 
@@ -85,7 +94,7 @@ class MovesSheetTest {
   }
 
   private static MoveAdvice advice(
-      String instrument, MoveFigures figures, Verdict verdict, Set<Finding> findings) {
+      String instrument, MoveFigures figures, Verdict verdict, List<FindingReport> findings) {
     FittedString fitted =
         new FittedString(
             1,
@@ -99,6 +108,7 @@ class MovesSheetTest {
             Heights.NOT_KNOWN,
             SaddleRoom.NOT_KNOWN,
             NoteReadings.of(Map.of(12, Tries.parse("5.0"))));
-    return new MoveAdvice(string, figures, verdict, findings, List.of(Message.of("move.leave")));
+    return new MoveAdvice(
+        string, figures, verdict, List.of(), findings, List.of(Message.of("move.leave")));
   }
 }

@@ -64,6 +64,7 @@ class ActionFormsTest {
       assertThat(record.checks()).isEqualTo(BenchDay.checks());
       assertThat(record.moves()).isEqualTo(BenchDay.moves());
       assertThat(record.work()).containsExactly(BenchDay.work());
+      assertThat(record.aim()).isEqualTo(BenchDay.aim());
       assertThat(record.notes()).containsExactly(BenchDay.note());
     }
   }

@@ -10,6 +10,7 @@ import sillet.desktop.visit.TestDesk;
 import sillet.desktop.visit.TestVisits;
 import sillet.logbook.text.Texts;
 import sillet.logbook.visits.NoteKind;
+import sillet.logbook.visits.VisitAim;
 import sillet.logbook.visits.VisitNote;
 import sillet.logbook.visits.VisitRecord;
 import sillet.logbook.visits.WorkLine;
@@ -48,7 +49,8 @@ class LogModelTest {
             List.of(),
             List.of(),
             List.of(before, today),
-            List.of()));
+            List.of(),
+            VisitAim.USUAL));
     assertThat(model.work())
         .containsExactly(
             new WrittenLine("29 Nov", "", "Looked at"),
