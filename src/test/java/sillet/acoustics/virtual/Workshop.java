@@ -69,7 +69,7 @@ public final class Workshop {
     for (int i = 0; i < usual.size(); i++) {
       WireMill.Drawn drawn =
           mill.redraw(usual.get(i), tuned.get(i), old.kind(), old.neck().scale());
-      double higherAtSaddle = 2 * (change.higherAtTwelve() + luck.normal(0, 5e-5));
+      double higherAtSaddle = 2 * (change.higherAtTwelve() + luck.normal(0, 8e-5));
       VirtualString string =
           old.strings().get(i).string().restrung(drawn.wire(), tuned.get(i).hz(), higherAtSaddle);
       strings.add(new VirtualInstrument.Course(tuned.get(i), drawn, string));
