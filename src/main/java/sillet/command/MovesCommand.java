@@ -3,6 +3,7 @@ package sillet.command;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -11,10 +12,13 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
+import sillet.logbook.moves.BenchString;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.text.Message;
 import sillet.sheets.bench.BenchSheet;
+import sillet.sheets.bench.SheetString;
+import sillet.sheets.bench.SheetUse;
 import sillet.sheets.csv.Remark;
 import sillet.sheets.csv.Remarks;
 import sillet.sheets.csv.WholeFile;
@@ -43,7 +47,7 @@ final class MovesCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
-    try (BenchSheet sheet = BenchSheet.open(file)) {
+    try (BenchSheet sheet = BenchSheet.open(file, SheetUse.MOVES)) {
       warn(sheet.warnings());
       Path target = out;
       if (target == null) {
@@ -64,7 +68,12 @@ final class MovesCommand implements Callable<Integer> {
 
   private void moves(BenchSheet sheet, MovesSheet moves) throws IOException {
     MoveAdvisor advisor = new MoveAdvisor(Shop.USUAL_BREAKING_SHARE_PERCENT);
-    sheet.inOrder(strings -> advisor.advise(strings, aim.choice()).strings(), moves::write);
+    sheet.inOrder(
+        rows -> {
+          List<BenchString> strings = rows.stream().map(SheetString::string).toList();
+          return advisor.advise(strings, aim.choice()).strings();
+        },
+        moves::write);
   }
 
   private void refuseInputAsOutput(Path target) throws IOException {

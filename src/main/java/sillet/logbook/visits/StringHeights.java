@@ -4,8 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.NavigableMap;
-import java.util.TreeMap;
-import java.util.function.Predicate;
 import org.jspecify.annotations.Nullable;
 import sillet.logbook.moves.Heights;
 
@@ -14,8 +12,6 @@ import sillet.logbook.moves.Heights;
  * those between lie on a line, as the strings follow the board.
  */
 final class StringHeights {
-  private static final int OCTAVE = 12;
-
   private final List<BenchCheck> checks;
 
   private StringHeights(List<BenchCheck> checks) {
@@ -38,23 +34,13 @@ final class StringHeights {
 
   Heights of(int string) {
     return new Heights(
-        along(string, CheckKind.ACTION, c -> open(c) && c.fret() == OCTAVE),
-        along(string, CheckKind.FIRST_FRET_CLEARANCE, StringHeights::open),
-        along(string, CheckKind.RELIEF, c -> c.method() == CheckMethod.STRAIGHTEDGE));
+        along(string, CheckKind.ACTION),
+        along(string, CheckKind.FIRST_FRET_CLEARANCE),
+        along(string, CheckKind.RELIEF));
   }
 
-  private static boolean open(BenchCheck check) {
-    return check.method() == CheckMethod.OPEN;
-  }
-
-  /**
-   * The newest check of each string counts; one made at another fret or otherwise tells nothing.
-   */
-  private @Nullable Double along(int string, CheckKind kind, Predicate<BenchCheck> comparable) {
-    NavigableMap<Integer, BenchCheck> newest = new TreeMap<>();
-    checks.stream().filter(c -> c.kind() == kind).forEach(c -> newest.put(c.string(), c));
-    NavigableMap<Integer, Double> measured = new TreeMap<>();
-    newest.values().stream().filter(comparable).forEach(c -> measured.put(c.string(), c.valueMm()));
+  private @Nullable Double along(int string, CheckKind kind) {
+    NavigableMap<Integer, Double> measured = MeasuredHeights.byString(checks, kind);
     Double whole = measured.remove(BenchCheck.WHOLE_NECK);
     return measured.isEmpty() ? whole : between(string, measured);
   }

@@ -1,6 +1,7 @@
 package sillet.sheets.bench;
 
 import org.jspecify.annotations.Nullable;
+import sillet.logbook.forecast.StringChange;
 import sillet.logbook.moves.BenchString;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Quoted;
@@ -13,9 +14,9 @@ import sillet.sheets.csv.Remarks;
  * @param line where it begins
  * @param instrument stands for its instrument, see {@link Fingerprint}
  * @param rank which of several rows of the same string counts: the highest
- * @param string what the row says
+ * @param said what the row says
  */
-record BenchRow(long line, long instrument, int rank, BenchString string) {
+record BenchRow(long line, long instrument, int rank, SheetString said) {
   private static final int LAST_PASS = 9999;
   private static final int BENCH_SHEET = 1;
 
@@ -28,22 +29,29 @@ record BenchRow(long line, long instrument, int rank, BenchString string) {
     var heights = BenchCells.heights(cells);
     var room = BenchCells.room(cells);
     var readings = NoteCells.read(cells);
+    StringChange change =
+        header.use() == SheetUse.FORECAST ? ChangeCells.read(cells, fitted) : null;
     int pass = header.isJobSheet() ? pass(cells) : BENCH_SHEET;
     if (cells.refused() || instrument == null || fitted == null) {
       return null;
     }
     BenchString string = new BenchString(instrument, fitted, heights, room, readings);
     int rank = header.isJobSheet() && readings.frets().isEmpty() ? 0 : pass;
-    return new BenchRow(cells.line(), instrument(cells), rank, string);
+    StringChange becomes = change == null ? StringChange.none(fitted.number()) : change;
+    return new BenchRow(cells.line(), instrument(cells), rank, new SheetString(string, becomes));
+  }
+
+  BenchString string() {
+    return said.string();
   }
 
   boolean isRead() {
-    return !string.readings().frets().isEmpty();
+    return !string().readings().frets().isEmpty();
   }
 
   /** Stands for the string on its instrument. */
   long stringOnInstrument() {
-    return Fingerprint.of(instrument, string.string().number());
+    return Fingerprint.of(instrument, string().string().number());
   }
 
   /** In a job sheet the same instrument can come back with another ticket. */

@@ -5,7 +5,6 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.function.Function;
-import sillet.logbook.moves.BenchString;
 import sillet.sheets.csv.Remarks;
 import sillet.sheets.csv.SheetFile;
 import sillet.sheets.csv.SheetRefused;
@@ -38,10 +37,10 @@ public final class BenchSheet implements Closeable {
    * @throws SheetRefused with everything that is wrong with it
    * @throws IOException if it could not be closed again
    */
-  public static BenchSheet open(Path path) throws IOException {
+  public static BenchSheet open(Path path, SheetUse use) throws IOException {
     SheetFile file = SheetFile.open(path);
     try {
-      return new BenchSheet(file, Survey.of(file));
+      return new BenchSheet(file, Survey.of(file, use));
     } catch (SheetRefused refused) {
       file.close();
       throw refused;
@@ -61,7 +60,7 @@ public final class BenchSheet implements Closeable {
    * @throws IOException whatever the taker throws
    * @throws SheetRefused if the file was changed meanwhile
    */
-  public <T> void inOrder(Function<List<BenchString>, List<T>> reckon, Taker<T> taker)
+  public <T> void inOrder(Function<List<SheetString>, List<T>> reckon, Taker<T> taker)
       throws IOException {
     new SecondLook<>(file, survey, reckon).handTo(taker);
   }

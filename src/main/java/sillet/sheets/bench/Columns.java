@@ -3,6 +3,7 @@ package sillet.sheets.bench;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
+import sillet.sheets.columns.JobColumns;
 
 /** The names of the columns a bench sheet can have. */
 final class Columns {
@@ -26,6 +27,13 @@ final class Columns {
   static final String ROOM_BACK = "room_back_mm";
   static final String ROOM_FORWARD = "room_forward_mm";
   static final String NUT_MOVABLE = "nut_movable";
+
+  static final String TO_PITCH = "to_pitch";
+  static final String TO_GAUGE = "to_gauge_in";
+  static final String TO_CONSTRUCTION = "to_construction";
+  static final String TO_CORE = "to_core_in";
+  static final String TO_UNIT_MASS = "to_unit_mass_g_m";
+  static final String TO_ACTION_12 = "to_action12_mm";
 
   /** Only a job sheet has it: which round of reading a row belongs to. */
   static final String PASS = "pass";
@@ -53,42 +61,7 @@ final class Columns {
 
   /** What a string will be; only a forecast reads it. */
   private static final List<String> FORECAST =
-      List.of(
-          "to_pitch",
-          "to_gauge_in",
-          "to_construction",
-          "to_core_in",
-          "to_unit_mass_g_m",
-          "to_action12_mm");
-
-  /** What a job sheet says beside the readings; nothing is reckoned from it again. */
-  private static final List<String> JOB_SHEET =
-      List.of(
-          TICKET,
-          "taken_in",
-          "handed_out",
-          "technician",
-          "customer",
-          SERIAL,
-          "set",
-          PASS,
-          "cents12",
-          "tries",
-          "saddle_move_mm",
-          "turns",
-          "direction",
-          "nut_move_mm",
-          "verdict",
-          "findings",
-          "cents12_predicted",
-          "cents12_left",
-          "action12_received_mm",
-          "action12_left_mm",
-          "relief_received_mm",
-          "relief_left_mm",
-          "humidity_pct",
-          "temperature_c",
-          "note");
+      List.of(TO_PITCH, TO_GAUGE, TO_CONSTRUCTION, TO_CORE, TO_UNIT_MASS, TO_ACTION_12);
 
   /** Every name there is. */
   static final List<String> KNOWN = known();
@@ -104,7 +77,8 @@ final class Columns {
     names.addAll(OPTIONAL);
     IntStream.rangeClosed(0, FRETS).mapToObj(Columns::fret).forEach(names::add);
     names.addAll(FORECAST);
-    names.addAll(JOB_SHEET);
+    // what a job sheet says beside the readings; nothing is reckoned from it again
+    JobColumns.ALL.stream().filter(name -> !names.contains(name)).forEach(names::add);
     return List.copyOf(names);
   }
 }

@@ -14,14 +14,16 @@ import sillet.sheets.csv.Remarks;
 final class Header {
   private final Map<String, Integer> places = new HashMap<>();
   private final CsvRow row;
+  private final SheetUse use;
 
-  private Header(CsvRow row) {
+  private Header(CsvRow row, SheetUse use) {
     this.row = row;
+    this.use = use;
   }
 
   /** Reads the header; what is wrong with it goes to the refusals, what is known can be used. */
-  static Header of(CsvRow row, Remarks refusals) {
-    Header header = new Header(row);
+  static Header of(CsvRow row, SheetUse use, Remarks refusals) {
+    Header header = new Header(row, use);
     if (header.isNone()) {
       String key = row.cell(0).indexOf('\t') < 0 ? "bench.no-header" : "bench.tabs";
       refusals.add(
@@ -36,7 +38,8 @@ final class Header {
         .filter(name -> !header.has(name))
         .forEach(
             name -> refusals.add(Place.line(row.line()), Message.of("bench.column-missing", name)));
-    if (IntStream.rangeClosed(1, Columns.FRETS).mapToObj(Columns::fret).noneMatch(header::has)) {
+    if (use == SheetUse.MOVES
+        && IntStream.rangeClosed(1, Columns.FRETS).mapToObj(Columns::fret).noneMatch(header::has)) {
       refusals.add(Place.line(row.line()), Message.of("bench.no-fret-column"));
     }
     return header;
@@ -64,6 +67,11 @@ final class Header {
   /** The place of a column in some line. */
   Place place(long line, String name) {
     return Place.cell(line, index(name) + 1L, written(index(name)));
+  }
+
+  /** What the sheet is read for. */
+  SheetUse use() {
+    return use;
   }
 
   boolean isJobSheet() {

@@ -11,13 +11,32 @@ import sillet.sheets.csv.Remarks;
 
 /** Keeps an eye on instruments: whose rows do not stand together, and which were never read. */
 final class Instruments {
+  private static final int FEWEST_TO_TELL = 3;
+  private static final int SKIPPED = 2;
+
   private final Set<Long> seen = new HashSet<>();
   private final Set<Long> scattered = new HashSet<>();
   private final Map<Long, Unread> unread = new HashMap<>();
+  private final Map<Long, Numbering> numbers = new HashMap<>();
   private long current;
   private boolean any;
 
   private record Unread(long line, String name) {}
+
+  /** How many strings an instrument has in the sheet, and the row of the highest number. */
+  private record Numbering(int strings, int highest, long line) {
+    Numbering with(BenchRow row) {
+      int number = row.string().string().number();
+      return number > highest
+          ? new Numbering(strings + 1, number, row.line())
+          : new Numbering(strings + 1, highest, line);
+    }
+
+    /** Outer strings alone are often read; a number far beyond all the others is a slip. */
+    boolean odd() {
+      return strings >= FEWEST_TO_TELL && highest > strings + SKIPPED;
+    }
+  }
 
   void take(BenchRow row) {
     if (!any || row.instrument() != current) {
@@ -32,6 +51,26 @@ final class Instruments {
     if (row.isRead()) {
       unread.remove(current);
     }
+  }
+
+  /** Counts a string that has not stood in the sheet before. */
+  void count(BenchRow row) {
+    Numbering before = numbers.getOrDefault(row.instrument(), new Numbering(0, 0, 0));
+    numbers.put(row.instrument(), before.with(row));
+  }
+
+  void warnOfOddNumbers(Remarks warnings, Header header) {
+    numbers.values().stream()
+        .filter(Numbering::odd)
+        .sorted(Comparator.comparingLong(Numbering::line))
+        .forEach(
+            one ->
+                warnings.add(
+                    header.place(one.line(), Columns.STRING),
+                    Message.of(
+                        "bench.string-odd",
+                        Integer.toString(one.highest()),
+                        Integer.toString(one.strings()))));
   }
 
   /** The instruments whose rows do not stand together. */

@@ -8,7 +8,6 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.Function;
-import sillet.logbook.moves.BenchString;
 import sillet.sheets.csv.CsvRow;
 import sillet.sheets.csv.CsvRows;
 import sillet.sheets.csv.Remarks;
@@ -20,8 +19,8 @@ import sillet.sheets.csv.Unreadable;
 final class SecondLook<T> {
   private final SheetFile file;
   private final Survey survey;
-  private final Function<List<BenchString>, List<T>> reckon;
-  private final List<BenchString> together = new ArrayList<>();
+  private final Function<List<SheetString>, List<T>> reckon;
+  private final List<SheetString> together = new ArrayList<>();
   private final Map<Long, Deque<T>> scattered = new HashMap<>();
 
   @FunctionalInterface
@@ -29,7 +28,7 @@ final class SecondLook<T> {
     void take(BenchRow row) throws IOException;
   }
 
-  SecondLook(SheetFile file, Survey survey, Function<List<BenchString>, List<T>> reckon) {
+  SecondLook(SheetFile file, Survey survey, Function<List<SheetString>, List<T>> reckon) {
     this.file = file;
     this.survey = survey;
     this.reckon = reckon;
@@ -48,7 +47,7 @@ final class SecondLook<T> {
           }
           Deque<T> gathered = scattered.get(row.instrument());
           if (gathered == null) {
-            together.add(row.string());
+            together.add(row.said());
           } else {
             taker.take(gathered.remove());
           }
@@ -57,11 +56,11 @@ final class SecondLook<T> {
   }
 
   private void gather() throws IOException {
-    Map<Long, List<BenchString>> held = new HashMap<>();
+    Map<Long, List<SheetString>> held = new HashMap<>();
     eachRow(
         row -> {
           if (survey.scattered().contains(row.instrument())) {
-            held.computeIfAbsent(row.instrument(), i -> new ArrayList<>()).add(row.string());
+            held.computeIfAbsent(row.instrument(), i -> new ArrayList<>()).add(row.said());
           }
         });
     held.forEach((instrument, strings) -> scattered.put(instrument, reckoned(strings)));
@@ -74,7 +73,7 @@ final class SecondLook<T> {
     together.clear();
   }
 
-  private Deque<T> reckoned(List<BenchString> strings) {
+  private Deque<T> reckoned(List<SheetString> strings) {
     if (strings.isEmpty()) {
       return new ArrayDeque<>();
     }
@@ -94,7 +93,7 @@ final class SecondLook<T> {
       if (first == null) {
         throw changed();
       }
-      Header header = Header.of(first, wrong);
+      Header header = Header.of(first, survey.use(), wrong);
       for (CsvRow row = rows.next(); row != null; row = rows.next()) {
         BenchRow read = BenchRow.read(row, header, wrong, unusual);
         if (read == null) {

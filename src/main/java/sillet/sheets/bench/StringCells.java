@@ -25,7 +25,7 @@ final class StringCells {
   /** The string, or null if something about it was refused. */
   static @Nullable FittedString read(Cells cells) {
     Integer number = number(cells);
-    Pitch pitch = pitch(cells);
+    Pitch pitch = pitch(cells, Columns.PITCH);
     Double scaleMm = required(cells, Columns.SCALE);
     StringMake make = make(cells);
     if (scaleMm != null) {
@@ -49,22 +49,22 @@ final class StringCells {
     return Integer.valueOf(text);
   }
 
-  private static @Nullable Pitch pitch(Cells cells) {
-    String text = cells.filled(Columns.PITCH);
+  static @Nullable Pitch pitch(Cells cells, String name) {
+    String text = cells.filled(name);
     if (text == null) {
       return null;
     }
     try {
       return Pitch.parse(text, Pitch.CONCERT_A4_HZ);
     } catch (Rejection rejection) {
-      cells.refuse(Columns.PITCH, rejection.reason());
+      cells.refuse(name, rejection.reason());
       return null;
     }
   }
 
   private static @Nullable StringMake make(Cells cells) {
     Double gaugeIn = required(cells, Columns.GAUGE);
-    Construction construction = construction(cells);
+    Construction construction = construction(cells, Columns.CONSTRUCTION);
     Double coreIn = cells.aboveZero(Columns.CORE);
     Double unitMass = cells.aboveZero(Columns.UNIT_MASS);
     if (gaugeIn != null) {
@@ -84,8 +84,8 @@ final class StringCells {
     }
   }
 
-  private static @Nullable Construction construction(Cells cells) {
-    String text = cells.filled(Columns.CONSTRUCTION);
+  static @Nullable Construction construction(Cells cells, String name) {
+    String text = cells.filled(name);
     if (text == null) {
       return null;
     }
@@ -95,7 +95,7 @@ final class StringCells {
           Arrays.stream(Construction.values())
               .map(ConstructionWords::of)
               .collect(Collectors.joining(", "));
-      cells.refuse(Columns.CONSTRUCTION, Message.of("bench.word-unknown", Quoted.of(text), words));
+      cells.refuse(name, Message.of("bench.word-unknown", Quoted.of(text), words));
     }
     return found;
   }

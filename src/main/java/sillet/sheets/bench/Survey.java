@@ -19,15 +19,19 @@ final class Survey {
   private final StringIndex strings = new StringIndex();
   private final Instruments instruments = new Instruments();
 
-  private Survey() {}
+  private final SheetUse use;
+
+  private Survey(SheetUse use) {
+    this.use = use;
+  }
 
   /**
    * Looks through a sheet.
    *
    * @throws SheetRefused with everything that is wrong
    */
-  static Survey of(SheetFile file) {
-    Survey survey = new Survey();
+  static Survey of(SheetFile file, SheetUse use) {
+    Survey survey = new Survey(use);
     try {
       survey.look(file.rows(survey.refusals));
     } catch (Unreadable unreadable) {
@@ -37,6 +41,10 @@ final class Survey {
       throw new SheetRefused(survey.refusals);
     }
     return survey;
+  }
+
+  SheetUse use() {
+    return use;
   }
 
   Remarks warnings() {
@@ -61,7 +69,7 @@ final class Survey {
       }
       return;
     }
-    Header header = Header.of(first, refusals);
+    Header header = Header.of(first, use, refusals);
     if (header.isNone()) {
       return;
     }
@@ -76,7 +84,8 @@ final class Survey {
     if (!any && !refusals.any()) {
       refusals.add(Place.line(first.line()), Message.of("bench.no-row"));
     }
-    if (!refusals.any()) {
+    instruments.warnOfOddNumbers(warnings, header);
+    if (use == SheetUse.MOVES && !refusals.any()) {
       instruments.refuseUnread(refusals, header);
     }
   }
@@ -87,6 +96,9 @@ final class Survey {
     long before = strings.line(key);
     int rank = before == 0 ? -1 : strings.rank(key);
     boolean bothUnread = row.rank() == 0 && rank == 0;
+    if (before == 0) {
+      instruments.count(row);
+    }
     if (row.rank() > rank || bothUnread) {
       strings.put(key, row.line(), row.rank());
     } else if (row.rank() == rank) {

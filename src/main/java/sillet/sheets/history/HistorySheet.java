@@ -7,13 +7,13 @@ import sillet.logbook.instruments.Instrument;
 import sillet.logbook.strings.FittedString;
 import sillet.logbook.visits.Arrival;
 import sillet.logbook.visits.BenchCheck;
+import sillet.logbook.visits.MeasuredHeights;
 import sillet.logbook.visits.Moment;
 import sillet.logbook.visits.StringPass;
 import sillet.logbook.visits.Visit;
 import sillet.logbook.visits.VisitRecord;
 import sillet.sheets.csv.CsvLine;
 import sillet.sheets.csv.CsvOut;
-import sillet.sheets.job.Checked;
 import sillet.sheets.job.StringPasses;
 import sillet.sheets.job.VisitCells;
 import sillet.sheets.moves.AdviceCells;
@@ -81,10 +81,10 @@ public final class HistorySheet {
         .figure(string.movedMm(), AdviceCells.MM_DECIMALS);
     List<BenchCheck> checks = record.checks();
     Arrival arrival = record.visit().arrival();
-    return line.measure(Checked.action12Mm(checks, number, Moment.RECEIVED))
-        .measure(Checked.action12Mm(checks, number, Moment.LEFT))
-        .measure(Checked.reliefMm(checks, number, Moment.RECEIVED))
-        .measure(Checked.reliefMm(checks, number, Moment.LEFT))
+    return line.measure(MeasuredHeights.action12Mm(checks, number, Moment.RECEIVED))
+        .measure(MeasuredHeights.action12Mm(checks, number, Moment.LEFT))
+        .measure(MeasuredHeights.reliefMm(checks, number, Moment.RECEIVED))
+        .measure(MeasuredHeights.reliefMm(checks, number, Moment.LEFT))
         .measure(arrival.humidityPct())
         .measure(arrival.temperatureC())
         .text(arrival.request());

@@ -10,9 +10,11 @@ import sillet.logbook.strings.FittedString;
 import sillet.logbook.text.Texts;
 import sillet.logbook.visits.Arrival;
 import sillet.logbook.visits.BenchCheck;
+import sillet.logbook.visits.MeasuredHeights;
 import sillet.logbook.visits.Moment;
 import sillet.logbook.visits.StringPass;
 import sillet.logbook.visits.VisitRecord;
+import sillet.sheets.columns.JobColumns;
 import sillet.sheets.csv.CsvLine;
 import sillet.sheets.csv.CsvOut;
 
@@ -21,42 +23,6 @@ import sillet.sheets.csv.CsvOut;
  * it; every string has a row for the first.
  */
 public final class JobSheet {
-  private static final List<String> COLUMNS =
-      List.of(
-          "ticket",
-          "taken_in",
-          "handed_out",
-          "technician",
-          "customer",
-          "instrument",
-          "serial",
-          "string",
-          "pitch",
-          "scale_mm",
-          "gauge_in",
-          "construction",
-          "set",
-          "pass",
-          "against",
-          "cents12",
-          "tries",
-          "sd_cents",
-          "saddle_move_mm",
-          "turns",
-          "direction",
-          "nut_move_mm",
-          "verdict",
-          "findings",
-          "cents12_predicted",
-          "cents12_left",
-          "action12_received_mm",
-          "action12_left_mm",
-          "relief_received_mm",
-          "relief_left_mm",
-          "humidity_pct",
-          "temperature_c",
-          "note");
-
   private final VisitRecord record;
   private final PassCells passCells;
   private final List<StringPasses> strings;
@@ -82,7 +48,7 @@ public final class JobSheet {
   }
 
   private void write(CsvOut out, int passes) throws IOException {
-    List<String> header = new ArrayList<>(COLUMNS);
+    List<String> header = new ArrayList<>(JobColumns.ALL);
     frets.forEach(fret -> header.add("f" + fret));
     out.header(header);
     for (int pass = 0; pass < passes; pass++) {
@@ -128,10 +94,10 @@ public final class JobSheet {
   private void checks(CsvLine line, int string) {
     List<BenchCheck> checks = record.checks();
     Arrival arrival = record.visit().arrival();
-    line.measure(Checked.action12Mm(checks, string, Moment.RECEIVED))
-        .measure(Checked.action12Mm(checks, string, Moment.LEFT))
-        .measure(Checked.reliefMm(checks, string, Moment.RECEIVED))
-        .measure(Checked.reliefMm(checks, string, Moment.LEFT))
+    line.measure(MeasuredHeights.action12Mm(checks, string, Moment.RECEIVED))
+        .measure(MeasuredHeights.action12Mm(checks, string, Moment.LEFT))
+        .measure(MeasuredHeights.reliefMm(checks, string, Moment.RECEIVED))
+        .measure(MeasuredHeights.reliefMm(checks, string, Moment.LEFT))
         .measure(arrival.humidityPct())
         .measure(arrival.temperatureC());
   }

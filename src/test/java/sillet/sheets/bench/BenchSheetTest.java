@@ -97,7 +97,7 @@ class BenchSheetTest {
   @Test
   void saysSoWhenTheSheetIsChangedMeanwhile() throws IOException {
     Path path = Sheets.write(folder, H + row("A", 1));
-    try (BenchSheet sheet = BenchSheet.open(path)) {
+    try (BenchSheet sheet = BenchSheet.open(path, SheetUse.MOVES)) {
       Files.writeString(path, H + "A,1,,,,,\n");
 
       assertThatThrownBy(() -> sheet.inOrder(one -> one, string -> {}))

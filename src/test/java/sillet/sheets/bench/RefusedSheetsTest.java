@@ -109,7 +109,7 @@ class RefusedSheetsTest {
     String bad = "Demo,0,E4,648,0.010,plain-steel,1\n";
     Path path = Sheets.write(folder, H + bad.repeat(Remarks.LISTED + 25));
 
-    assertThatThrownBy(() -> BenchSheet.open(path))
+    assertThatThrownBy(() -> BenchSheet.open(path, SheetUse.MOVES))
         .isInstanceOfSatisfying(
             SheetRefused.class,
             refused -> {
@@ -168,7 +168,7 @@ class RefusedSheetsTest {
 
   private static String refusedFor(Path path) throws IOException {
     try {
-      BenchSheet.open(path).close();
+      BenchSheet.open(path, SheetUse.MOVES).close();
       return "taken";
     } catch (SheetRefused refused) {
       return refused.reasons().get(0).message().key();

@@ -37,8 +37,8 @@ final class Sheets {
 
   static List<BenchString> read(Path folder, String sheet) throws IOException {
     List<BenchString> strings = new ArrayList<>();
-    try (BenchSheet bench = BenchSheet.open(write(folder, sheet))) {
-      bench.inOrder(one -> one, strings::add);
+    try (BenchSheet bench = BenchSheet.open(write(folder, sheet), SheetUse.MOVES)) {
+      bench.inOrder(one -> one, row -> strings.add(row.string()));
     }
     return strings;
   }
@@ -47,7 +47,7 @@ final class Sheets {
   static List<List<String>> groups(Path folder, String sheet, List<String> order)
       throws IOException {
     List<List<String>> groups = new ArrayList<>();
-    try (BenchSheet bench = BenchSheet.open(write(folder, sheet))) {
+    try (BenchSheet bench = BenchSheet.open(write(folder, sheet), SheetUse.MOVES)) {
       bench.inOrder(
           one -> {
             groups.add(one.stream().map(Sheets::name).toList());
@@ -58,14 +58,14 @@ final class Sheets {
     return groups;
   }
 
-  private static String name(BenchString string) {
-    return string.instrument() + string.string().number();
+  private static String name(SheetString row) {
+    return row.string().instrument() + row.string().string().number();
   }
 
   /** What a sheet is refused for; empty if it is taken. */
   static List<Remark> refusals(Path folder, String sheet) throws IOException {
     try {
-      BenchSheet.open(write(folder, sheet)).close();
+      BenchSheet.open(write(folder, sheet), SheetUse.MOVES).close();
       return List.of();
     } catch (SheetRefused refused) {
       return refused.reasons();
@@ -73,7 +73,7 @@ final class Sheets {
   }
 
   static List<Remark> warnings(Path folder, String sheet) throws IOException {
-    try (BenchSheet bench = BenchSheet.open(write(folder, sheet))) {
+    try (BenchSheet bench = BenchSheet.open(write(folder, sheet), SheetUse.MOVES)) {
       return bench.warnings().listed();
     }
   }

@@ -46,6 +46,22 @@ class WarningsTest {
   }
 
   @Test
+  void namesAStringThatHasNoPlaceOnItsInstrument() throws IOException {
+    String header = "instrument,string,pitch,scale_mm,gauge_in,construction,f12\n";
+    StringBuilder sheet = new StringBuilder(header);
+    for (int string : new int[] {1, 2, 3, 4, 9}) {
+      sheet.append("Demo,").append(string).append(",G4,670,0.010,plain-steel,1.0\n");
+    }
+    assertThat(Sheets.warnings(folder, sheet.toString()))
+        .extracting(remark -> remark.said(Texts.english()))
+        .containsExactly(
+            "line 6, column 2 (string): string 9 of an instrument with 5 strings in this sheet;"
+                + " the string on the treble side is 1, the next 2");
+    String outer = header + "Demo,1,E4,648,0.010,plain-steel,1\nDemo,6,E2,648,.046,wound-steel,2\n";
+    assertThat(Sheets.warnings(folder, outer)).isEmpty();
+  }
+
+  @Test
   void staysSilentOnAUsualSheet() throws IOException {
     assertThat(Sheets.warnings(folder, Sheets.with("relief_mm", "0.2"))).isEmpty();
   }

@@ -18,6 +18,7 @@ import sillet.logbook.text.Texts;
 import sillet.logbook.visits.CheckKind;
 import sillet.logbook.visits.Moment;
 import sillet.sheets.bench.BenchSheet;
+import sillet.sheets.bench.SheetUse;
 
 class JobSheetTest {
   private static final String HEADER =
@@ -174,8 +175,8 @@ class JobSheetTest {
     Path path = Files.writeString(folder.resolve("job.csv"), sheet());
 
     List<BenchString> read = new ArrayList<>();
-    try (BenchSheet bench = BenchSheet.open(path)) {
-      bench.inOrder(one -> one, read::add);
+    try (BenchSheet bench = BenchSheet.open(path, SheetUse.MOVES)) {
+      bench.inOrder(one -> one, row -> read.add(row.string()));
     }
 
     List<BenchString> now = List.of(pass(0, 1), pass(1, 0));
