@@ -3,6 +3,7 @@ package sillet.desktop.controls;
 import javafx.scene.control.Button;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
+import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Region;
 import sillet.desktop.theme.Looks;
@@ -20,6 +21,25 @@ public final class KeyHint {
    */
   public static Button button(String name, String key, Runnable action) {
     Button button = new Button(name);
+    Label hint = new Label(key);
+    hint.getStyleClass().add(Looks.KEY_HINT);
+    button.setGraphic(hint);
+    button.setContentDisplay(ContentDisplay.RIGHT);
+    button.setMnemonicParsing(false);
+    button.setAccessibleText(name + ", " + key);
+    button.setOnAction(pressed -> action.run());
+    return button;
+  }
+
+  /**
+   * Makes a button that stays pressed; whoever owns it says which.
+   *
+   * @param name what it shows
+   * @param key the key that does it too
+   * @param action what happens
+   */
+  public static ToggleButton toggle(String name, String key, Runnable action) {
+    ToggleButton button = new ToggleButton(name);
     Label hint = new Label(key);
     hint.getStyleClass().add(Looks.KEY_HINT);
     button.setGraphic(hint);

@@ -37,6 +37,8 @@ final class KeySheet {
     row(grid, "shell.key-text", "shell.key-text-does");
     head(grid, "shell.keys-visit");
     row(grid, "shell.key-parts", "shell.key-parts-does");
+    row(grid, "shell.key-neck", "shell.key-neck-does");
+    row(grid, "shell.key-aim", "shell.key-aim-does");
     row(grid, "shell.key-moves", "shell.key-moves-does");
     row(grid, "shell.key-passes", "shell.key-passes-does");
     row(grid, "shell.key-turn", "shell.key-turn-does");

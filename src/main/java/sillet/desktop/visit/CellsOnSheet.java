@@ -81,6 +81,14 @@ final class CellsOnSheet {
     return neckFrets.getOrDefault(cell, cell.fret());
   }
 
+  /** The cell of a string at a fret of the neck. */
+  Optional<Cell> at(int row, int neckFret) {
+    return neckFrets.entrySet().stream()
+        .filter(cell -> cell.getKey().string() == row + 1 && cell.getValue() == neckFret)
+        .map(Map.Entry::getKey)
+        .findFirst();
+  }
+
   /** The first cell that cannot be read and in which nobody types. */
   Optional<Cell> wrong(GridHand hand) {
     return fields.entrySet().stream()

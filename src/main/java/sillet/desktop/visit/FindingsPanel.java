@@ -61,17 +61,26 @@ final class FindingsPanel extends VBox {
     caution.setManaged(!wanted.caution().isEmpty());
   }
 
+  private static void sentence(VBox words, String text, String... looks) {
+    if (!text.isEmpty()) {
+      Label sentence = new Label(text);
+      sentence.getStyleClass().addAll(looks);
+      sentence.setWrapText(true);
+      sentence.setMinHeight(Region.USE_PREF_SIZE);
+      words.getChildren().add(sentence);
+    }
+  }
+
   private static HBox line(int number, FindingLine finding) {
     Label head = new Label(finding.head());
     head.getStyleClass().add(Looks.STRONG);
     head.setWrapText(true);
-    Label sentence = new Label(finding.sentence());
-    sentence.getStyleClass().addAll(Looks.TIGHT, Looks.SENTENCE);
-    sentence.setWrapText(true);
-    for (Label label : new Label[] {head, sentence}) {
-      label.setMinHeight(Region.USE_PREF_SIZE);
-    }
-    VBox words = new VBox(head, sentence);
+    head.setMinHeight(Region.USE_PREF_SIZE);
+    VBox words = new VBox(head);
+    sentence(words, finding.sentence(), Looks.TIGHT, Looks.SENTENCE);
+    sentence(words, finding.toDo(), Looks.TIGHT, Looks.SENTENCE, "to-do");
+    sentence(words, finding.worth(), Looks.NOTE);
+    sentence(words, finding.caution(), Looks.CAUTION, Looks.TIGHT);
     words.setMinWidth(0);
     HBox.setHgrow(words, Priority.ALWAYS);
     HBox line = new HBox(new Balloon(number, false, finding.head()), words);

@@ -3,6 +3,7 @@ package sillet.desktop.visit;
 import java.math.BigDecimal;
 import java.util.Optional;
 import javafx.geometry.Pos;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
@@ -30,7 +31,8 @@ final class ReadingTermsBar extends BorderPane {
   private final Label said = new Label();
   private final ToggleGroup references = new ToggleGroup();
 
-  ReadingTermsBar(VisitModel model, Texts texts, Runnable fretsChanged, Runnable termsChanged) {
+  ReadingTermsBar(
+      VisitModel model, Texts texts, Node wholeNeck, Runnable fretsChanged, Runnable termsChanged) {
     this.model = model;
     this.texts = texts;
     this.fretsChanged = fretsChanged;
@@ -46,6 +48,7 @@ final class ReadingTermsBar extends BorderPane {
         new HBox(
             name("visit.terms.frets"),
             field(frets, "shown-frets", texts.say("visit.terms.frets"), this::fretsTyped),
+            wholeNeck,
             name("visit.terms.against"),
             against(Reference.OPEN, texts.say("visit.terms.open")),
             against(Reference.HARMONIC, texts.say("visit.terms.harmonic")),

@@ -1,13 +1,14 @@
 package sillet.desktop.visit;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Predicate;
 import javafx.geometry.Pos;
 import javafx.geometry.Rectangle2D;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.StackPane;
@@ -15,20 +16,19 @@ import javafx.scene.layout.VBox;
 import org.jspecify.annotations.Nullable;
 import sillet.desktop.drawing.ScreenDots;
 import sillet.desktop.drawing.strings.Bridge;
-import sillet.desktop.drawing.strings.MoveWords;
+import sillet.desktop.drawing.strings.FretMark;
 import sillet.desktop.drawing.strings.SheetShape;
 import sillet.desktop.drawing.strings.SheetWords;
 import sillet.desktop.drawing.strings.StringsDrawing;
 import sillet.desktop.drawing.strings.StringsPicture;
-import sillet.desktop.drawing.strings.WordColumns;
-import sillet.desktop.drawing.strings.WordsHead;
 import sillet.desktop.theme.Looks;
 import sillet.desktop.visit.made.MadeRows;
-import sillet.desktop.visit.picture.MoveTexts;
+import sillet.desktop.visit.picture.ShownNeck;
 import sillet.desktop.visit.picture.VisitPicture;
 import sillet.desktop.visit.readings.Cell;
 import sillet.desktop.visit.readings.CentsCallout;
 import sillet.desktop.visit.words.FindingLine;
+import sillet.desktop.visit.words.NeckNotes;
 import sillet.desktop.visit.words.StringWords;
 import sillet.logbook.text.Texts;
 import sillet.logbook.units.Figures;
@@ -45,22 +45,26 @@ final class ReadingsPanel extends VBox {
   private final HBox actions = new HBox();
   private final CentsCallout callout;
   private final StackPane sheet = new StackPane();
-  private final List<MoveWords> words = new ArrayList<>();
-  private final WordsOfVisit said;
+  private final WordsBesideStrings words;
+  private final NeckView neck;
+  private final NeckTable figures;
   private @Nullable MadeRows made;
   private SheetShape shape = SheetShape.USUAL;
   private boolean turned;
+  private int inHand = 1;
   private List<FindingLine> findings = List.of();
 
   ReadingsPanel(VisitDesk desk, WordsOfVisit said, Runnable changed) {
     this.model = desk.model();
     this.texts = desk.texts();
-    this.said = said;
-    this.hand = new VisitHand(desk, this::focus, changed);
+    this.neck = new NeckView(model, texts);
+    this.figures = new NeckTable(texts);
+    this.hand = new VisitHand(desk, this::focus, this::entered, changed);
     SheetWords sheetWords =
         new SheetWords(texts.say("visit.sheet.string"), texts.say("visit.sheet.nut"), this::scale);
     this.drawing = new StringsDrawing(picture(), sheetWords, ScreenDots.perInch());
     this.cells = new CellsOnSheet(drawing, texts);
+    this.words = new WordsBesideStrings(drawing, texts, said, model);
     this.callout = new CentsCallout(texts.say("visit.grid.example"));
     title.getStyleClass().add("sheet-title");
     title.setAlignment(Pos.CENTER_LEFT);
@@ -71,7 +75,17 @@ final class ReadingsPanel extends VBox {
     above.setPickOnBounds(false);
     sheet.getChildren().addAll(drawing, above);
     getStyleClass().addAll(Looks.PANEL, "readings");
-    getChildren().addAll(head, sheet);
+    getChildren().addAll(head, sheet, figures);
+    drawing.setOnMouseClicked(this::clicked);
+    drawing
+        .widthProperty()
+        .addListener(
+            (property, before, now) -> {
+              if (measure()) {
+                drawing.show(picture());
+                changed.run();
+              }
+            });
     makeCells();
   }
 
@@ -83,15 +97,18 @@ final class ReadingsPanel extends VBox {
   }
 
   private StringsPicture picture() {
-    return new VisitPicture(
-            model.record().instrument(), model.passes(), model.pass(), model.frets().frets(), texts)
+    return picture(neck.shown());
+  }
+
+  private StringsPicture picture(ShownNeck shown) {
+    return new VisitPicture(model.record().instrument(), model.passes(), model.pass(), shown, texts)
         .make(findings, turned);
   }
 
   /** Makes the cells anew: other frets or another pass. */
   void makeCells() {
     drawing.clearPlaced();
-    words.clear();
+    measure();
     drawing.show(picture());
     cells.make(
         model.record().visit().strings().strings(),
@@ -99,38 +116,14 @@ final class ReadingsPanel extends VBox {
         model.record().instrument().neck(),
         hand);
     cells.editable(model.open());
-    placeWords();
+    words.place(shape);
   }
 
-  private void placeWords() {
-    words.clear();
-    WordColumns columns = WordColumns.of(shape, drawing.picture());
-    MoveTexts set = new MoveTexts(texts, drawing.picture(), shape);
-    for (StringWords string : said.of(model)) {
-      MoveWords node = new MoveWords(set.of(string), columns);
-      words.add(node);
-      drawing.setWords(string.string() - 1, node);
+  /** Puts the words anew where a choice changes what stands over them. */
+  void placeWords() {
+    if (made == null) {
+      words.place(shape);
     }
-    drawing.setWordsHead(wordsHead(columns));
-  }
-
-  private Node wordsHead(WordColumns columns) {
-    return switch (columns.line()) {
-      case ONE ->
-          new WordsHead(
-              texts.say("visit.words.turns"),
-              texts.say("visit.words.mm"),
-              texts.say("visit.words.left-head"),
-              columns);
-      case PLACE ->
-          new WordsHead(
-              texts.say("visit.words.file"), "", texts.say("visit.words.from-front"), columns);
-      case TWO ->
-          shape == SheetShape.NARROW
-              ? new WordsHead(
-                  texts.say("visit.words.turns"), "", texts.say("visit.words.left-mm"), columns)
-              : new WordsHead(said.sense(model), "", "", columns);
-    };
   }
 
   /** Takes the shape that goes with the width of the window. */
@@ -139,7 +132,7 @@ final class ReadingsPanel extends VBox {
       shape = wanted;
       drawing.setShape(wanted);
       if (made == null) {
-        placeWords();
+        words.place(shape);
       }
     }
   }
@@ -150,24 +143,23 @@ final class ReadingsPanel extends VBox {
     drawing.show(picture());
     cells.refresh();
     if (made == null) {
-      WordColumns columns = WordColumns.of(shape, drawing.picture());
-      MoveTexts set = new MoveTexts(texts, drawing.picture(), shape);
-      for (int row = 0; row < words.size(); row++) {
-        words.get(row).show(set.of(strings.get(row)), columns);
-      }
+      words.refresh(strings, shape);
     }
+    figures.show(NeckNotes.of(model.strings().get(inHand - 1), texts), neck.whole());
     showCallout();
     showHead();
   }
 
   private void showHead() {
     boolean onePiece = drawing.picture().bridge() instanceof Bridge.OnePiece;
-    boolean predicted =
-        drawing.picture().rows().stream()
-            .flatMap(row -> row.frets().stream())
-            .anyMatch(mark -> mark.predicted() != null);
+    boolean predicted = anyMark(mark -> mark.predicted() != null);
+    boolean estimated = anyMark(FretMark::estimated);
     String moveHead = made == null ? texts.say("visit.words.head") : "";
-    head.show(onePiece, model.pass(), predicted, moveHead);
+    head.show(onePiece, model.pass(), new SheetHead.Marks(predicted, estimated), moveHead);
+  }
+
+  private boolean anyMark(Predicate<FretMark> such) {
+    return drawing.picture().rows().stream().flatMap(row -> row.frets().stream()).anyMatch(such);
   }
 
   private void showCallout() {
@@ -209,7 +201,7 @@ final class ReadingsPanel extends VBox {
   void showMade(@Nullable MadeRows rows) {
     made = rows;
     if (rows == null) {
-      placeWords();
+      words.place(shape);
       return;
     }
     List<Node> nodes = rows.nodes();
@@ -226,13 +218,46 @@ final class ReadingsPanel extends VBox {
     turned = !turned;
     drawing.show(picture());
     if (made == null) {
-      placeWords();
+      words.place(shape);
     }
     showHead();
   }
 
   void focus(Cell cell) {
+    inHand = cell.string();
+    if (neck.whole()) {
+      neck.open(cell.fret());
+      drawing.show(picture());
+      drawing.layout();
+    }
     cells.focus(cell);
+  }
+
+  /** The string in hand is the one whose figures stand below the drawing. */
+  private void entered(Cell cell) {
+    inHand = cell.string();
+  }
+
+  private void clicked(MouseEvent click) {
+    drawing
+        .near(click.getX(), click.getY())
+        .ifPresent(place -> cells.at(place.row(), place.neckFret()).ifPresent(this::focus));
+  }
+
+  /** Looks whether the cells have room beside their frets; true if that changes the drawing. */
+  private boolean measure() {
+    return neck.crowd(!drawing.cellsFit(picture(neck.cells())));
+  }
+
+  /** Shows the whole neck, or cells beside their frets where these have room. */
+  void showWholeNeck(boolean wanted) {
+    neck.want(wanted);
+    drawing.show(picture());
+    drawing.layout();
+  }
+
+  NeckView neck() {
+    return neck;
   }
 
   /** Whether nothing is typed any more. */

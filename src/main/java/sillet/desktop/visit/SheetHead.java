@@ -27,7 +27,10 @@ final class SheetHead extends Region {
   private @Nullable Shown shown;
 
   private record Shown(
-      boolean onePiece, int pass, boolean predicted, String moveHead, SheetMeasures measures) {}
+      boolean onePiece, int pass, Marks marks, String moveHead, SheetMeasures measures) {}
+
+  /** Marks that only sometimes stand on the drawing. */
+  record Marks(boolean predicted, boolean estimated) {}
 
   SheetHead(StringsDrawing drawing, Texts texts, HBox title, HBox actions) {
     this.drawing = drawing;
@@ -43,8 +46,8 @@ final class SheetHead extends Region {
   }
 
   /** Says what stands where. */
-  void show(boolean onePiece, int pass, boolean predicted, String moveHead) {
-    Shown wanted = new Shown(onePiece, pass, predicted, moveHead, drawing.measures());
+  void show(boolean onePiece, int pass, Marks marks, String moveHead) {
+    Shown wanted = new Shown(onePiece, pass, marks, moveHead, drawing.measures());
     if (wanted.equals(shown)) {
       return;
     }
@@ -54,7 +57,10 @@ final class SheetHead extends Region {
     legend.getChildren().clear();
     sign(LegendGlyph.Sign.TEN_CENTS, texts.say("visit.sheet.ten-cents"));
     sign(LegendGlyph.Sign.READ, texts.say("visit.sheet.read"));
-    if (predicted) {
+    if (marks.estimated()) {
+      sign(LegendGlyph.Sign.ESTIMATED, texts.say("visit.sheet.estimated"));
+    }
+    if (marks.predicted()) {
       sign(LegendGlyph.Sign.PREDICTED, texts.say("visit.sheet.predicted"));
     }
     if (pass > 1) {

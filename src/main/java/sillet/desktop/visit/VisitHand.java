@@ -17,14 +17,16 @@ final class VisitHand implements GridHand {
   private final SaveSign sign;
   private final Clock clock;
   private final Consumer<Cell> focus;
+  private final Consumer<Cell> entered;
   private final Runnable changed;
 
-  VisitHand(VisitDesk desk, Consumer<Cell> focus, Runnable changed) {
+  VisitHand(VisitDesk desk, Consumer<Cell> focus, Consumer<Cell> entered, Runnable changed) {
     this.model = desk.model();
     this.saves = desk.saves();
     this.sign = desk.sign();
     this.clock = desk.clock();
     this.focus = focus;
+    this.entered = entered;
     this.changed = changed;
   }
 
@@ -35,6 +37,7 @@ final class VisitHand implements GridHand {
 
   @Override
   public void entered(Cell cell) {
+    entered.accept(cell);
     changed.run();
   }
 

@@ -9,17 +9,22 @@ import java.util.Set;
 import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.UUID;
+import org.jspecify.annotations.Nullable;
 import sillet.desktop.visit.readings.Cell;
 import sillet.desktop.visit.readings.GridModel;
 import sillet.desktop.visit.readings.GridWalk;
 import sillet.desktop.visit.readings.ReadingTerms;
 import sillet.desktop.visit.readings.ShownFrets;
 import sillet.logbook.actions.Action;
+import sillet.logbook.actions.ChooseAim;
 import sillet.logbook.actions.RecordReadings;
 import sillet.logbook.moves.MoveAdvisor;
+import sillet.logbook.visits.InstrumentPast;
 import sillet.logbook.visits.Reading;
 import sillet.logbook.visits.StringPass;
+import sillet.logbook.visits.VisitAim;
 import sillet.logbook.visits.VisitMoves;
+import sillet.logbook.visits.VisitPass;
 import sillet.logbook.visits.VisitRecord;
 
 /**
@@ -29,16 +34,20 @@ import sillet.logbook.visits.VisitRecord;
  */
 public final class VisitModel {
   private final MoveAdvisor advisor;
+  private final InstrumentPast past;
   private final Clock clock;
   private final Map<Integer, GridModel> grids = new TreeMap<>();
   private VisitRecord record;
   private ReadingTerms terms;
   private ShownFrets frets;
   private int pass;
-  private List<List<StringPass>> passes = List.of();
+  private List<VisitPass> passes = List.of();
+  private @Nullable VisitAim chosen;
 
-  public VisitModel(VisitRecord record, MoveAdvisor advisor, Clock clock) {
+  /** A visit of an instrument of which earlier visits may have taught something. */
+  public VisitModel(VisitRecord record, InstrumentPast past, MoveAdvisor advisor, Clock clock) {
     this.record = record;
+    this.past = past;
     this.advisor = advisor;
     this.clock = clock;
     this.terms = ReadingTerms.lastOf(record.readings());
@@ -57,6 +66,9 @@ public final class VisitModel {
   public void take(VisitRecord now) {
     int lastBefore = lastPass();
     record = now;
+    if (now.aim().equals(chosen)) {
+      chosen = null;
+    }
     grids.values().forEach(grid -> grid.take(now.readings()));
     reckon();
     if (lastPass() > lastBefore) {
@@ -67,7 +79,7 @@ public final class VisitModel {
   private void reckon() {
     List<Reading> all = new ArrayList<>(record.readings());
     grids.values().forEach(grid -> all.addAll(grid.drafts(clock.instant())));
-    passes = VisitMoves.of(withReadings(all), advisor);
+    passes = VisitMoves.passes(withReadings(all), past, advisor);
   }
 
   private VisitRecord withReadings(List<Reading> readings) {
@@ -80,7 +92,7 @@ public final class VisitModel {
         record.moves(),
         record.work(),
         record.notes(),
-        record.aim());
+        aim());
   }
 
   public VisitRecord record() {
@@ -113,17 +125,34 @@ public final class VisitModel {
 
   /** Every pass, in each the strings in order. */
   public List<List<StringPass>> passes() {
-    return passes;
+    return passes.stream().map(VisitPass::strings).toList();
   }
 
   /** The strings in the pass that is looked at, string 1 first. */
   public List<StringPass> strings() {
+    return now().strings();
+  }
+
+  /** The pass that is looked at, with what was found over all strings. */
+  public VisitPass now() {
     return passes.get(pass - 1);
+  }
+
+  /** What shall become true, and whether the nut can move. */
+  public VisitAim aim() {
+    return chosen == null ? record.aim() : chosen;
+  }
+
+  /** Reckons for another aim; the action that saves it. */
+  public Action aimAt(VisitAim wanted) {
+    chosen = wanted;
+    reckon();
+    return new ChooseAim(visitId(), wanted);
   }
 
   /** The strings in the pass before, empty in the first. */
   public List<StringPass> before() {
-    return pass > 1 ? passes.get(pass - 2) : List.of();
+    return pass > 1 ? passes.get(pass - 2).strings() : List.of();
   }
 
   /** The readings of the pass that is looked at. */

@@ -1,25 +1,18 @@
 package sillet.desktop.visit;
 
 import java.time.LocalDate;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
-import javafx.scene.control.Label;
-import javafx.scene.control.ToggleButton;
-import javafx.scene.control.ToggleGroup;
 import javafx.scene.layout.Region;
 import sillet.desktop.controls.KeyHint;
 import sillet.desktop.drawing.strings.SheetShape;
-import sillet.desktop.theme.Looks;
+import sillet.desktop.visit.aim.AimBar;
 import sillet.desktop.visit.checks.ChecksModel;
 import sillet.desktop.visit.checks.ChecksPanel;
 import sillet.desktop.visit.checks.RoomModel;
 import sillet.desktop.visit.checks.RoomPanel;
-import sillet.desktop.visit.log.LogModel;
-import sillet.desktop.visit.log.NotesPanel;
-import sillet.desktop.visit.log.WorkPanel;
 import sillet.desktop.visit.readings.Cell;
 import sillet.desktop.visit.words.FindingLine;
 import sillet.desktop.visit.words.StringWords;
@@ -39,15 +32,13 @@ final class VisitParts {
   private final WordsOfVisit said;
   private final VisitHead head;
   private final ReadingsPanel readings;
-  private final ReadingTermsBar terms;
+  private final ReadingsFoot foot;
   private final FindingsPanel findings;
   private final ChecksModel checks;
   private final ChecksPanel checksPanel;
   private final RoomModel room;
   private final RoomPanel roomPanel;
-  private final LogModel log;
-  private final WorkPanel work;
-  private final NotesPanel notes;
+  private final LogPart log;
   private final Button handOut;
   private final Button jobSheet;
   private final MadeMode made;
@@ -68,8 +59,12 @@ final class VisitParts {
     LengthUnit unit = desk.desk().atBench().shop().lengthUnit();
     this.head = new VisitHead(texts);
     this.readings = new ReadingsPanel(desk, said, this::showReadings);
-    this.terms = new ReadingTermsBar(model, texts, this::remade, this::showReadings);
-    readings.getChildren().add(terms);
+    this.foot =
+        new ReadingsFoot(
+            desk,
+            new ReadingsFoot.Changed(
+                this::remade, this::showReadings, this::turnNeck, this::aimed));
+    readings.getChildren().add(foot);
     this.findings = new FindingsPanel(texts);
     this.checks = new ChecksModel(record, unit, new UnusualCheck(unit));
     this.checksPanel =
@@ -77,7 +72,6 @@ final class VisitParts {
             checks, texts, (row, moment) -> keep(checks.commit(row, moment, model.visitId())));
     this.room = new RoomModel(record, unit);
     this.roomPanel = new RoomPanel(room, texts, row -> keep(room.commit(row, model.visitId())));
-    this.log = new LogModel(record, texts, desk.clock());
     this.handOut =
         KeyHint.button(texts.say("visit.hand-out"), texts.say("visit.key.hand-out"), this::handOut);
     handOut.setId("hand-out");
@@ -86,12 +80,11 @@ final class VisitParts {
     jobSheet.setId("job-sheet");
     Button past =
         KeyHint.button(texts.say("visit.history"), texts.say("visit.key.history"), history);
-    this.work = new WorkPanel(texts, this::logWork, List.of(past, jobSheet, handOut));
-    this.notes = new NotesPanel(texts, log::kind, this::writeNote);
+    this.log = new LogPart(desk, List.of(past, jobSheet, handOut));
     this.made = new MadeMode(desk, readings, this::refresh);
     this.sections = new SectionWords(sections());
-    List<Region> below = List.of(checksPanel, findings, work);
-    this.page = new VisitPage(head, sections, readings, below, List.of(roomPanel, notes));
+    List<Region> below = List.of(checksPanel, findings, log.work());
+    this.page = new VisitPage(head, sections, readings, below, List.of(roomPanel, log.notes()));
     refresh();
   }
 
@@ -106,8 +99,10 @@ final class VisitParts {
         new Section(
             "checks", texts.say("visit.checks"), checksPanel, into(checksPanel), states()::checked),
         new Section("room", texts.say("visit.room"), roomPanel, into(roomPanel), states()::room),
-        new Section("work", texts.say("visit.work"), work, work::focus, states()::worked),
-        new Section("notes", texts.say("visit.notes"), notes, notes::focus, states()::noted),
+        new Section(
+            "work", texts.say("visit.work"), log.work(), log.work()::focus, states()::worked),
+        new Section(
+            "notes", texts.say("visit.notes"), log.notes(), log.notes()::focus, states()::noted),
         new Section(
             "hand-out",
             texts.say("visit.hand-out"),
@@ -131,18 +126,6 @@ final class VisitParts {
 
   private void keep(Optional<? extends Action> action) {
     action.ifPresent(desk.saves()::keep);
-  }
-
-  private boolean logWork(String typed) {
-    var action = log.logWork(typed, desk.desk().atBench().technician());
-    keep(action);
-    return action.isPresent();
-  }
-
-  private boolean writeNote(String typed) {
-    var action = log.writeNote(typed);
-    keep(action);
-    return action.isPresent();
   }
 
   /** Closes the visit, once the technician has said so. */
@@ -191,9 +174,8 @@ final class VisitParts {
 
   /** Shows everything as it now is. */
   private void refresh() {
-    readings.title(passes());
-    work.show(log.work(), model.open());
-    notes.show(log.notes(), model.open());
+    readings.title(PassChoices.of(model, texts, this::look));
+    log.show(model.open());
     handOut.setDisable(!model.open());
     head.show(model, shape);
     showReadings();
@@ -210,30 +192,9 @@ final class VisitParts {
     boolean onePiece = model.record().instrument().saddle().kind() == SaddleKind.ONE_PIECE;
     String caution = texts.say(onePiece ? "visit.caution.file" : "visit.caution.tension");
     findings.show(new FindingsPanel.Shown(found, none, moving || made.on() ? caution : ""));
+    foot.refresh(readings.neck());
     made.showButtons();
     sections.refresh(shape == SheetShape.NARROW);
-  }
-
-  private Node[] passes() {
-    if (model.lastPass() == 1) {
-      Label only = new Label(texts.say("visit.pass", "1"));
-      only.getStyleClass().add(Looks.SOFT);
-      return new Node[] {only};
-    }
-    List<Node> choices = new ArrayList<>();
-    ToggleGroup group = new ToggleGroup();
-    for (int pass = 1; pass <= model.lastPass(); pass++) {
-      int wanted = pass;
-      ToggleButton choice = new ToggleButton(texts.say("visit.pass", Integer.toString(pass)));
-      choice.setId("pass-" + pass);
-      choice.getStyleClass().addAll(Looks.CHOICE, "pass-choice");
-      choice.setMinWidth(Region.USE_PREF_SIZE);
-      choice.setToggleGroup(group);
-      choice.setSelected(pass == model.pass());
-      choice.setOnAction(pressed -> look(wanted));
-      choices.add(choice);
-    }
-    return choices.toArray(Node[]::new);
   }
 
   /** Takes the shape that goes with a width of the window in px. */
@@ -249,7 +210,7 @@ final class VisitParts {
     readings.setShape(wanted);
     page.setShape(wanted, em);
     checksPanel.setNarrow(wanted == SheetShape.WIDE);
-    terms.narrow(wanted == SheetShape.NARROW);
+    foot.narrow(wanted == SheetShape.NARROW);
     head.show(model, wanted);
     sections.refresh(wanted == SheetShape.NARROW);
   }
@@ -270,7 +231,30 @@ final class VisitParts {
 
   /** Writes the job sheet and says where it is. */
   void export(JobSheetExport export, int ticket) {
-    export.write(ticket, said -> work.say(texts.say(said)));
+    export.write(ticket, said -> log.work().say(texts.say(said)));
+  }
+
+  /** The whole neck, or cells beside their frets. */
+  void turnNeck() {
+    readings.showWholeNeck(!readings.neck().whole());
+    showReadings();
+  }
+
+  /** The key does nothing where the cells have no room beside their frets. */
+  void neckByKey() {
+    if (!readings.neck().crowded()) {
+      turnNeck();
+    }
+  }
+
+  private void aimed() {
+    made.end();
+    refresh();
+    readings.placeWords();
+  }
+
+  AimBar aim() {
+    return foot.aim();
   }
 
   void turnAbout() {
@@ -282,10 +266,10 @@ final class VisitParts {
   }
 
   void focusWork() {
-    work.focus();
+    log.work().focus();
   }
 
   void focusNotes() {
-    notes.focus();
+    log.notes().focus();
   }
 }

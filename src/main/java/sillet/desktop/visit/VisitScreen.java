@@ -22,6 +22,7 @@ import sillet.logbook.actions.Action;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Rejection;
+import sillet.logbook.visits.InstrumentPast;
 import sillet.logbook.visits.VisitRecord;
 
 /** The page of one visit. */
@@ -56,7 +57,7 @@ public final class VisitScreen implements Screen {
     blank.getStyleClass().add(Looks.PAGE);
     pane.setContent(blank);
     pane.addEventHandler(KeyEvent.KEY_PRESSED, this::escape);
-    desk.background().run(this::read, this::loaded, why -> waiting.setText(say(why)));
+    desk.background().run(this::readWithPast, this::loaded, why -> waiting.setText(say(why)));
   }
 
   private static String sheet() {
@@ -75,9 +76,16 @@ public final class VisitScreen implements Screen {
         .orElseThrow(() -> Rejection.of("visit.no-such", Integer.toString(ticket)));
   }
 
-  private void loaded(VisitRecord record) {
+  private record WithPast(VisitRecord record, InstrumentPast past) {}
+
+  private WithPast readWithPast() {
+    VisitRecord record = read();
+    return new WithPast(record, desk.logbook().visits().past(record));
+  }
+
+  private void loaded(WithPast read) {
     MoveAdvisor advisor = advisor();
-    VisitModel visit = new VisitModel(record, advisor, desk.atBench().clock());
+    VisitModel visit = new VisitModel(read.record(), read.past(), advisor, desk.atBench().clock());
     Saves onTheWay =
         new Saves(
             desk.background(),
@@ -163,6 +171,11 @@ public final class VisitScreen implements Screen {
     keys.put(shortcut(KeyCode.H), this::history);
     keys.put(shortcut(KeyCode.ENTER), () -> with(VisitParts::handOut));
     keys.put(new KeyCodeCombination(KeyCode.F4), () -> with(VisitParts::turnAbout));
+    keys.put(new KeyCodeCombination(KeyCode.F5), () -> with(page -> page.aim().nextAim()));
+    keys.put(
+        new KeyCodeCombination(KeyCode.F5, KeyCombination.SHIFT_DOWN),
+        () -> with(page -> page.aim().nextNut()));
+    keys.put(new KeyCodeCombination(KeyCode.F7), () -> with(VisitParts::neckByKey));
     keys.put(new KeyCodeCombination(KeyCode.F6), () -> walk(1));
     keys.put(new KeyCodeCombination(KeyCode.F6, KeyCombination.SHIFT_DOWN), () -> walk(-1));
     keys.put(shortcut(KeyCode.PAGE_UP), () -> look(-1));

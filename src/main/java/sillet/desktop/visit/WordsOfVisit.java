@@ -9,6 +9,7 @@ import sillet.desktop.visit.words.StringWords;
 import sillet.logbook.instruments.Saddle;
 import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.instruments.ScrewSense;
+import sillet.logbook.moves.AimChoice;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.text.Texts;
 import sillet.logbook.visits.StringPass;
@@ -38,7 +39,7 @@ final class WordsOfVisit {
 
   /** What stands below the drawing. */
   List<FindingLine> findings(VisitModel model) {
-    return findings.of(model.strings());
+    return findings.of(model.now());
   }
 
   /** What clockwise does; empty while it is not known. */
@@ -47,6 +48,18 @@ final class WordsOfVisit {
     if (saddle.kind() != SaddleKind.SCREW || saddle.screwSense() == ScrewSense.NOT_KNOWN) {
       return "";
     }
-    return texts.say(saddle.screwSense().key());
+    return saddle.screwSense() == ScrewSense.CLOCKWISE_AWAY
+        ? texts.say("visit.words.clockwise-away")
+        : texts.say("visit.words.clockwise-toward");
+  }
+
+  /** What the moves serve, in short. */
+  String aim(VisitModel model) {
+    AimChoice aim = model.aim().aim();
+    return switch (aim.kind()) {
+      case OCTAVE -> texts.say("visit.words.for-octave");
+      case NECK -> texts.say("visit.words.for-neck");
+      case FRETS -> texts.say("visit.words.for-frets", aim.word());
+    };
   }
 }

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.concurrent.TimeoutException;
 import java.util.concurrent.atomic.AtomicInteger;
 import javafx.event.ActionEvent;
+import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -16,11 +17,13 @@ import sillet.desktop.drawing.Picture;
 import sillet.desktop.visit.readings.ReadingTerms;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.text.Texts;
+import sillet.logbook.visits.InstrumentPast;
 
 class ReadingTermsBarTest {
   private final VisitModel model =
       new VisitModel(
           TestVisits.six(List.of()),
+          InstrumentPast.NONE,
           new MoveAdvisor(75),
           Clock.fixed(TestDesk.NOW, ZoneOffset.UTC));
   private final AtomicInteger changes = new AtomicInteger();
@@ -32,7 +35,8 @@ class ReadingTermsBarTest {
 
   private TextField scatter() {
     ReadingTermsBar bar =
-        new ReadingTermsBar(model, Texts.english(), () -> {}, changes::incrementAndGet);
+        new ReadingTermsBar(
+            model, Texts.english(), new Label(), () -> {}, changes::incrementAndGet);
     return (TextField) bar.lookup("#scatter");
   }
 

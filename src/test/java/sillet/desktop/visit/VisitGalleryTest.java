@@ -9,6 +9,7 @@ import java.util.function.Consumer;
 import javafx.scene.Scene;
 import javafx.scene.control.Button;
 import javafx.scene.control.TextField;
+import javafx.scene.control.ToggleButton;
 import javafx.stage.Stage;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -118,6 +119,27 @@ class VisitGalleryTest {
     draw(new Look("6-150", Theme.DARK, 150, 1280, 800), VisitGalleryTest::six);
     draw(new Look("6-150-tall", Theme.LIGHT, 150, 1280, 2400), VisitGalleryTest::six);
     draw(new Look("6-tall", Theme.LIGHT, 100, 1280, 1300), VisitGalleryTest::six);
+  }
+
+  private static void manyFrets(SampleVisits visits) {
+    six(visits);
+    visits
+        .read(1, 2, "0.8", "4.1", "1.2", "0.3", "0.4", "-0.4")
+        .read(1, 3, "1.1", "3.2", "1.7", "0.2", "0.6", "-0.6")
+        .read(1, 7, "4.6", "4.3", "5.9", "2.4", "3.5", "1.1")
+        .read(1, 9, "3.4", "2.8", "5.4", "0.3", "1.5", "-1.8")
+        .read(1, 15, "6.9", "4.3", "10.2", "0.5", "2.9", "-3.4");
+  }
+
+  @Test
+  void wholeNeck() throws IOException {
+    draw(Look.light("neck"), VisitGalleryTest::manyFrets);
+    draw(
+        new Look("neck-dark", Theme.DARK, 100, 1280, 800),
+        VisitGalleryTest::six,
+        scene -> ((ToggleButton) scene.lookup("#whole-neck")).fire());
+    draw(new Look("neck-1920", Theme.LIGHT, 100, 1920, 1080), VisitGalleryTest::manyFrets);
+    draw(new Look("neck-150", Theme.DARK, 150, 1280, 1600), VisitGalleryTest::manyFrets);
   }
 
   @Test

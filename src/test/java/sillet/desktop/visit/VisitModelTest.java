@@ -14,6 +14,7 @@ import sillet.logbook.actions.RecordReadings;
 import sillet.logbook.moves.AimChoice;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveAdvisor;
+import sillet.logbook.visits.InstrumentPast;
 import sillet.logbook.visits.StringPass;
 import sillet.logbook.visits.VisitRecord;
 
@@ -23,7 +24,7 @@ class VisitModelTest {
   private static final Cell CELL = new Cell(1, 12);
 
   private final VisitRecord blank = TestVisits.six(List.of());
-  private final VisitModel model = new VisitModel(blank, ADVISOR, CLOCK);
+  private final VisitModel model = new VisitModel(blank, InstrumentPast.NONE, ADVISOR, CLOCK);
 
   @Test
   void advisesWhileOneTypes() {
@@ -83,7 +84,8 @@ class VisitModelTest {
 
   @Test
   void keepsHowReadingsAreTakenFromTheLastOne() {
-    VisitModel again = new VisitModel(TestVisits.read(blank, 1, "5.0"), ADVISOR, CLOCK);
+    VisitModel again =
+        new VisitModel(TestVisits.read(blank, 1, "5.0"), InstrumentPast.NONE, ADVISOR, CLOCK);
     assertThat(again.terms()).isEqualTo(new ReadingTerms(Reference.OPEN, 0.3));
     again.readUnder(new ReadingTerms(Reference.HARMONIC, 0.1));
     again.type(new Cell(2, 12), "3");

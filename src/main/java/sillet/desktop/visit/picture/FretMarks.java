@@ -6,6 +6,7 @@ import org.jspecify.annotations.Nullable;
 import sillet.acoustics.pitch.EqualTemperament;
 import sillet.acoustics.readings.TrySpread;
 import sillet.desktop.drawing.strings.FretMark;
+import sillet.logbook.moves.FretCents;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveFigures;
 import sillet.logbook.moves.NoteReadings;
@@ -13,7 +14,7 @@ import sillet.logbook.moves.Verdict;
 import sillet.logbook.units.Tries;
 import sillet.logbook.visits.StringPass;
 
-/** The cents of one string at the frets that have cells. */
+/** The cents of one string along the neck: as read, or as the model has them. */
 final class FretMarks {
   private final StringPass string;
   private final @Nullable StringPass before;
@@ -23,12 +24,20 @@ final class FretMarks {
     this.before = before;
   }
 
-  List<FretMark> at(List<Integer> frets) {
+  /** Marks at frets; one that was not read is estimated where it has no cell of its own. */
+  List<FretMark> at(List<Integer> frets, boolean wholeNeck) {
     List<FretMark> marks = new ArrayList<>();
     for (int fret : frets) {
       Double cents = cents(string, fret);
       Double past = before == null ? null : cents(before, fret);
-      marks.add(new FretMark(fret, cents, expected(fret, cents), past, false));
+      FretCents note = note(fret);
+      if (cents == null && wholeNeck && note != null) {
+        double now = note.nowCents();
+        marks.add(FretMark.estimate(fret, now, expected(fret, note, now)));
+      } else {
+        Double after = cents == null ? null : expected(fret, note, cents);
+        marks.add(new FretMark(fret, cents, after, past, false));
+      }
     }
     return marks;
   }
@@ -39,26 +48,38 @@ final class FretMarks {
     return tries == null ? null : TrySpread.of(tries.values(), readings.sdCents()).median();
   }
 
+  private @Nullable FretCents note(int fret) {
+    MoveAdvice advice = string.advice();
+    return advice == null
+        ? null
+        : advice.neck().stream().filter(note -> note.fret() == fret).findFirst().orElse(null);
+  }
+
   /**
-   * What stays after the move, as far as the travel lets it. At fret n a saddle acts 2^(n/12) - 1
-   * times as much as at fret 12 (first order, physics of the string length); the drawing shows no
-   * finer difference.
+   * What stays after the move, as far as the travel lets it. What was read keeps its own error: the
+   * move changes it by what the model says. A move cut short does its share of that. Where the
+   * model says nothing of a fret, the saddle acts 2^(n/12) - 1 times as much as at fret 12 (first
+   * order, physics of the string length).
    */
-  private @Nullable Double expected(int fret, @Nullable Double cents) {
+  private @Nullable Double expected(int fret, @Nullable FretCents note, double cents) {
     MoveAdvice advice = string.advice();
     MoveFigures figures = SaddlePlaces.figures(string);
-    if (cents == null || advice == null || figures == null || string.madeMm() != null) {
+    if (advice == null || figures == null || string.madeMm() != null) {
       return null;
     }
     if (advice.verdict() == Verdict.LEAVE) {
       return null;
     }
-    return cents + figures.centsPerMm() * possibleMm(figures) * (EqualTemperament.ratio(fret) - 1);
+    double whole =
+        note == null
+            ? figures.centsPerMm() * figures.saddleMm() * (EqualTemperament.ratio(fret) - 1)
+            : note.afterCents() - note.nowCents();
+    return cents + share(figures) * whole;
   }
 
-  private double possibleMm(MoveFigures figures) {
+  private double share(MoveFigures figures) {
     Double room = string.string().room().toward(figures.saddleMm());
     double size = Math.abs(figures.saddleMm());
-    return Math.copySign(room == null ? size : Math.min(room, size), figures.saddleMm());
+    return room == null || room >= size ? 1 : room / size;
   }
 }

@@ -11,6 +11,7 @@ import sillet.desktop.drawing.strings.Lie;
 import sillet.desktop.drawing.strings.StringRow;
 import sillet.desktop.drawing.strings.StringsPicture;
 import sillet.desktop.visit.words.FindingLine;
+import sillet.desktop.visit.words.FindingSpot;
 import sillet.logbook.instruments.Instrument;
 import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.strings.FittedString;
@@ -25,7 +26,7 @@ public final class VisitPicture {
   private final Instrument instrument;
   private final List<List<StringPass>> passes;
   private final int pass;
-  private final List<Integer> frets;
+  private final ShownNeck shown;
   private final Texts texts;
 
   /**
@@ -34,19 +35,19 @@ public final class VisitPicture {
    * @param instrument what lies on the bench
    * @param passes every pass, in each the strings in order
    * @param pass the one that is looked at, from 1
-   * @param frets those with cells, counted from each string's own nut
+   * @param shown which notes
    * @param texts the words
    */
   public VisitPicture(
       Instrument instrument,
       List<List<StringPass>> passes,
       int pass,
-      List<Integer> frets,
+      ShownNeck shown,
       Texts texts) {
     this.instrument = instrument;
     this.passes = passes;
     this.pass = pass;
-    this.frets = List.copyOf(frets);
+    this.shown = shown;
     this.texts = texts;
   }
 
@@ -60,11 +61,18 @@ public final class VisitPicture {
     Bridge bridge = bridge();
     return new StringsPicture(
         rows(bridge instanceof Bridge.OnePiece),
-        StringsPicture.Board.of(instrument.neck().frets(), neckFrets()),
+        board(),
         bridge,
         Lie.of(instrument.neck().leftHanded(), turned),
         marks(findings),
-        OptionalDouble.empty());
+        OptionalDouble.empty(),
+        NutMarks.of(strings()));
+  }
+
+  private StringsPicture.Board board() {
+    StringsPicture.Board board = StringsPicture.Board.of(instrument.neck().frets(), neckFrets());
+    Integer open = shown.open();
+    return open == null ? board : board.with(new StringsPicture.Column(open, shown.head()));
   }
 
   private List<StringPass> strings() {
@@ -88,7 +96,8 @@ public final class VisitPicture {
               courses.get(row),
               string.scaleMm(),
               ShortNut.startFret(string, instrument.neck()),
-              new FretMarks(strings().get(row), before).at(frets),
+              new FretMarks(strings().get(row), before)
+                  .at(shown.marked(instrument.neck().frets()), shown.open() != null),
               saddles.of(row)));
     }
     return rows;
@@ -99,7 +108,7 @@ public final class VisitPicture {
     Set<Integer> along = new TreeSet<>();
     for (StringPass string : strings()) {
       int start = ShortNut.startFret(string.string().string(), instrument.neck());
-      frets.forEach(fret -> along.add(fret + start));
+      shown.cells().forEach(fret -> along.add(fret + start));
     }
     return List.copyOf(along);
   }
@@ -118,6 +127,12 @@ public final class VisitPicture {
     List<FindingMark> marks = new ArrayList<>();
     for (int i = 0; i < findings.size(); i++) {
       FindingLine line = findings.get(i);
+      if (line.spot().part() == FindingSpot.Part.NOWHERE) {
+        continue;
+      }
+      if (line.strings().isEmpty()) {
+        marks.add(new FindingMark(i + 1, FindingMark.ALL_STRINGS, place(line), line.head()));
+      }
       for (int string : line.strings()) {
         marks.add(new FindingMark(i + 1, string - 1, place(line), line.head()));
       }
@@ -126,9 +141,18 @@ public final class VisitPicture {
   }
 
   private int place(FindingLine line) {
-    if (line.atSaddle()) {
-      return FindingMark.AT_SADDLE;
-    }
-    return frets.contains(OCTAVE) ? OCTAVE : frets.get(frets.size() - 1);
+    return switch (line.spot().part()) {
+      case SADDLE -> FindingMark.AT_SADDLE;
+      case STRING -> FindingMark.ON_STRING;
+      case FRET -> line.spot().fret();
+      case NUT, NOWHERE -> 0;
+      case NOTE -> line.spot().fret() > 0 ? line.spot().fret() : usualNote();
+    };
+  }
+
+  /** A finding about the string's notes shows at the octave, or at the last fret one reads. */
+  private int usualNote() {
+    List<Integer> cells = shown.cells();
+    return cells.contains(OCTAVE) ? OCTAVE : cells.get(cells.size() - 1);
   }
 }

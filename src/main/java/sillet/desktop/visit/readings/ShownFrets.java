@@ -16,9 +16,6 @@ public record ShownFrets(List<Integer> frets) {
    */
   public static final ShownFrets USUAL = new ShownFrets(List.of(1, 5, 12));
 
-  /** More cells side by side than this no strip can hold. */
-  public static final int MOST = 8;
-
   private static final int HIGHEST = 24;
 
   public ShownFrets {
@@ -28,7 +25,7 @@ public record ShownFrets(List<Integer> frets) {
   /**
    * Reads frets as typed, divided by spaces, commas or slashes.
    *
-   * @throws Rejection if one is no fret of this neck, none is given or they are too many
+   * @throws Rejection if one is no fret of this neck or none is given
    */
   public static ShownFrets parse(String typed, int fretsOnNeck) {
     int highest = Math.min(HIGHEST, fretsOnNeck);
@@ -39,19 +36,14 @@ public record ShownFrets(List<Integer> frets) {
       }
       frets.add(Integer.valueOf(part));
     }
-    if (frets.size() > MOST) {
-      throw Rejection.of("visit.frets.too-many", Integer.toString(MOST));
-    }
     return new ShownFrets(List.copyOf(frets));
   }
 
-  /** The usual frets and every fret that was read, as far as there is room. */
+  /** The usual frets and every fret that was read. */
   public static ShownFrets including(Iterable<Integer> read) {
     TreeSet<Integer> frets = new TreeSet<>(USUAL.frets);
     for (Integer fret : read) {
-      if (frets.size() < MOST) {
-        frets.add(fret);
-      }
+      frets.add(fret);
     }
     return new ShownFrets(List.copyOf(frets));
   }

@@ -8,34 +8,50 @@ import java.util.Map;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
+import sillet.logbook.moves.Finding;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Texts;
 import sillet.logbook.visits.StringPass;
+import sillet.logbook.visits.VisitPass;
 
 /**
- * Collects what stands below the drawing: every note of the strings that is more than the move
- * itself. The same sentence for several strings is said once.
+ * Collects what stands below the drawing: the causes in the order in which to look, then every note
+ * of the strings that is more than the move itself. The same sentence for several strings is said
+ * once.
  */
 public final class FindingLines {
   private static final Set<String> CUT_SHORT =
       Set.of("move.no-room-away", "move.no-room-toward", "move.slot-away", "move.slot-toward");
 
+  /** Said once as a finding, not twice. */
+  private static final Set<String> OF_A_READING = Set.of("move.wild-try", "move.not-as-predicted");
+
   private final Texts texts;
   private final MoveAdvisor advisor;
+  private final ReportLines reports;
 
   public FindingLines(Texts texts, MoveAdvisor advisor) {
     this.texts = texts;
     this.advisor = advisor;
+    this.reports = new ReportLines(texts);
   }
 
-  /** The findings of a pass, in the order of the strings. */
-  public List<FindingLine> of(List<StringPass> strings) {
+  /** The findings of a pass. */
+  public List<FindingLine> of(VisitPass pass) {
+    List<FindingLine> lines = new ArrayList<>();
+    pass.findings().forEach(report -> lines.add(reports.line(report)));
+    lines.addAll(noted(pass));
+    return lines;
+  }
+
+  private List<FindingLine> noted(VisitPass pass) {
     Map<Message, List<Integer>> found = new LinkedHashMap<>();
-    for (StringPass string : strings) {
+    for (StringPass string : pass.strings()) {
+      boolean doubted = doubted(pass, string.string().string().number());
       for (Message note : notes(string)) {
-        if (head(note) != null) {
+        if (head(note) != null && !(doubted && OF_A_READING.contains(note.key()))) {
           found
               .computeIfAbsent(note, first -> new ArrayList<>())
               .add(string.string().string().number());
@@ -45,6 +61,11 @@ public final class FindingLines {
     List<FindingLine> lines = new ArrayList<>();
     found.forEach((note, numbers) -> lines.add(line(note, numbers)));
     return lines;
+  }
+
+  private static boolean doubted(VisitPass pass, int string) {
+    return pass.findings().stream()
+        .anyMatch(report -> report.kind() == Finding.READING && report.concerns(string));
   }
 
   /** What the advice says; the strain is said of every string, read or not, in every pass. */
@@ -65,7 +86,9 @@ public final class FindingLines {
         numbers.size() == 1
             ? texts.say("visit.findings.string", head == null ? "" : head, list)
             : texts.say("visit.findings.strings", head == null ? "" : head, list);
-    return new FindingLine(numbers, named, texts.say(note), CUT_SHORT.contains(note.key()));
+    FindingSpot.Part part =
+        CUT_SHORT.contains(note.key()) ? FindingSpot.Part.SADDLE : FindingSpot.Part.NOTE;
+    return FindingLine.said(numbers, FindingSpot.at(part), named, texts.say(note));
   }
 
   /** The name of a finding; null for the sentence of the move itself, which stands beside it. */

@@ -14,6 +14,7 @@ import sillet.desktop.drawing.strings.StringsPicture;
 import sillet.desktop.visit.SampleVisits;
 import sillet.desktop.visit.TestVisits;
 import sillet.desktop.visit.words.FindingLine;
+import sillet.desktop.visit.words.FindingSpot;
 import sillet.logbook.instruments.Neck;
 import sillet.logbook.instruments.Saddle;
 import sillet.logbook.instruments.SaddleKind;
@@ -28,7 +29,7 @@ import sillet.logbook.visits.VisitMoves;
 import sillet.logbook.visits.VisitRecord;
 
 class VisitPictureTest {
-  private static final List<Integer> FRETS = List.of(1, 5, 12);
+  private static final ShownNeck FRETS = ShownNeck.cells(List.of(1, 5, 12));
   private static final Travel ROOM = new Travel(1, 6.5, 1.0);
 
   private static List<List<StringPass>> passes(VisitRecord record) {
@@ -162,13 +163,33 @@ class VisitPictureTest {
   @Test
   void marksAFindingAtItsStrings() {
     VisitRecord record = TestVisits.read(TestVisits.six(List.of()), 1, "5.0", "3.0", "2.0");
-    FindingLine wild = new FindingLine(List.of(1, 3), "A try lies apart", "", false);
-    FindingLine room = new FindingLine(List.of(2), "No room", "", true);
+    FindingLine wild = line(FindingSpot.Part.NOTE, "A try lies apart", 1, 3);
+    FindingLine room = line(FindingSpot.Part.SADDLE, "No room", 2);
     assertThat(picture(record, 1, wild, room).findings())
         .containsExactly(
             new FindingMark(1, 0, 12, "A try lies apart"),
             new FindingMark(1, 2, 12, "A try lies apart"),
             new FindingMark(2, 1, FindingMark.AT_SADDLE, "No room"));
+  }
+
+  @Test
+  void marksCausesAtNutFretAndString() {
+    VisitRecord record = TestVisits.read(TestVisits.six(List.of()), 1, "5.0");
+    FindingLine fret =
+        new FindingLine(
+            List.of(), new FindingSpot(FindingSpot.Part.FRET, 7), "Fret 7", "", "", "", "");
+    FindingLine action = line(FindingSpot.Part.NOWHERE, "Action");
+    FindingLine nut = line(FindingSpot.Part.NUT, "Nut slot high", 2);
+    FindingLine string = line(FindingSpot.Part.STRING, "False string", 6);
+    assertThat(picture(record, 1, fret, action, nut, string).findings())
+        .containsExactly(
+            new FindingMark(1, FindingMark.ALL_STRINGS, 7, "Fret 7"),
+            new FindingMark(3, 1, 0, "Nut slot high"),
+            new FindingMark(4, 5, FindingMark.ON_STRING, "False string"));
+  }
+
+  private static FindingLine line(FindingSpot.Part part, String head, Integer... strings) {
+    return new FindingLine(List.of(strings), new FindingSpot(part, 0), head, "", "", "", "");
   }
 
   private static Neck neck(int strings) {

@@ -26,10 +26,9 @@ class ShownFretsTest {
   }
 
   @Test
-  void refusesMoreThanTheStripCanHold() {
-    assertThatThrownBy(() -> ShownFrets.parse("1 2 3 4 5 6 7 8 9", FRETS))
-        .isInstanceOfSatisfying(
-            Rejection.class, r -> assertThat(r.reason().key()).isEqualTo("visit.frets.too-many"));
+  void takesAsManyFretsAsOneWantsToRead() {
+    assertThat(ShownFrets.parse("17 1 2 3 5 7 9 12 15", FRETS).written())
+        .isEqualTo("1 2 3 5 7 9 12 15 17");
   }
 
   @Test

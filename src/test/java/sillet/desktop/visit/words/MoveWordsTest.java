@@ -11,9 +11,11 @@ import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.moves.MoveFigures;
 import sillet.logbook.text.Texts;
 import sillet.logbook.units.Figures;
+import sillet.logbook.visits.InstrumentPast;
 import sillet.logbook.visits.StringPass;
 import sillet.logbook.visits.Travel;
 import sillet.logbook.visits.VisitMoves;
+import sillet.logbook.visits.VisitPass;
 import sillet.logbook.visits.VisitRecord;
 
 class MoveWordsTest {
@@ -96,20 +98,18 @@ class MoveWordsTest {
   void namesAMoveThatDidNotActAsItMust() {
     VisitRecord moved = TestVisits.moved(TestVisits.read(visit(), 1, "5.0"), 1, 1, 1.86);
     VisitRecord again = TestVisits.read(moved, 2, "5.1");
-    List<StringPass> strings = VisitMoves.of(again, ADVISOR).get(1);
-    List<FindingLine> findings = new FindingLines(Texts.english(), ADVISOR).of(strings);
+    VisitPass pass = VisitMoves.passes(again, InstrumentPast.NONE, ADVISOR).get(1);
+    List<FindingLine> findings = new FindingLines(Texts.english(), ADVISOR).of(pass);
     assertThat(findings).hasSize(1);
-    assertThat(findings.get(0).head()).isEqualTo("Reading, string 1");
+    assertThat(findings.get(0).head()).isEqualTo("Reading in doubt, string 1");
     assertThat(findings.get(0).sentence()).contains("+5.0", "+5.1");
   }
 
   @Test
-  void saysTheSameFindingOfSeveralStringsOnce() {
+  void namesEachStringWhoseTriesLieApart() {
     VisitRecord read = TestVisits.read(visit(), 1, "1.0/1.1/9.0", "2.0", "1.0/1.1/9.0");
-    List<StringPass> strings = VisitMoves.of(read, ADVISOR).get(0);
-    List<FindingLine> findings = new FindingLines(Texts.english(), ADVISOR).of(strings);
-    assertThat(findings).hasSize(1);
-    assertThat(findings.get(0).strings()).containsExactly(1, 3);
-    assertThat(findings.get(0).head()).endsWith("strings 1, 3");
+    VisitPass pass = VisitMoves.passes(read, InstrumentPast.NONE, ADVISOR).get(0);
+    List<FindingLine> findings = new FindingLines(Texts.english(), ADVISOR).of(pass);
+    assertThat(findings).extracting(FindingLine::strings).contains(List.of(1), List.of(3));
   }
 }
