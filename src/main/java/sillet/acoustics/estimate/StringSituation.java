@@ -38,6 +38,12 @@ public record StringSituation(StringLie lie, Fretting fretting, FretPlaces fretP
     return -Cents.ofRatio(1 - fretPlaces.at(fret) / length);
   }
 
+  /** What a metre toward the bridge adds at a fret that lies true, cents. */
+  double centsPerMetreOfPlace(int fret) {
+    return Cents.ofSmallShare(
+        1 / (lie.scale() / EqualTemperament.ratio(fret) + lie.saddleSetback()));
+  }
+
   /** The same place with the string lying otherwise. */
   public StringSituation withLie(StringLie other) {
     return new StringSituation(other, fretting, fretPlaces);

@@ -1,7 +1,13 @@
 package sillet.acoustics.moves;
 
+import java.util.ArrayList;
 import java.util.List;
-import sillet.acoustics.neck.StringLie;
+import sillet.acoustics.estimate.HeightSds;
+import sillet.acoustics.estimate.InstrumentEvidence;
+import sillet.acoustics.estimate.NeckEstimate;
+import sillet.acoustics.estimate.NeckEstimator;
+import sillet.acoustics.estimate.Occasion;
+import sillet.acoustics.estimate.StringHistory;
 import sillet.acoustics.solve.NotSolved;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.Solved;
@@ -11,62 +17,146 @@ import sillet.acoustics.solve.Solved;
  * string retuned in between; the plain length rule (1731.2/scale cents per metre at fret 12) is off
  * by up to 8 % on short scales and thick strings.
  *
- * <p>The 95 % interval adds the variances of what was read and of the model's own error ({@link
- * MoveTask#modelShare}). What was not read widens it and never stops the search; only a string that
- * no tension brings to pitch, or a reading that no place of the saddle explains, is not solved.
+ * <p>The 95 % interval holds what was read, what was not, and the model's own error. What was not
+ * read widens it and never stops the search; only a string that no tension brings to pitch, or a
+ * reading that no place of the saddle explains, is not solved.
  */
 public final class MoveSolver {
   private MoveSolver() {}
 
   /**
-   * The best move of one string.
+   * The best moves of all strings of an instrument.
    *
-   * @param task string, readings and aim
-   * @return the estimate, or why there is none
+   * @param estimate of the instrument
+   * @param aim what to make true; with {@link Aim#OCTAVE} the nut stays
+   * @param nut how the nut can move
+   * @return one a string, in order, or why there are none
    */
-  public static Outcome<MoveEstimate> solve(MoveTask task) {
-    return switch (task.aim()) {
-      case OCTAVE -> OctaveMove.of(task);
-      case NECK -> NeckMove.of(List.of(task), task.nutFree()).map(estimates -> estimates.get(0));
-    };
+  public static Outcome<List<MoveEstimate>> solve(NeckEstimate estimate, Aim aim, NutFreedom nut) {
+    if (aim == Aim.OCTAVE) {
+      OctaveMoves octaves = new OctaveMoves(estimate);
+      return forEach(estimate, string -> octaves.of(string));
+    }
+    Outcome<List<StringNow>> strings = forEach(estimate, string -> StringNow.of(estimate, string));
+    return strings.flatMap(
+        all ->
+            nut == NutFreedom.WHOLE
+                ? new NeckMoves(estimate, all, aim, new OneNut(all.size())).solve()
+                : oneByOne(estimate, all, aim, nut == NutFreedom.EACH));
   }
 
-  /**
-   * The best saddle moves together with one move of a nut that all strings share; the aim is {@link
-   * Aim#NECK} whatever the tasks say.
-   *
-   * @param tasks the strings on that nut, at least one
-   * @return estimates in the same order with the same nut move, or why there are none
-   * @throws IllegalArgumentException if there is no task
-   */
-  public static Outcome<List<MoveEstimate>> solveWholeNut(List<MoveTask> tasks) {
-    if (tasks.isEmpty()) {
-      throw new IllegalArgumentException("no string on the nut");
-    }
-    return NeckMove.of(List.copyOf(tasks), true);
+  private static Outcome<List<MoveEstimate>> oneByOne(
+      NeckEstimate estimate, List<StringNow> all, Aim aim, boolean nutMoves) {
+    OwnEdges edges = new OwnEdges(nutMoves && aim.weights().size() > 1);
+    return forEach(
+        estimate,
+        string ->
+            new NeckMoves(estimate, List.of(all.get(string)), aim, edges)
+                .solve()
+                .map(moves -> moves.get(0)));
   }
 
   /**
    * What a saddle move other than the best one leaves at fret 12, as when the travel ends.
    *
-   * @param task string and readings
+   * @param estimate of the instrument
+   * @param string 0 first
    * @param saddleMove metres, positive away from the neck, finite
-   * @return cents against the task's reference, or why there are none
+   * @return cents against the string's own reference, or why there are none
    * @throws IllegalArgumentException if the move is not finite
    */
+  public static Outcome<Double> cents12At(NeckEstimate estimate, int string, double saddleMove) {
+    if (!Double.isFinite(saddleMove)) {
+      throw new IllegalArgumentException("move is " + saddleMove);
+    }
+    return new OctaveMoves(estimate).left(string, saddleMove);
+  }
+
+  /** The best move of one string by itself. */
+  public static Outcome<MoveEstimate> solve(MoveTask task) {
+    NutFreedom nut = task.nutFree() ? NutFreedom.EACH : NutFreedom.FIXED;
+    return estimate(List.of(task))
+        .flatMap(estimate -> solve(estimate, task.aim(), nut))
+        .map(moves -> moves.get(0));
+  }
+
+  /** The best moves of strings on one nut, for the whole neck. */
+  public static Outcome<List<MoveEstimate>> solveWholeNut(List<MoveTask> tasks) {
+    if (tasks.isEmpty()) {
+      throw new IllegalArgumentException("no string on the nut");
+    }
+    return estimate(tasks).flatMap(estimate -> solve(estimate, Aim.NECK, NutFreedom.WHOLE));
+  }
+
+  /** What a saddle move of one string by itself leaves at fret 12. */
   public static Outcome<Double> cents12At(MoveTask task, double saddleMove) {
     if (!Double.isFinite(saddleMove)) {
       throw new IllegalArgumentException("move is " + saddleMove);
     }
-    Outcome<OctaveMove.Present> present = OctaveMove.present(task);
-    if (present instanceof NotSolved<OctaveMove.Present> not) {
-      return Outcome.notSolved(not.because());
+    return estimate(List.of(task)).flatMap(estimate -> cents12At(estimate, 0, saddleMove));
+  }
+
+  private static Outcome<NeckEstimate> estimate(List<MoveTask> tasks) {
+    List<StringHistory> strings = new ArrayList<>();
+    for (MoveTask task : tasks) {
+      strings.add(
+          StringHistory.of(
+              Occasion.first(task.lie(), HeightSds.measured(), task.against(), task.readings())));
     }
-    StringLie lie = ((Solved<OctaveMove.Present>) present).value().lie();
-    double cents =
-        OctaveNote.cents(lie.withSaddleSetback(lie.saddleSetback() + saddleMove), task.against());
-    return Double.isFinite(cents)
-        ? Outcome.solved(cents)
-        : Outcome.notSolved("the string cannot be tuned to its pitch after such a move");
+    return NeckEstimator.estimate(new InstrumentEvidence(strings));
+  }
+
+  /** One result a string, or the first reason why there is none. */
+  private interface PerString<T> {
+    Outcome<T> of(int string);
+  }
+
+  private static <T> Outcome<List<T>> forEach(NeckEstimate estimate, PerString<T> what) {
+    List<T> all = new ArrayList<>();
+    for (int string = 0; string < estimate.strings(); string++) {
+      Outcome<T> one = what.of(string);
+      if (one instanceof Solved<T> solved) {
+        all.add(solved.value());
+      } else if (one instanceof NotSolved<T> not) {
+        return Outcome.notSolved(not.because());
+      }
+    }
+    return Outcome.solved(List.copyOf(all));
+  }
+
+  /** One string: its saddle, and its edge of the nut where that moves. */
+  private record OwnEdges(boolean nutMoves) implements NeckMoves.Linkage {
+    @Override
+    public int coordinates() {
+      return nutMoves ? 2 : 1;
+    }
+
+    @Override
+    public double saddle(int place, double[] moves) {
+      return moves[0];
+    }
+
+    @Override
+    public double nut(int place, double[] moves) {
+      return nutMoves ? moves[1] : 0;
+    }
+  }
+
+  /** A saddle each and the same nut. */
+  private record OneNut(int strings) implements NeckMoves.Linkage {
+    @Override
+    public int coordinates() {
+      return strings + 1;
+    }
+
+    @Override
+    public double saddle(int place, double[] moves) {
+      return moves[place];
+    }
+
+    @Override
+    public double nut(int place, double[] moves) {
+      return moves[strings];
+    }
   }
 }

@@ -27,19 +27,6 @@ public record MoveTask(
     boolean nutFree,
     double modelShare) {
   /**
-   * Share by which a move is off even where the string is known: how the string is pressed, how its
-   * ends are held, heights nobody measured. Each cent by which they raise fret 12 unknown to the
-   * model changes the move by 2/1731 of itself; 0.5 % stands for four such cents.
-   */
-  private static final double KNOWN_STRING = 0.005;
-
-  /**
-   * What an error of the axial stiffness does. Stretch and bending raise fret 12 by some 10 cents
-   * on a thick string, which is 2 x 10/1731 of the move; bending errs by up to double the share.
-   */
-  private static final double PER_STIFFNESS = 0.03;
-
-  /**
    * Checks and copies the readings.
    *
    * @throws IllegalArgumentException if a fret is read twice or the share is out of range
@@ -65,7 +52,7 @@ public record MoveTask(
    * @return share of the move, about 0.005 for a plain steel string, 0.009 where a core was guessed
    */
   public static double modelShareOf(StringConstants constants) {
-    return Math.min(1, Math.hypot(KNOWN_STRING, PER_STIFFNESS * constants.relativeSd()));
+    return ModelShare.of(constants);
   }
 
   /**

@@ -27,6 +27,9 @@ final class OctaveNote {
   /** Farthest setback looked at, either way, as a share of the scale: 400 cents at fret 12. */
   private static final double FARTHEST = 0.25;
 
+  /** Shortest move over which a mean slope is taken, metres; 0.03 cents on a guitar. */
+  private static final double SHORTEST = 1e-5;
+
   private OctaveNote() {}
 
   /** Cents at fret 12; NaN where the string cannot be tuned. */
@@ -38,19 +41,21 @@ final class OctaveNote {
 
   /** Cents at fret 12. */
   static double cents(FrettedPitch pitch, Reference against) {
-    return cents(pitch, FRET, against);
-  }
-
-  /** Cents at any fret. */
-  static double cents(FrettedPitch pitch, int fret, Reference against) {
     return against == Reference.HARMONIC
-        ? pitch.centsAgainstHarmonic(fret)
-        : pitch.centsAgainstOpen(fret);
+        ? pitch.centsAgainstHarmonic(FRET)
+        : pitch.centsAgainstOpen(FRET);
   }
 
   /** Cents per metre of saddle move if length were all there is; negative. */
   static double plainSlope(StringLie lie) {
     return -Cents.PER_UNIT / lie.scale();
+  }
+
+  /** Mean change of cents per metre over a move that starts at the lie; negative. */
+  static double slope(StringLie lie, Reference against, double move) {
+    double way = Math.abs(move) < SHORTEST ? SHORTEST : move;
+    StringLie then = lie.withSaddleSetback(lie.saddleSetback() + way);
+    return (cents(then, against) - cents(lie, against)) / way;
   }
 
   /** The lie whose saddle stands so that fret 12 has these cents. */

@@ -9,9 +9,14 @@ package sillet.acoustics.wire;
  * @param relativeSd standard deviation of the axial stiffness as a share of it (0.03 = 3 %); that
  *     of the bending stiffness is about double where a core was estimated, since it goes with the
  *     fourth power of the thickness
+ * @param spread the same in its parts
  */
 public record StringConstants(
-    double unitMass, double axialStiffness, double bendingStiffness, double relativeSd) {
+    double unitMass,
+    double axialStiffness,
+    double bendingStiffness,
+    double relativeSd,
+    WireSpread spread) {
 
   /** Refuses, as the caller's bug, what is not finite or has the wrong sign. */
   public StringConstants {
@@ -23,9 +28,21 @@ public record StringConstants(
     requireNotNegative("relative sd", relativeSd);
   }
 
+  /** A string whose spread is that of {@link WireSpread#ofAxial}. */
+  public StringConstants(
+      double unitMass, double axialStiffness, double bendingStiffness, double relativeSd) {
+    this(
+        unitMass,
+        axialStiffness,
+        bendingStiffness,
+        relativeSd,
+        WireSpread.ofAxial(relativeSd >= 0 ? relativeSd : 0));
+  }
+
   /** The same string with its axial stiffness taken times {@code factor}; bending unchanged. */
   public StringConstants stretchedBy(double factor) {
-    return new StringConstants(unitMass, axialStiffness * factor, bendingStiffness, relativeSd);
+    return new StringConstants(
+        unitMass, axialStiffness * factor, bendingStiffness, relativeSd, spread);
   }
 
   private static void requireNotNegative(String what, double value) {

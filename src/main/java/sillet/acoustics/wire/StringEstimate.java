@@ -19,6 +19,7 @@ public final class StringEstimate {
   private static final double PLAIN_STEEL_SD = 0.03;
   private static final double KNOWN_CORE_SD = 0.04;
   private static final double SOFT_SD = 0.20;
+  private static final double WEIGHED_SD = 0.01;
 
   /** Share of the ring that a close winding of round wire fills. */
   private static final double WINDING_FILL = Math.PI / 4;
@@ -37,7 +38,8 @@ public final class StringEstimate {
     requirePositive("pitch", openHz);
     requirePositive("scale", scale);
     if (spec.construction() == Construction.WOUND_NYLON) {
-      return WoundNylon.estimate(spec, openHz, scale, SOFT_SD);
+      return WoundNylon.estimate(
+          spec, openHz, scale, SOFT_SD, new WireSpread(0, 0.15, 0.6, mass(spec, 0.04)));
     }
     return spec.construction().wound() ? wound(spec, scale) : plain(spec, openHz, scale);
   }
@@ -53,7 +55,10 @@ public final class StringEstimate {
         unitMass,
         modulus * area,
         modulus * CoreShape.ROUND.secondMoment(spec.diameter()),
-        spec.construction().steel() ? PLAIN_STEEL_SD : SOFT_SD);
+        spec.construction().steel() ? PLAIN_STEEL_SD : SOFT_SD,
+        spec.construction().steel()
+            ? new WireSpread(0, PLAIN_STEEL_SD, 0.01, mass(spec, 0.01))
+            : new WireSpread(0, 0.15, 0.06, mass(spec, 0.04)));
   }
 
   private static StringConstants wound(StringSpec spec, double scale) {
@@ -67,7 +72,16 @@ public final class StringEstimate {
     double modulus = steel.modulus(0);
     Double mass = spec.unitMass();
     double unitMass = mass != null ? mass : steel.density() * area + windingMass(spec, core);
-    return new StringConstants(unitMass, modulus * area, modulus * shape.secondMoment(core), sd);
+    WireSpread spread =
+        given != null
+            ? new WireSpread(0.01, KNOWN_CORE_SD, 0.08, mass(spec, 0.02))
+            : new WireSpread(usual.relativeSd(), KNOWN_CORE_SD, 0.08, mass(spec, 0.03));
+    return new StringConstants(
+        unitMass, modulus * area, modulus * shape.secondMoment(core), sd, spread);
+  }
+
+  private static double mass(StringSpec spec, double estimated) {
+    return spec.unitMass() == null ? estimated : WEIGHED_SD;
   }
 
   private static double windingMass(StringSpec spec, double core) {

@@ -20,14 +20,15 @@ final class WoundNylon {
 
   private WoundNylon() {}
 
-  static StringConstants estimate(StringSpec spec, double openHz, double scale, double spread) {
+  static StringConstants estimate(
+      StringSpec spec, double openHz, double scale, double sd, WireSpread spread) {
     double speed = 2 * scale * openHz;
     Double given = spec.unitMass();
     double unitMass = given != null ? given : at(TENSION, openHz) / (speed * speed);
     double tension = unitMass * speed * speed;
     double kappa = at(KAPPA, openHz);
     double delta = BENDING_FACTOR * Math.sqrt(kappa) * spec.diameter() / 2;
-    return new StringConstants(unitMass, kappa * tension, delta * delta * tension, spread);
+    return new StringConstants(unitMass, kappa * tension, delta * delta * tension, sd, spread);
   }
 
   private static double at(double[] values, double hz) {

@@ -51,6 +51,7 @@ final class NeckTask implements Task {
       List<BenchString> strings, List<List<FretReading>> readings, NutRoom nut, Score score) {
     void run() {
       List<double[]> best = best();
+      count(MODEL, Solver.together(strings, readings, nut), best);
       count(ONE_BY_ONE, Solver.oneByOne(strings, readings, nut), best);
       if (nut != NutRoom.WHOLE) {
         count(LINEAR, plain(true), best);

@@ -101,7 +101,7 @@ class OctaveMoveTest {
 
     MoveEstimate estimate = solve(task);
 
-    double sd = Math.hypot(0.3 / estimate.centsPerMetre(), 0.02 * estimate.saddleMove());
+    double sd = Math.hypot(0.3 / estimate.centsPerMetre(), 0.005 * estimate.saddleMove());
     assertThat(estimate.saddleHigh() - estimate.saddleMove()).isCloseTo(1.96 * sd, within(1e-7));
     assertThat(estimate.saddleMove() - estimate.saddleLow()).isCloseTo(1.96 * sd, within(1e-7));
     assertThat(estimate.cents12Sd()).isEqualTo(0.3);

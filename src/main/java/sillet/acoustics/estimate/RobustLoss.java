@@ -1,0 +1,89 @@
+package sillet.acoustics.estimate;
+
+import sillet.acoustics.pitch.Cents;
+
+/**
+ * What is learned on the way of how far readings may be believed: weights of wild readings (Huber's
+ * at first, which have one optimum, then ones that let go), wider expectations for frets and slots
+ * that stand out, and how far the notes of this instrument stray.
+ */
+final class RobustLoss {
+  /** Standard deviations up to which a reading is believed. */
+  private static final double BELIEVED = 2.5;
+
+  /** Round from which on a wild reading is let go. */
+  private static final int LET_GO_FROM = 3;
+
+  private static final double LEAST_WEIGHT = 1e-6;
+
+  private final InstrumentModel model;
+  private final Noise noise;
+  private final double[] expected;
+
+  RobustLoss(InstrumentModel model, Noise noise) {
+    this.model = model;
+    this.noise = noise;
+    this.expected = model.unknowns().sds();
+  }
+
+  /** Puts what is learned into the expectations; the point stays where it is. */
+  void expect(State state) {
+    for (int i = 0; i < expected.length; i++) {
+      Unknown unknown = model.unknowns().at(i);
+      boolean slot = unknown.kind() == Unknown.Kind.SLOT;
+      if (slot || unknown.kind() == Unknown.Kind.FRET) {
+        double sd = slot ? slot(unknown) : expected[i];
+        state.countIn(i, sd / Math.sqrt(weight(state.value(i) / sd, false)));
+      }
+    }
+  }
+
+  /** A slot's edge and the straying of the open string do the same to every note. */
+  private double slot(Unknown unknown) {
+    if (unknown.sd() != Expectations.SLOT) {
+      return unknown.sd();
+    }
+    double scale = model.now().get(unknown.string()).occasion().lie().scale();
+    return Math.hypot(unknown.sd(), noise.stray() * scale / Cents.PER_UNIT);
+  }
+
+  /** Whether slopes and point have to be reckoned anew. */
+  boolean learn(int round, Linearized rows, Posterior posterior, State state) {
+    if (round == 0) {
+      return false;
+    }
+    for (int row = 0; row < noise.readings().count(); row++) {
+      noise.weight(row, weight(rows.residual(row) / noise.sd(row), round >= LET_GO_FROM));
+    }
+    noise.stray(stray(rows, posterior));
+    expect(state);
+    return true;
+  }
+
+  private static double weight(double off, boolean letGo) {
+    double share = BELIEVED / Math.max(BELIEVED, Math.abs(off));
+    return Math.max(LEAST_WEIGHT, letGo ? share * share : share);
+  }
+
+  /** One step of expectation and maximisation. */
+  private double stray(Linearized rows, Posterior posterior) {
+    double squares = Expectations.STRAY_COUNT * Expectations.STRAY_CENTS * Expectations.STRAY_CENTS;
+    double count = Expectations.STRAY_COUNT;
+    for (int[] note : noise.readings().notes()) {
+      double left = noise.strayLeft(note);
+      double[] slopes = new double[expected.length];
+      double strays = 0;
+      for (int row : note) {
+        double weighed = left * noise.precision(row);
+        strays += weighed * rows.residual(row);
+        double[] own = rows.slopes(row);
+        for (int i = 0; i < slopes.length; i++) {
+          slopes[i] += weighed * own[i];
+        }
+      }
+      squares += strays * strays + left + posterior.variance(slopes);
+      count++;
+    }
+    return Math.sqrt(squares / count);
+  }
+}
