@@ -3,10 +3,8 @@ package sillet.logbook.moves;
 import java.util.ArrayList;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
-import sillet.acoustics.moves.Aim;
+import sillet.acoustics.estimate.NeckEstimate;
 import sillet.acoustics.moves.MoveEstimate;
-import sillet.acoustics.moves.MoveSolver;
-import sillet.acoustics.moves.MoveTask;
 import sillet.acoustics.solve.NotSolved;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.Solved;
@@ -14,8 +12,6 @@ import sillet.logbook.text.Message;
 
 /** Tells for each string of an instrument how far its saddle goes, and what a saddle cannot do. */
 public final class MoveAdvisor {
-  private static final double MM_PER_M = 1e3;
-
   private final double breakingShare;
 
   /**
@@ -29,77 +25,61 @@ public final class MoveAdvisor {
   }
 
   /**
-   * Advises on the strings of one instrument together.
+   * Advises on the strings of one instrument together, read for the first time.
    *
-   * @param strings all of the same instrument, each with at least one reading
+   * @param strings all of the same instrument, string 1 first; readings may be missing
    * @param aim what shall become true
    * @return one advice for each string, in the same order, and what concerns all; figures that
    *     cannot be solved are missing and say why
    */
   public InstrumentAdvice advise(List<BenchString> strings, AimChoice aim) {
-    List<MoveAdvice> advice =
-        each(strings, aim.kind() == AimChoice.Kind.OCTAVE ? Aim.OCTAVE : Aim.NECK);
-    List<FindingReport> findings =
-        advice.stream().flatMap(one -> one.findings().stream()).distinct().toList();
+    return adviseOn(strings.stream().map(BenchHistory::of).toList(), aim);
+  }
+
+  /**
+   * Advises on the strings of one instrument together, with everything that was read before.
+   *
+   * @param strings all of the same instrument, string 1 first
+   * @param aim what shall become true
+   * @return one advice for each string, in the same order, and what concerns all; figures that
+   *     cannot be solved are missing and say why
+   */
+  public InstrumentAdvice adviseOn(List<BenchHistory> strings, AimChoice aim) {
+    if (strings.isEmpty()) {
+      return new InstrumentAdvice(List.of(), List.of(), null);
+    }
+    KnownNeck neck = KnownNeck.of(strings);
+    List<FindingReport> findings = NeckReports.of(neck);
+    List<Outcome<MoveEstimate>> moves = new InstrumentMoves(neck, aim).solve();
+    List<MoveAdvice> advice = new ArrayList<>(strings.size());
+    for (int i = 0; i < strings.size(); i++) {
+      advice.add(advice(neck, i, moves.get(i), findings));
+    }
     return new InstrumentAdvice(advice, findings, null);
   }
 
-  private List<MoveAdvice> each(List<BenchString> strings, Aim aim) {
-    List<MoveTask> tasks = strings.stream().map(s -> AcousticString.task(s, aim)).toList();
-    boolean nutAsOne =
-        aim == Aim.NECK && strings.stream().anyMatch(s -> s.room().nut() == NutMovable.WHOLE);
-    if (nutAsOne) {
-      return withOneNut(strings, tasks);
-    }
-    List<MoveAdvice> advice = new ArrayList<>(strings.size());
-    for (int i = 0; i < tasks.size(); i++) {
-      advice.add(advice(strings.get(i), tasks.get(i), MoveSolver.solve(tasks.get(i))));
-    }
-    return advice;
-  }
-
-  private List<MoveAdvice> withOneNut(List<BenchString> strings, List<MoveTask> tasks) {
-    Outcome<List<MoveEstimate>> outcome = MoveSolver.solveWholeNut(tasks);
-    List<MoveAdvice> advice = new ArrayList<>(strings.size());
-    for (int i = 0; i < tasks.size(); i++) {
-      int place = i;
-      advice.add(advice(strings.get(i), tasks.get(i), outcome.map(all -> all.get(place))));
-    }
-    return advice;
-  }
-
-  private MoveAdvice advice(BenchString string, MoveTask task, Outcome<MoveEstimate> outcome) {
+  private MoveAdvice advice(
+      KnownNeck neck, int index, Outcome<MoveEstimate> outcome, List<FindingReport> findings) {
+    BenchString string = neck.strings().get(index).now();
     MoveNotes notes = new MoveNotes(string);
-    List<FindingReport> findings = notes.wildTries();
+    notes.wildTries();
     Verdict verdict = Verdict.LEAVE;
     MoveFigures figures = null;
-    if (outcome instanceof Solved<MoveEstimate> solved) {
-      figures = figures(string, solved.value());
-      verdict = verdict(string, figures);
-      notes.verdict(verdict, figures, centsLeft(string, task, figures));
+    List<FretCents> cents = List.of();
+    NeckEstimate estimate = neck.estimate();
+    if (outcome instanceof Solved<MoveEstimate> solved && estimate != null) {
+      AdviceFigures out = new AdviceFigures(estimate, neck.place(index), string);
+      figures = out.of(solved.value());
+      cents = out.neck(solved.value());
+      verdict = MoveVerdict.of(string, figures);
+      notes.verdict(verdict, figures, out.centsLeft(figures));
     } else if (outcome instanceof NotSolved<MoveEstimate> not) {
       notes.notSolved(not.because());
     }
     notes.strain(AcousticString.shareOfBreaking(string.string()), breakingShare);
-    return new MoveAdvice(string, figures, verdict, List.of(), findings, notes.all());
-  }
-
-  private static MoveFigures figures(BenchString string, MoveEstimate estimate) {
-    Double screw = string.room().screwMm();
-    double saddleMm = estimate.saddleMove() * MM_PER_M;
-    return new MoveFigures(
-        saddleMm,
-        estimate.saddleLow() * MM_PER_M,
-        estimate.saddleHigh() * MM_PER_M,
-        screw == null ? null : Math.abs(saddleMm) / screw,
-        string.room().nut() == NutMovable.NO ? null : estimate.nutMove() * MM_PER_M,
-        estimate.cents12Before(),
-        estimate.cents12Sd(),
-        estimate.cents12After(),
-        estimate.rmsBefore(),
-        estimate.rmsAfter(),
-        estimate.centsPerMetre() / MM_PER_M,
-        estimate.setbackNow() * MM_PER_M);
+    List<FindingReport> own =
+        findings.stream().filter(one -> one.concerns(string.string().number())).toList();
+    return new MoveAdvice(string, figures, verdict, cents, own, notes.all());
   }
 
   /**
@@ -111,41 +91,7 @@ public final class MoveAdvisor {
    * @return what to do
    */
   public static Verdict verdict(BenchString string, MoveFigures figures) {
-    boolean zeroInside = figures.lowMm() <= 0 && figures.highMm() >= 0;
-    if (zeroInside || belowTypedStep(string, figures)) {
-      return Verdict.LEAVE;
-    }
-    Double room = string.room().toward(figures.saddleMm());
-    if (room != null && Math.abs(figures.saddleMm()) > room) {
-      return string.room().onePiece() ? Verdict.SLOT : Verdict.NO_ROOM;
-    }
-    return Verdict.MOVE;
-  }
-
-  /** Half a step of the last typed digit, carried to the saddle. */
-  private static boolean belowTypedStep(BenchString string, MoveFigures figures) {
-    var twelve = string.readings().frets().get(12);
-    if (twelve == null) {
-      return false;
-    }
-    double halfStepCents = twelve.roundingSd() * Math.sqrt(12) / 2;
-    return Math.abs(figures.saddleMm() * figures.centsPerMm()) < halfStepCents;
-  }
-
-  /**
-   * What stays at fret 12 when the saddle goes to the end of its travel, cents; null where it fits
-   * or is not known.
-   */
-  private static @Nullable Double centsLeft(
-      BenchString string, MoveTask task, MoveFigures figures) {
-    Double room = string.room().toward(figures.saddleMm());
-    if (room == null || Math.abs(figures.saddleMm()) <= room) {
-      return null;
-    }
-    double possible = Math.copySign(room, figures.saddleMm()) / MM_PER_M;
-    return MoveSolver.cents12At(task, possible) instanceof Solved<Double> solved
-        ? solved.value()
-        : null;
+    return MoveVerdict.of(string, figures);
   }
 
   /**
@@ -158,8 +104,13 @@ public final class MoveAdvisor {
    */
   public static List<Message> notes(BenchString string, MoveFigures figures, Verdict verdict) {
     MoveNotes notes = new MoveNotes(string);
-    MoveTask task = AcousticString.task(string, Aim.OCTAVE);
-    notes.verdict(verdict, figures, centsLeft(string, task, figures));
+    Double room = string.room().toward(figures.saddleMm());
+    Double left = null;
+    if (room != null && Math.abs(figures.saddleMm()) > room) {
+      double possible = Math.copySign(room, figures.saddleMm());
+      left = figures.cents12Before() + figures.centsPerMm() * possible;
+    }
+    notes.verdict(verdict, figures, left);
     return notes.all();
   }
 

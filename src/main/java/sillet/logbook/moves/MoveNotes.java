@@ -2,14 +2,11 @@ package sillet.logbook.moves;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.OptionalDouble;
-import java.util.OptionalInt;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import sillet.logbook.text.Message;
 import sillet.logbook.units.Figures;
-import sillet.logbook.units.Tries;
 
 /** The sentences that go with one string's figures. */
 final class MoveNotes {
@@ -31,31 +28,9 @@ final class MoveNotes {
     return List.copyOf(notes);
   }
 
-  /** Names each try that lies apart from the others. */
-  List<FindingReport> wildTries() {
-    List<FindingReport> found = new ArrayList<>();
-    for (Map.Entry<Integer, Tries> entry : string.readings().frets().entrySet()) {
-      Tries tries = entry.getValue();
-      OptionalInt wild = AcousticString.spread(tries, string.readings()).wildTry();
-      if (wild.isPresent()) {
-        var one = tries.cents().get(wild.getAsInt());
-        Message said =
-            Message.of(
-                "move.wild-try",
-                Integer.toString(wild.getAsInt() + 1),
-                Integer.toString(entry.getKey()),
-                Figures.fixed(one.value(), one.decimals()));
-        notes.add(said);
-        found.add(reading(entry.getKey(), said));
-      }
-    }
-    return found;
-  }
-
-  private FindingReport reading(int fret, Message evidence) {
-    int number = string.string().number();
-    Message again = Message.of("finding.reading.do");
-    return new FindingReport(Finding.READING, number, fret, false, 0, evidence, again, null);
+  /** Names each note whose tries do not agree. */
+  void wildTries() {
+    Disagreements.of(string).forEach(odd -> notes.add(odd.said()));
   }
 
   void notSolved(String because) {

@@ -27,6 +27,17 @@ public record NoteReadings(
   }
 
   /**
+   * The tries at a fret taken together.
+   *
+   * @param fret 1 to 24
+   * @return what was read, or null if nothing was
+   */
+  public @Nullable NoteRead at(int fret) {
+    Tries tries = frets.get(fret);
+    return tries == null ? null : BenchEvidence.read(tries, this);
+  }
+
+  /**
    * Readings against the open string with the usual scatter.
    *
    * @param frets tries by fret

@@ -2,32 +2,33 @@ package sillet.logbook.visits;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import org.jspecify.annotations.Nullable;
+import sillet.logbook.moves.AimChoice;
+import sillet.logbook.moves.BenchHistory;
 import sillet.logbook.moves.BenchString;
 import sillet.logbook.moves.FindingReport;
 import sillet.logbook.moves.InstrumentAdvice;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.moves.MoveFigures;
-import sillet.logbook.moves.NutMovable;
-import sillet.logbook.moves.SaddleRoom;
-import sillet.logbook.strings.FittedString;
 
 /**
  * A whole visit reckoned through: every pass, every string, each pass proving the moves of the one
  * before.
  */
 public final class VisitMoves {
-  private final VisitRecord record;
+  private final StringChains chains;
+  private final AimChoice aim;
   private final MoveAdvisor advisor;
-  private final PassReadings readings;
 
-  private VisitMoves(VisitRecord record, MoveAdvisor advisor) {
-    this.record = record;
+  private VisitMoves(StringChains chains, AimChoice aim, MoveAdvisor advisor) {
+    this.chains = chains;
+    this.aim = aim;
     this.advisor = advisor;
-    this.readings = new PassReadings(record.readings());
   }
 
   /**
@@ -51,7 +52,19 @@ public final class VisitMoves {
    */
   public static List<VisitPass> passes(
       VisitRecord record, InstrumentPast past, MoveAdvisor advisor) {
-    return new VisitMoves(record, advisor).passes();
+    return new VisitMoves(new StringChains(past, record), record.aim().aim(), advisor).passes();
+  }
+
+  /**
+   * Every string with all that was read of it up to the last pass of a visit, as it stands now.
+   *
+   * @param record everything the logbook holds of the visit
+   * @param past what came before
+   * @return a history for each string, string 1 first
+   */
+  public static List<BenchHistory> histories(VisitRecord record, InstrumentPast past) {
+    StringChains chains = new StringChains(past, record);
+    return chains.upTo(chains.visit().lastPass(), Set.of());
   }
 
   /**
@@ -66,18 +79,43 @@ public final class VisitMoves {
 
   private List<VisitPass> passes() {
     List<VisitPass> passes = new ArrayList<>();
-    int last = readings.lastPass(record.moves());
-    for (int pass = 1; pass <= last; pass++) {
-      passes.add(pass(pass, passes.isEmpty() ? null : passes.get(passes.size() - 1).strings()));
+    for (int pass = 1; pass <= chains.visit().lastPass(); pass++) {
+      VisitPass before = passes.isEmpty() ? null : passes.get(passes.size() - 1);
+      passes.add(pass(pass, before == null ? null : before.strings()));
     }
     return passes;
   }
 
   private VisitPass pass(int pass, @Nullable List<StringPass> before) {
-    List<BenchString> bench = bench(pass);
-    List<BenchString> read = bench.stream().filter(s -> !s.readings().frets().isEmpty()).toList();
-    InstrumentAdvice advice = advisor.advise(read, record.aim().aim());
-    List<StringPass> strings = strings(pass, bench, byNumber(advice), before);
+    List<BenchString> bench = chains.visit().in(pass);
+    if (bench.stream().allMatch(string -> string.readings().frets().isEmpty())) {
+      InstrumentAdvice none = new InstrumentAdvice(List.of(), List.of(), null);
+      return new VisitPass(strings(pass, bench, none, before), List.of(), null);
+    }
+    InstrumentAdvice advice = advisor.adviseOn(chains.upTo(pass, Set.of()), aim);
+    List<StringPass> strings = strings(pass, bench, advice, before);
+    Set<Integer> slipped = slipped(strings);
+    if (!slipped.isEmpty()) {
+      advice = advisor.adviseOn(chains.upTo(pass, slipped), aim);
+      strings = strings(pass, bench, advice, before);
+    }
+    return new VisitPass(strings, findings(advice, strings), advice.bridge());
+  }
+
+  /** Strings whose move before this pass did not act as the model says. */
+  private static Set<Integer> slipped(List<StringPass> strings) {
+    Set<Integer> slipped = new HashSet<>();
+    for (StringPass string : strings) {
+      MoveProof proof = string.proof();
+      if (proof != null && !proof.asPredicted()) {
+        slipped.add(string.string().string().number());
+      }
+    }
+    return slipped;
+  }
+
+  /** Those of the instrument, and what the proofs add. */
+  private static List<FindingReport> findings(InstrumentAdvice advice, List<StringPass> strings) {
     List<FindingReport> found = new ArrayList<>(advice.findings());
     for (StringPass string : strings) {
       MoveAdvice said = string.advice();
@@ -85,88 +123,29 @@ public final class VisitMoves {
         said.findings().stream().filter(f -> !found.contains(f)).forEach(found::add);
       }
     }
-    return new VisitPass(strings, found, advice.bridge());
+    return found;
   }
 
   private List<StringPass> strings(
       int pass,
       List<BenchString> bench,
-      Map<Integer, MoveAdvice> advice,
+      InstrumentAdvice advice,
       @Nullable List<StringPass> before) {
+    Map<Integer, MoveAdvice> byNumber = new HashMap<>();
+    advice.strings().forEach(one -> byNumber.put(one.string().string().number(), one));
     List<StringPass> result = new ArrayList<>();
     for (int i = 0; i < bench.size(); i++) {
       BenchString string = bench.get(i);
+      int number = string.string().number();
       StringPass earlier = before == null ? null : before.get(i);
-      MoveAdvice first = advice.get(string.string().number());
-      ProvedAdvice proved = ProvedAdvice.of(first, earlier);
-      Double made = madeMm(pass, string.string().number());
+      MoveAdvice first = string.readings().frets().isEmpty() ? null : byNumber.get(number);
+      boolean nutMoved = chains.visit().nutMovedMm(number, pass - 1, pass) != 0;
+      ProvedAdvice proved = ProvedAdvice.of(first, nutMoved ? null : earlier, aim);
+      Double made = chains.visit().madeMm(pass, number);
       MoveAdvice last = proved.advice();
       result.add(new StringPass(pass, string, last, made, predicted(last, made), proved.proof()));
     }
     return result;
-  }
-
-  private static Map<Integer, MoveAdvice> byNumber(InstrumentAdvice advice) {
-    Map<Integer, MoveAdvice> result = new HashMap<>();
-    for (MoveAdvice one : advice.strings()) {
-      result.put(one.string().string().number(), one);
-    }
-    return result;
-  }
-
-  private List<BenchString> bench(int pass) {
-    StringHeights heights =
-        pass == 1 ? StringHeights.received(record.checks()) : StringHeights.left(record.checks());
-    List<BenchString> bench = new ArrayList<>();
-    for (FittedString string : record.visit().strings().strings()) {
-      int number = string.number();
-      bench.add(
-          new BenchString(
-              record.instrument().name(),
-              string,
-              heights.of(number),
-              room(pass, number),
-              readings.of(pass, number)));
-    }
-    return bench;
-  }
-
-  private SaddleRoom room(int pass, int string) {
-    double movedMm = 0;
-    for (MadeMove move : record.moves()) {
-      if (move.pass() < pass && move.string() == string) {
-        movedMm += move.saddleMm();
-      }
-    }
-    var saddle = record.instrument().saddle();
-    NutMovable nut = record.aim().nut();
-    Double screw = saddle.screwPitchMm();
-    for (Travel travel : record.visit().travel()) {
-      if (travel.string() == string) {
-        return new SaddleRoom(
-            screw,
-            shifted(travel.backMm(), -movedMm),
-            shifted(travel.forwardMm(), movedMm),
-            saddle.kind(),
-            saddle.thicknessMm(),
-            nut);
-      }
-    }
-    return new SaddleRoom(screw, null, null, saddle.kind(), saddle.thicknessMm(), nut);
-  }
-
-  private static @Nullable Double shifted(@Nullable Double room, double byMm) {
-    return room == null ? null : Math.max(0, room + byMm);
-  }
-
-  private @Nullable Double madeMm(int pass, int string) {
-    Double made = null;
-    for (MadeMove move : record.moves()) {
-      if (move.pass() == pass && move.string() == string) {
-        made = move.saddleMm() + (made == null ? 0 : made);
-      }
-    }
-    return made;
   }
 
   private static @Nullable Double predicted(@Nullable MoveAdvice advice, @Nullable Double made) {
