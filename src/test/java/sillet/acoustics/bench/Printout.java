@@ -3,11 +3,12 @@ package sillet.acoustics.bench;
 import java.io.PrintStream;
 import java.util.Locale;
 import java.util.StringJoiner;
+import java.util.function.Function;
 import sillet.acoustics.virtual.Kind;
 
 /** Lines of the table: task, figure, bar, met or not. Rows nothing was counted for are left out. */
 final class Printout {
-  private static final String LINE = "%-32s %-44s %8s  %-10s %s%n";
+  private static final String LINE = "%-32s %-84s %7s  %-9s %s%n";
 
   private final PrintStream out;
   private final Score score;
@@ -37,6 +38,7 @@ final class Printout {
     }
     Tally all = score.of(row);
     line(row, "mean rms after/at best", all.ratio(), bar);
+    print(row, families(kind -> number("%.3f", score.of(row, kind).ratio())), "", "", "");
     if (all.intervals() > 0) {
       coverage(row, !Double.isNaN(bar));
     }
@@ -47,15 +49,21 @@ final class Printout {
     double share = 100 * all.coverage();
     String met = judged ? yes(share >= 93 && share <= 98) : "";
     print(row, "95 % interval holds, %", number("%.1f", share), judged ? "93-98" : "", met);
-    StringJoiner families = new StringJoiner(" ");
     boolean within = true;
     for (Kind kind : Kind.values()) {
       double own = 100 * score.of(row, kind).coverage();
-      families.add(
-          kind.name().toLowerCase(Locale.ROOT) + " " + String.format(Locale.ROOT, "%.1f", own));
       within &= own >= 90 && own <= 99;
     }
-    print(row, "  " + families, "", judged ? "90-99" : "", judged ? yes(within) : "");
+    String families = families(kind -> number("%.1f", 100 * score.of(row, kind).coverage()));
+    print(row, families, "", judged ? "90-99" : "", judged ? yes(within) : "");
+  }
+
+  private static String families(Function<Kind, String> figure) {
+    StringJoiner families = new StringJoiner(" ");
+    for (Kind kind : Kind.values()) {
+      families.add(kind.name().toLowerCase(Locale.ROOT) + " " + figure.apply(kind));
+    }
+    return families.toString();
   }
 
   void line(Row row, String figure, double value, double atMost) {
