@@ -2,6 +2,8 @@ package sillet.acoustics.bench;
 
 import java.util.ArrayList;
 import java.util.List;
+import sillet.acoustics.estimate.NeckEstimate;
+import sillet.acoustics.moves.NutFreedom;
 import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.readings.Reference;
 import sillet.acoustics.virtual.Luck;
@@ -20,7 +22,7 @@ final class NeckTask implements Task {
   static final double SCATTER = 0.4;
   private static final int[] FRETS = {1, 2, 3, 5, 7, 9, 12, 15, 17};
 
-  static Row row(NutRoom nut, String way) {
+  static Row row(NutFreedom nut, String way) {
     String task =
         switch (nut) {
           case FIXED -> "neck, saddles alone";
@@ -41,28 +43,29 @@ final class NeckTask implements Task {
     for (BenchString string : strings) {
       readings.add(technician.read(string, FRETS));
     }
-    for (NutRoom nut : NutRoom.values()) {
-      new Round(strings, readings, nut, score).run();
+    NeckEstimate together = Solver.estimate(strings, readings);
+    List<NeckEstimate> oneByOne = Solver.oneByOne(strings, readings);
+    for (NutFreedom nut : NutFreedom.values()) {
+      Round round = new Round(strings, readings, nut, score);
+      List<double[]> best = round.best();
+      round.count(MODEL, Solver.neck(together, nut), best);
+      if (nut != NutFreedom.WHOLE) {
+        List<Move> alone = new ArrayList<>();
+        oneByOne.forEach(estimate -> alone.addAll(Solver.neck(estimate, nut)));
+        round.count(ONE_BY_ONE, alone, best);
+        round.count(LINEAR, round.plain(true), best);
+        round.count(RULE, round.plain(false), best);
+      }
     }
   }
 
   /** One way the nut may move. */
   private record Round(
-      List<BenchString> strings, List<List<FretReading>> readings, NutRoom nut, Score score) {
-    void run() {
-      List<double[]> best = best();
-      count(MODEL, Solver.together(strings, readings, nut), best);
-      count(ONE_BY_ONE, Solver.oneByOne(strings, readings, nut), best);
-      if (nut != NutRoom.WHOLE) {
-        count(LINEAR, plain(true), best);
-        count(RULE, plain(false), best);
-      }
-    }
-
+      List<BenchString> strings, List<List<FretReading>> readings, NutFreedom nut, Score score) {
     private List<double[]> best() {
-      if (nut != NutRoom.WHOLE) {
+      if (nut != NutFreedom.WHOLE) {
         return strings.stream()
-            .map(string -> string.truth().bestForNeck(nut == NutRoom.EACH))
+            .map(string -> string.truth().bestForNeck(nut == NutFreedom.EACH))
             .toList();
       }
       double[] together = Truth.bestForWholeNut(strings.stream().map(BenchString::truth).toList());
@@ -83,7 +86,7 @@ final class NeckTask implements Task {
         Move usual = PlainMethods.usualRule(scale, octave);
         moves.add(
             fit
-                ? PlainMethods.linearFit(scale, read, nut == NutRoom.EACH)
+                ? PlainMethods.linearFit(scale, read, nut == NutFreedom.EACH)
                 : Move.plain(usual.saddle(), 0));
       }
       return moves;

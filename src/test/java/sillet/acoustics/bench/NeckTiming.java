@@ -13,6 +13,7 @@ import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.Setup;
 import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
+import sillet.acoustics.moves.NutFreedom;
 import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.readings.Reference;
 import sillet.acoustics.virtual.Kind;
@@ -51,9 +52,9 @@ public class NeckTiming {
     }
   }
 
-  /** Moves string by string. */
+  /** Estimate of all strings and the best moves for the neck. */
   @Benchmark
-  public List<Move> movesOneByOne() {
-    return Solver.oneByOne(strings, readings, NutRoom.EACH);
+  public List<Move> moves() {
+    return Solver.neck(Solver.estimate(strings, readings), NutFreedom.EACH);
   }
 }

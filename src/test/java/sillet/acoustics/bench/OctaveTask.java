@@ -1,8 +1,8 @@
 package sillet.acoustics.bench;
 
+import java.util.ArrayList;
 import java.util.List;
 import sillet.acoustics.moves.MoveEstimate;
-import sillet.acoustics.moves.PassProof;
 import sillet.acoustics.moves.SecondPass;
 import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.virtual.Luck;
@@ -25,31 +25,32 @@ final class OctaveTask implements Task {
   /** Second passes that did not go as predicted. */
   static final Row STRANGE = new Row(TASK, "second pass not as predicted");
 
-  private static final double SCATTER = 0.1;
+  static final double SCATTER = 0.1;
   private static final double RAMP_SD = 0.006;
   private static final double FAR_SHARE = 5.0 / 648;
 
   @Override
   public void run(Case one, Score score) {
     Technician near = new Technician(one.luck(this, 1), Technician.Habits.usual(SCATTER));
-    for (BenchString string : takeIn(one, 0, near)) {
-      FretReading octave = near.read(string, 12);
-      count(score, MODEL, string, move(string, octave));
-      count(score, RULE, string, PlainMethods.usualRule(string.typed().scale(), octave));
-      twoPasses(score, string, octave, near);
-      MoveEstimate unread = Solver.octave(string, near.read(string, 3, 5, 7));
-      count(score, UNREAD, string, Solver.move(unread));
-    }
+    List<BenchString> strings = takeIn(one, 0, near);
+    List<List<FretReading>> octaves = octaves(strings, near);
+    List<MoveEstimate> moves = Solver.octave(strings, octaves);
+    count(score, MODEL, strings, moves.stream().map(Solver::move).toList());
+    count(score, RULE, strings, usualRule(strings, octaves));
+    twoPasses(score, new FirstPass(strings, octaves, moves), near);
+    List<List<FretReading>> others = new ArrayList<>();
+    strings.forEach(string -> others.add(near.read(string, 3, 5, 7)));
+    count(score, UNREAD, strings, model(strings, others));
+
     Technician far = new Technician(one.luck(this, 2), new Technician.Habits(SCATTER, FAR_SHARE));
-    for (BenchString string : takeIn(one, 0, far)) {
-      FretReading octave = far.read(string, 12);
-      count(score, FAR, string, move(string, octave));
-      count(score, FAR_RULE, string, PlainMethods.usualRule(string.typed().scale(), octave));
-    }
+    List<BenchString> away = takeIn(one, 0, far);
+    List<List<FretReading>> awayOctaves = octaves(away, far);
+    count(score, FAR, away, model(away, awayOctaves));
+    count(score, FAR_RULE, away, usualRule(away, awayOctaves));
+
     Technician sloping = new Technician(one.luck(this, 3), Technician.Habits.usual(SCATTER));
-    for (BenchString string : takeIn(one, RAMP_SD, sloping)) {
-      count(score, RAMP, string, move(string, sloping.read(string, 12)));
-    }
+    List<BenchString> ramps = takeIn(one, RAMP_SD, sloping);
+    count(score, RAMP, ramps, model(ramps, octaves(ramps, sloping)));
   }
 
   private List<BenchString> takeIn(Case one, double ramp, Technician technician) {
@@ -57,35 +58,75 @@ final class OctaveTask implements Task {
     return technician.takeIn(new Workshop(luck, ramp).build(one.kind()));
   }
 
-  private static Move move(BenchString string, FretReading octave) {
-    return Solver.move(Solver.octave(string, List.of(octave)));
+  private static List<List<FretReading>> octaves(List<BenchString> strings, Technician technician) {
+    List<List<FretReading>> octaves = new ArrayList<>();
+    strings.forEach(string -> octaves.add(List.of(technician.read(string, 12))));
+    return octaves;
   }
+
+  private static List<Move> model(List<BenchString> strings, List<List<FretReading>> readings) {
+    return Solver.octave(strings, readings).stream().map(Solver::move).toList();
+  }
+
+  private static List<Move> usualRule(List<BenchString> strings, List<List<FretReading>> octaves) {
+    List<Move> moves = new ArrayList<>();
+    for (int i = 0; i < strings.size(); i++) {
+      moves.add(PlainMethods.usualRule(strings.get(i).typed().scale(), octaves.get(i).get(0)));
+    }
+    return moves;
+  }
+
+  private record FirstPass(
+      List<BenchString> strings, List<List<FretReading>> octaves, List<MoveEstimate> moves) {}
 
   /** The first saddle is set by hand, the second is set as it was worked out. */
-  private static void twoPasses(
-      Score score, BenchString string, FretReading octave, Technician technician) {
-    MoveEstimate first = Solver.octave(string, List.of(octave));
-    double between = technician.set(string.found() + first.saddleMove());
-    FretReading again = technician.read(string, 12, between);
-    PassProof proof =
-        SecondPass.combine(
-            octave.cents(),
-            octave.sd(),
-            again.cents(),
-            again.sd(),
-            first.saddleMove(),
-            first.centsPerMetre());
-    score.of(STRANGE, string.kind()).ask(proof.notAsPredicted());
-    double move = between - string.found() + proof.nextMove();
-    double half = 1.96 * proof.nextSd();
-    count(score, TWO_PASSES, string, new Move(move, move - half, move + half, 0));
+  private static void twoPasses(Score score, FirstPass first, Technician technician) {
+    List<Double> stands = new ArrayList<>();
+    List<List<FretReading>> again = new ArrayList<>();
+    for (int i = 0; i < first.strings().size(); i++) {
+      BenchString string = first.strings().get(i);
+      MoveEstimate move = first.moves().get(i);
+      FretReading before = first.octaves().get(i).get(0);
+      double between = technician.set(string.found() + move.saddleMove());
+      FretReading after = technician.read(string, 12, between);
+      stands.add(between);
+      again.add(List.of(after));
+      boolean strange =
+          SecondPass.combine(
+                  before.cents(),
+                  before.sd(),
+                  after.cents(),
+                  after.sd(),
+                  move.saddleMove(),
+                  move.centsPerMetre())
+              .notAsPredicted();
+      score.of(STRANGE, string.kind()).ask(strange);
+    }
+    List<Move> second = new ArrayList<>();
+    List<MoveEstimate> next =
+        Solver.octaveAgain(
+            first.strings(),
+            first.octaves(),
+            first.moves().stream().map(MoveEstimate::saddleMove).toList(),
+            again);
+    for (int i = 0; i < next.size(); i++) {
+      double moved = stands.get(i) - first.strings().get(i).found();
+      MoveEstimate one = next.get(i);
+      second.add(
+          new Move(moved + one.saddleMove(), moved + one.saddleLow(), moved + one.saddleHigh(), 0));
+    }
+    count(score, TWO_PASSES, first.strings(), second);
   }
 
-  private static void count(Score score, Row row, BenchString string, Move move) {
-    Truth truth = string.truth();
-    Tally tally = score.of(row, string.kind());
-    tally.error(truth.cents(12, string.against(), string.found() + move.saddle()));
-    double best = truth.bestForOctave(string.against()) - string.found();
-    tally.interval(move.low(), best, move.high());
+  private static void count(Score score, Row row, List<BenchString> strings, List<Move> moves) {
+    for (int i = 0; i < strings.size(); i++) {
+      BenchString string = strings.get(i);
+      Move move = moves.get(i);
+      Truth truth = string.truth();
+      Tally tally = score.of(row, string.kind());
+      tally.error(truth.cents(12, string.against(), string.found() + move.saddle()));
+      double best = truth.bestForOctave(string.against()) - string.found();
+      tally.interval(move.low(), best, move.high());
+    }
   }
 }

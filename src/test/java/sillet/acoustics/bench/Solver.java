@@ -2,71 +2,89 @@ package sillet.acoustics.bench;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import sillet.acoustics.estimate.HeightSds;
 import sillet.acoustics.estimate.InstrumentEvidence;
+import sillet.acoustics.estimate.NeckEstimate;
 import sillet.acoustics.estimate.NeckEstimator;
 import sillet.acoustics.estimate.Occasion;
 import sillet.acoustics.estimate.StringHistory;
 import sillet.acoustics.moves.Aim;
 import sillet.acoustics.moves.MoveEstimate;
 import sillet.acoustics.moves.MoveSolver;
-import sillet.acoustics.moves.MoveTask;
 import sillet.acoustics.moves.NutFreedom;
 import sillet.acoustics.readings.FretReading;
 
-/** Puts a string on the bench before {@code acoustics}. */
+/** Puts the bench before {@code acoustics}. */
 final class Solver {
   private Solver() {}
 
-  /** The move that makes fret 12 true. */
-  static MoveEstimate octave(BenchString string, List<FretReading> readings) {
-    return MoveSolver.solve(task(string, readings, Aim.OCTAVE, false)).orElseThrow();
-  }
-
-  /** The best moves for the neck, every string estimated by itself. */
-  static List<Move> oneByOne(
-      List<BenchString> strings, List<List<FretReading>> readings, NutRoom nut) {
-    List<MoveTask> tasks = new ArrayList<>();
-    for (int i = 0; i < strings.size(); i++) {
-      tasks.add(task(strings.get(i), readings.get(i), Aim.NECK, nut != NutRoom.FIXED));
-    }
-    List<MoveEstimate> estimates =
-        nut == NutRoom.WHOLE
-            ? MoveSolver.solveWholeNut(tasks).orElseThrow()
-            : tasks.stream().map(one -> MoveSolver.solve(one).orElseThrow()).toList();
-    return estimates.stream().map(Solver::move).toList();
-  }
-
-  /** The best moves for the neck, all strings estimated together. */
-  static List<Move> together(
-      List<BenchString> strings, List<List<FretReading>> readings, NutRoom nut) {
+  /** What is known of the strings on one instrument. */
+  static NeckEstimate estimate(List<BenchString> strings, List<List<FretReading>> readings) {
     List<StringHistory> histories = new ArrayList<>();
     for (int i = 0; i < strings.size(); i++) {
-      BenchString string = strings.get(i);
-      HeightSds heights =
-          string.heightsMeasured()
-              ? HeightSds.measured()
-              : HeightSds.unknown(string.spec().construction());
-      histories.add(
-          StringHistory.of(
-              Occasion.first(string.typed(), heights, string.against(), readings.get(i))));
+      histories.add(StringHistory.of(occasion(strings.get(i), readings.get(i))));
     }
-    return NeckEstimator.estimate(new InstrumentEvidence(histories))
-        .flatMap(one -> MoveSolver.solve(one, Aim.NECK, NutFreedom.valueOf(nut.name())))
-        .orElseThrow()
-        .stream()
+    return NeckEstimator.estimate(new InstrumentEvidence(histories)).orElseThrow();
+  }
+
+  private static Occasion occasion(BenchString string, List<FretReading> readings) {
+    HeightSds heights =
+        string.heightsMeasured()
+            ? HeightSds.measured()
+            : HeightSds.unknown(string.spec().construction());
+    return Occasion.first(string.typed(), heights, string.against(), readings);
+  }
+
+  /** The moves that make fret 12 true. */
+  static List<MoveEstimate> octave(List<BenchString> strings, List<List<FretReading>> readings) {
+    return MoveSolver.solve(estimate(strings, readings), Aim.OCTAVE, NutFreedom.FIXED)
+        .orElseThrow();
+  }
+
+  /** The same once the saddles were moved and fret 12 read again. */
+  static List<MoveEstimate> octaveAgain(
+      List<BenchString> strings,
+      List<List<FretReading>> before,
+      List<Double> moved,
+      List<List<FretReading>> after) {
+    List<StringHistory> histories = new ArrayList<>();
+    for (int i = 0; i < strings.size(); i++) {
+      Occasion first = occasion(strings.get(i), before.get(i));
+      Occasion second =
+          new Occasion(
+              2,
+              1,
+              first.lie(),
+              first.heights(),
+              OptionalDouble.of(moved.get(i)),
+              0,
+              first.against(),
+              after.get(i));
+      histories.add(new StringHistory(List.of(first, second)));
+    }
+    NeckEstimate estimate = NeckEstimator.estimate(new InstrumentEvidence(histories)).orElseThrow();
+    return MoveSolver.solve(estimate, Aim.OCTAVE, NutFreedom.FIXED).orElseThrow();
+  }
+
+  /** The best moves for the neck. */
+  static List<Move> neck(NeckEstimate estimate, NutFreedom nut) {
+    return MoveSolver.solve(estimate, Aim.NECK, nut).orElseThrow().stream()
         .map(Solver::move)
         .toList();
+  }
+
+  /** Every string estimated by itself, as if it were alone on its instrument. */
+  static List<NeckEstimate> oneByOne(List<BenchString> strings, List<List<FretReading>> readings) {
+    List<NeckEstimate> estimates = new ArrayList<>();
+    for (int i = 0; i < strings.size(); i++) {
+      estimates.add(estimate(List.of(strings.get(i)), List.of(readings.get(i))));
+    }
+    return estimates;
   }
 
   static Move move(MoveEstimate estimate) {
     return new Move(
         estimate.saddleMove(), estimate.saddleLow(), estimate.saddleHigh(), estimate.nutMove());
-  }
-
-  private static MoveTask task(
-      BenchString string, List<FretReading> readings, Aim aim, boolean nutFree) {
-    double share = MoveTask.modelShareOf(string.typed().constants());
-    return new MoveTask(string.typed(), readings, string.against(), aim, nutFree, share);
   }
 }

@@ -1,6 +1,7 @@
 package sillet.acoustics.bench;
 
 import java.util.Locale;
+import sillet.acoustics.moves.NutFreedom;
 
 /**
  * Prints how good the whole neck is on virtual instruments that are not the estimation model: task,
@@ -31,9 +32,9 @@ public final class WholeNeckTable {
     Printout print = new Printout(System.out, score);
     print.head();
     octave(print);
-    neck(print, NutRoom.FIXED, 1.015);
-    neck(print, NutRoom.EACH, 1.16);
-    neck(print, NutRoom.WHOLE, NO_BAR);
+    neck(print, NutFreedom.FIXED, 1.015);
+    neck(print, NutFreedom.EACH, 1.16);
+    neck(print, NutFreedom.WHOLE, NO_BAR);
   }
 
   private static void octave(Printout print) {
@@ -47,7 +48,7 @@ public final class WholeNeckTable {
     print.octave(OctaveTask.RAMP, false);
   }
 
-  private static void neck(Printout print, NutRoom nut, double bar) {
+  private static void neck(Printout print, NutFreedom nut, double bar) {
     print.neck(NeckTask.row(nut, NeckTask.MODEL), bar);
     print.neck(NeckTask.row(nut, NeckTask.ONE_BY_ONE), NO_BAR);
     print.neck(NeckTask.row(nut, NeckTask.LINEAR), NO_BAR);
