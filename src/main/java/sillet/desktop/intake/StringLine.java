@@ -3,6 +3,7 @@ package sillet.desktop.intake;
 import java.util.List;
 import java.util.function.Function;
 import sillet.acoustics.wire.Construction;
+import sillet.desktop.controls.GaugeText;
 import sillet.desktop.controls.TypedFieldModel;
 import sillet.logbook.strings.FittedString;
 import sillet.logbook.strings.StringMake;

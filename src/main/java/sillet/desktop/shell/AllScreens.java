@@ -7,6 +7,7 @@ import sillet.desktop.controls.Screen;
 import sillet.desktop.history.HistoryScreen;
 import sillet.desktop.instruments.InstrumentsScreen;
 import sillet.desktop.intake.IntakeScreen;
+import sillet.desktop.sets.SetsScreen;
 import sillet.desktop.visit.VisitScreen;
 
 /**
@@ -16,6 +17,7 @@ final class AllScreens implements Screens {
   private final Desk desk;
   private final Screen bench;
   private final Screen instruments;
+  private final Screen sets;
   private final Screen shop;
 
   /**
@@ -28,6 +30,7 @@ final class AllScreens implements Screens {
   AllScreens(Desk desk, StringProperty searched, Screen shop) {
     this.desk = desk;
     this.bench = new BenchScreen(desk);
+    this.sets = new SetsScreen(desk);
     this.shop = shop;
     this.instruments = new InstrumentsScreen(desk, searched);
   }
@@ -42,6 +45,9 @@ final class AllScreens implements Screens {
     }
     if (place instanceof Place.TakeIn takeIn) {
       return new IntakeScreen(desk, takeIn.instrumentId());
+    }
+    if (place instanceof Place.Sets) {
+      return sets;
     }
     if (place instanceof Place.ShopPlace) {
       return shop;

@@ -20,6 +20,8 @@ final class Keys {
 
     void instruments();
 
+    void sets();
+
     void shop();
 
     void search();
@@ -46,8 +48,10 @@ final class Keys {
     keys.put(new KeyCodeCombination(KeyCode.NUMPAD1, SHORTCUT_DOWN), does::bench);
     keys.put(new KeyCodeCombination(KeyCode.DIGIT2, SHORTCUT_DOWN), does::instruments);
     keys.put(new KeyCodeCombination(KeyCode.NUMPAD2, SHORTCUT_DOWN), does::instruments);
-    keys.put(new KeyCodeCombination(KeyCode.DIGIT3, SHORTCUT_DOWN), does::shop);
-    keys.put(new KeyCodeCombination(KeyCode.NUMPAD3, SHORTCUT_DOWN), does::shop);
+    keys.put(new KeyCodeCombination(KeyCode.DIGIT3, SHORTCUT_DOWN), does::sets);
+    keys.put(new KeyCodeCombination(KeyCode.NUMPAD3, SHORTCUT_DOWN), does::sets);
+    keys.put(new KeyCodeCombination(KeyCode.DIGIT4, SHORTCUT_DOWN), does::shop);
+    keys.put(new KeyCodeCombination(KeyCode.NUMPAD4, SHORTCUT_DOWN), does::shop);
     keys.put(new KeyCodeCombination(KeyCode.F1), does::keySheet);
     keys.put(new KeyCodeCombination(KeyCode.F3), does::search);
     keys.put(new KeyCodeCombination(KeyCode.LEFT, ALT_DOWN), does::back);

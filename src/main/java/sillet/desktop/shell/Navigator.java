@@ -41,6 +41,11 @@ final class Navigator implements GoTo {
     to(new Place.Instruments());
   }
 
+  /** The drawer of string sets; a place the screens do not ask for. */
+  void sets() {
+    to(new Place.Sets());
+  }
+
   /** The shop itself; a place the screens do not ask for. */
   void shop() {
     to(new Place.ShopPlace());

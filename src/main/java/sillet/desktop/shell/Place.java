@@ -11,6 +11,9 @@ sealed interface Place {
   /** The search over instruments. */
   record Instruments() implements Place {}
 
+  /** The drawer of string sets. */
+  record Sets() implements Place {}
+
   /** The shop itself, and the ways to other logbooks. */
   record ShopPlace() implements Place {}
 
@@ -27,12 +30,16 @@ sealed interface Place {
   enum Word {
     BENCH,
     INSTRUMENTS,
+    SETS,
     SHOP
   }
 
   default Word word() {
     if (this instanceof ShopPlace) {
       return Word.SHOP;
+    }
+    if (this instanceof Sets) {
+      return Word.SETS;
     }
     boolean instruments = this instanceof Instruments || this instanceof History;
     return instruments ? Word.INSTRUMENTS : Word.BENCH;

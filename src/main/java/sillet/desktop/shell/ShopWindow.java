@@ -179,6 +179,13 @@ final class ShopWindow implements Doors.House, Keys.Does {
   }
 
   @Override
+  public void sets() {
+    if (navigator != null) {
+      navigator.sets();
+    }
+  }
+
+  @Override
   public void shop() {
     if (navigator != null) {
       navigator.shop();
@@ -209,6 +216,7 @@ final class ShopWindow implements Doors.House, Keys.Does {
     frame.onLeaveDemo(doors::again);
     frame.topLine().onBench(this::bench);
     frame.topLine().onInstruments(this::instruments);
+    frame.topLine().onSets(this::sets);
     frame.topLine().onShop(this::shop);
     SearchKeys.teach(frame.topLine().search(), this::searching, this::toScreen);
   }

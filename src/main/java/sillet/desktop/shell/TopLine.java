@@ -23,6 +23,7 @@ final class TopLine extends VBox {
   private final Texts texts;
   private final Button bench;
   private final Button instruments;
+  private final Button sets;
   private final Button shop;
   private final TextField search = new TextField();
   private final HBox places;
@@ -36,8 +37,9 @@ final class TopLine extends VBox {
     this.texts = texts;
     bench = place("shell.bench", "bench-word");
     instruments = place("shell.instruments", "instruments-word");
+    sets = place("shell.sets", "sets-word");
     shop = place("shell.shop", "shop-word");
-    this.places = new HBox(bench, instruments, shop);
+    this.places = new HBox(bench, instruments, sets, shop);
     places.getStyleClass().add("places");
     places.setMinWidth(Region.USE_PREF_SIZE);
     mark = Mark.small(MarkShape.SAVED, "");
@@ -81,6 +83,10 @@ final class TopLine extends VBox {
     instruments.setOnAction(pressed -> action.run());
   }
 
+  void onSets(Runnable action) {
+    sets.setOnAction(pressed -> action.run());
+  }
+
   void onShop(Runnable action) {
     shop.setOnAction(pressed -> action.run());
   }
@@ -94,6 +100,7 @@ final class TopLine extends VBox {
     Place.Word word = place.word();
     bench.pseudoClassStateChanged(Looks.CURRENT, word == Place.Word.BENCH);
     instruments.pseudoClassStateChanged(Looks.CURRENT, word == Place.Word.INSTRUMENTS);
+    sets.pseudoClassStateChanged(Looks.CURRENT, word == Place.Word.SETS);
     shop.pseudoClassStateChanged(Looks.CURRENT, word == Place.Word.SHOP);
   }
 

@@ -68,7 +68,7 @@ class ScreensLookTest {
       window.press(KeyCode.DOWN);
       window.untilSaid("ticket 1007");
       keep(window, size, "history-" + shape);
-      window.press(KeyCode.CONTROL, KeyCode.DIGIT3);
+      window.press(KeyCode.CONTROL, KeyCode.DIGIT4);
       window.untilShown("#technicians");
       keep(window, size, "shop-" + shape);
     }

@@ -35,7 +35,7 @@ class ShopPlaceTest {
     try (TestWindow window = TestWindow.over(folder)) {
       window.untilShown("#bench-said");
       assertThat(window.shown("#technician")).isFalse();
-      window.press(KeyCode.CONTROL, KeyCode.DIGIT3);
+      window.press(KeyCode.CONTROL, KeyCode.DIGIT4);
       window.untilShown("#technicians");
       assertThat(window.focused()).isEqualTo("shop-name");
       window.robot.clickOn("#technicians");

@@ -1,4 +1,4 @@
-package sillet.desktop.intake;
+package sillet.desktop.controls;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;

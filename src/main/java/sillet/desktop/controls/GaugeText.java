@@ -1,4 +1,4 @@
-package sillet.desktop.intake;
+package sillet.desktop.controls;
 
 import java.util.Locale;
 import java.util.regex.Matcher;
@@ -29,13 +29,25 @@ public final class GaugeText {
     String text = typed.strip().toLowerCase(Locale.ROOT);
     Matcher suffixed = SUFFIXED.matcher(text);
     if (!suffixed.matches()) {
-      throw Rejection.of("intake.gauge.none", Quoted.of(typed.strip()));
+      throw Rejection.of("field.gauge-none", Quoted.of(typed.strip()));
     }
-    double value = DecimalText.parse(suffixed.group(1)).value();
+    double value = number(suffixed.group(1), typed);
     if (value <= 0) {
-      throw Rejection.of("intake.gauge.none", Quoted.of(typed.strip()));
+      throw Rejection.of("field.gauge-none", Quoted.of(typed.strip()));
     }
     return inches(value, suffixed.group(2));
+  }
+
+  /** A number that could be two is said to be so; anything else is no gauge at all. */
+  private static double number(String text, String typed) {
+    try {
+      return DecimalText.parse(text).value();
+    } catch (Rejection rejected) {
+      if (rejected.reason().key().equals("number.ambiguous")) {
+        throw rejected;
+      }
+      throw Rejection.of("field.gauge-none", Quoted.of(typed.strip()));
+    }
   }
 
   private static double inches(double value, @Nullable String suffix) {
