@@ -104,6 +104,8 @@ final class SetEditor extends VBox {
     said.getStyleClass().add(Looks.ERROR_HEAD);
     said.setWrapText(true);
     said.setMinWidth(0);
+    said.setMinHeight(USE_PREF_SIZE);
+    said.managedProperty().bind(said.textProperty().isNotEmpty());
     ComboBox<Construction> made = construction(number, line);
     TextField gauge = field(line.gauge(), "set-gauge-", written, texts.say("sets.gauge-in"));
     TextField core = field(line.core(), "set-core-", written, texts.say("sets.core-in"));
@@ -123,7 +125,8 @@ final class SetEditor extends VBox {
           .addListener(
               (property, before, now) -> said.setText(line.problem().map(texts::say).orElse("")));
     }
-    grid.addRow(number, string, gauge, made, core, mass, said);
+    grid.addRow(2 * number, string, gauge, made, core, mass);
+    grid.add(said, 1, 2 * number + 1, 4, 1);
   }
 
   private TextField field(TypedFieldModel<?> model, String id, String number, String what) {
