@@ -46,19 +46,19 @@ public record Linear(List<Row> rows, List<Unknown> unknowns, List<Double> point)
     }
   }
 
-  static Linear of(List<Misfit> misfits, Solution solution) {
+  static Linear of(List<Misfit> misfits, Solution solution, Linearized rows, double[] point) {
     List<Row> all = new ArrayList<>();
     for (int row = 0; row < misfits.size(); row++) {
-      all.add(new Row(misfits.get(row), solution.rows().slopes(row)));
+      all.add(new Row(misfits.get(row), rows.slopes(row)));
     }
     List<Unknown> named = new ArrayList<>();
-    List<Double> point = new ArrayList<>();
+    List<Double> counted = new ArrayList<>();
     Unknowns unknowns = solution.model().unknowns();
     for (int i = 0; i < unknowns.count(); i++) {
       Unknown one = unknowns.at(i);
       named.add(new Unknown(one.kind(), one.string(), one.fret(), solution.sds()[i]));
-      point.add(solution.point()[i]);
+      counted.add(point[i]);
     }
-    return new Linear(all, named, point);
+    return new Linear(all, named, counted);
   }
 }

@@ -2,6 +2,7 @@ package sillet.acoustics.estimate;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.ToDoubleFunction;
 import sillet.acoustics.neck.StringLie;
 import sillet.acoustics.solve.Outcome;
@@ -116,6 +117,10 @@ public final class NeckEstimate {
 
   /** Every reading against the estimate, string by string, oldest first. */
   public List<Misfit> misfits() {
+    return misfits(solution.rows());
+  }
+
+  private List<Misfit> misfits(Linearized rows) {
     List<Misfit> misfits = new ArrayList<>();
     for (int row = 0; row < solution.noise().readings().count(); row++) {
       Readings.One one = solution.noise().readings().at(row);
@@ -125,7 +130,7 @@ public final class NeckEstimate {
               occasion.string(),
               occasion.occasion().pass(),
               one.fret(),
-              solution.rows().residual(row),
+              rows.residual(row),
               solution.noise().sd(row),
               solution.noise().weight(row)));
     }
@@ -189,6 +194,20 @@ public final class NeckEstimate {
 
   /** The linear problem behind the estimate. */
   public Linear linear() {
-    return Linear.of(misfits(), solution);
+    return Linear.of(misfits(), solution, solution.rows(), solution.point());
+  }
+
+  /**
+   * The same problem made linear at another point; empty where a string cannot be tuned there.
+   *
+   * @param point of all unknowns, in the sds of {@link #linear()}
+   */
+  public Optional<Linear> linear(List<Double> point) {
+    double[] there = point.stream().mapToDouble(Double::doubleValue).toArray();
+    Linearized moved =
+        Linearized.at(solution.model(), solution.noise().readings(), there, solution.sds());
+    return moved == null
+        ? Optional.empty()
+        : Optional.of(Linear.of(misfits(moved), solution, moved, there));
   }
 }
