@@ -87,6 +87,7 @@ final class Printout {
         number("%.1f", value),
         judged ? sign + number("%.0f", bar) : "",
         judged ? yes(met) : "");
+    print(row, families(kind -> number("%.1f", 100 * score.of(row, kind).share())), "", "", "");
   }
 
   private void print(Row row, String figure, String value, String bar, String met) {

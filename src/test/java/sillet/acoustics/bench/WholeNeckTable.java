@@ -2,6 +2,7 @@ package sillet.acoustics.bench;
 
 import java.util.Locale;
 import sillet.acoustics.moves.NutFreedom;
+import sillet.acoustics.virtual.Mishap;
 
 /**
  * Prints how good the whole neck is on virtual instruments that are not the estimation model: task,
@@ -35,6 +36,8 @@ public final class WholeNeckTable {
     neck(print, NutFreedom.FIXED, 1.015);
     neck(print, NutFreedom.EACH, 1.16);
     neck(print, NutFreedom.WHOLE, NO_BAR);
+    findings(print, true);
+    findings(print, false);
   }
 
   private static void octave(Printout print) {
@@ -53,5 +56,17 @@ public final class WholeNeckTable {
     print.neck(NeckTask.row(nut, NeckTask.ONE_BY_ONE), NO_BAR);
     print.neck(NeckTask.row(nut, NeckTask.LINEAR), NO_BAR);
     print.neck(NeckTask.row(nut, NeckTask.RULE), NO_BAR);
+  }
+
+  private static void findings(Printout print, boolean heights) {
+    for (Mishap mishap : Mishap.values()) {
+      print.share(
+          FindingTask.row(heights, FindingTask.name(mishap)),
+          "found, %",
+          heights ? 90 : NO_BAR,
+          true);
+    }
+    print.share(FindingTask.row(heights, FindingTask.CLEAN), "%", heights ? 5 : NO_BAR, false);
+    print.share(FindingTask.row(heights, FindingTask.BESIDE), "%", NO_BAR, false);
   }
 }

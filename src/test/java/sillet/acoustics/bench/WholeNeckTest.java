@@ -7,6 +7,7 @@ import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import sillet.acoustics.moves.NutFreedom;
 import sillet.acoustics.virtual.Kind;
+import sillet.acoustics.virtual.Mishap;
 
 /**
  * A small run of {@link WholeNeckTable} against looser bars, so that no change spoils it unnoticed.
@@ -68,6 +69,17 @@ class WholeNeckTest {
     neck(NutFreedom.WHOLE, 1.08);
     assertThat(score.of(NeckTask.row(NutFreedom.FIXED, NeckTask.RULE)).ratio()).isGreaterThan(1.08);
     assertThat(score.of(NeckTask.row(NutFreedom.EACH, NeckTask.RULE)).ratio()).isGreaterThan(3);
+  }
+
+  @Test
+  void namesFaultsAndLeavesSoundStringsAlone() {
+    for (Mishap mishap : Mishap.values()) {
+      Tally tally = score.of(FindingTask.row(true, FindingTask.name(mishap)));
+      assertThat(tally.size()).isEqualTo(60);
+      assertThat(tally.share()).as(mishap.name()).isGreaterThanOrEqualTo(0.70);
+    }
+    assertThat(score.of(FindingTask.row(true, FindingTask.CLEAN)).share()).isLessThan(0.12);
+    assertThat(score.of(FindingTask.row(true, FindingTask.BESIDE)).share()).isLessThan(0.10);
   }
 
   private static void neck(NutFreedom nut, double atMost) {
