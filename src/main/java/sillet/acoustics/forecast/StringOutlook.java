@@ -1,7 +1,7 @@
 package sillet.acoustics.forecast;
 
+import java.util.OptionalDouble;
 import java.util.function.ToDoubleFunction;
-import org.jspecify.annotations.Nullable;
 import sillet.acoustics.estimate.Figure;
 import sillet.acoustics.estimate.NeckEstimate;
 import sillet.acoustics.estimate.StringSituation;
@@ -23,14 +23,14 @@ final class StringOutlook {
   private final NotesThen aim;
   private final BestPlace best;
   private final StringSituation now;
-  private final @Nullable Double nutThen;
+  private final OptionalDouble nutThen;
 
   /**
    * An outlook.
    *
    * @param best where the string then wants saddle and nut
    * @param now the most likely situation
-   * @param nutThen where the nut is going to stand; null = where it stands
+   * @param nutThen where the nut is going to stand; empty = where the best place has it
    */
   StringOutlook(
       NeckEstimate estimate,
@@ -38,7 +38,7 @@ final class StringOutlook {
       NotesThen aim,
       BestPlace best,
       StringSituation now,
-      @Nullable Double nutThen) {
+      OptionalDouble nutThen) {
     this.estimate = estimate;
     this.string = string;
     this.aim = aim;
@@ -59,9 +59,12 @@ final class StringOutlook {
 
   /** Toward the bridge. */
   Figure nutMove() {
-    if (nutThen != null) {
-      double there = nutThen;
+    if (nutThen.isPresent()) {
+      double there = nutThen.getAsDouble();
       return estimate.figure(string, sit -> sit.lie().nutSetback() - there);
+    }
+    if (!moves(best.nutPull())) {
+      return new Figure(0, 0);
     }
     return figure(
         best.nutPull(),
@@ -91,7 +94,7 @@ final class StringOutlook {
   /** The notes then at the best place; a nut that stays stands where it stands. */
   private double[] notes(StringSituation sit) {
     StringSituation then = aim.then(sit);
-    boolean nutMoves = nutThen != null || moves(best.nutPull());
+    boolean nutMoves = nutThen.isPresent() || moves(best.nutPull());
     double nut = nutMoves ? best.place().nut() : sit.lie().nutSetback();
     return aim.cents(NotesThen.at(then, new Setbacks(best.place().saddle(), nut)));
   }
@@ -118,7 +121,7 @@ final class StringOutlook {
   private double ownVariance(NotesThen notes, StringSituation then, double[] pull) {
     double[] likely = notes.cents(then);
     double variance = 0;
-    for (StringConstants otherwise : notes.wire().otherwise()) {
+    for (StringConstants otherwise : notes.wire().otherwise(then.lie().constants())) {
       variance += square(pull, likely, notes.cents(then.withConstants(otherwise)));
     }
     if (notes.setsTheAction()) {
