@@ -12,6 +12,8 @@ public enum MarkShape {
   NO_TARGET(0.57),
   /** Stale. */
   READ_AGAIN(1.43),
+  /** What a saddle does not cure. */
+  FINDING(1.29),
   /** The interval covers the saddle. */
   LEAVE(1.64),
   /** A saddle now, a saddle target to the right of it. */
@@ -49,6 +51,7 @@ public enum MarkShape {
       case OUTSIDE_BELOW -> StateMarks.outside(pen, x, y, -1);
       case NO_TARGET -> StateMarks.noTarget(pen, x, y);
       case READ_AGAIN -> StateMarks.readAgain(pen, x, y);
+      case FINDING -> StateMarks.finding(pen, x, y);
       case LEAVE -> MoveMarks.leave(pen, x, y);
       case MOVE -> MoveMarks.move(pen, x, y, 1);
       case MOVE_LEFT -> MoveMarks.move(pen, x, y, -1);

@@ -31,6 +31,17 @@ final class StateMarks {
     pen.ring(new Stroke(pen.inks().ink(), pen.atLeast(1.5, 0.12)), x, y, pen.em(0.21));
   }
 
+  /** An empty balloon on its leader. */
+  static void finding(Pen pen, double x, double y) {
+    Stroke stroke = new Stroke(pen.inks().pencil(), pen.atLeast(1.5, 0.12));
+    double radius = pen.em(0.39);
+    double ringX = x + pen.em(0.21);
+    double ringY = y - pen.em(0.11);
+    pen.ring(stroke, ringX, ringY, radius);
+    double touch = radius * 0.78;
+    pen.line(ringX - touch, ringY + touch * 0.7, x - pen.em(0.6), y + pen.em(0.5), stroke);
+  }
+
   static void readAgain(Pen pen, double x, double y) {
     double radius = pen.em(0.52);
     double step = 2 * Math.PI * radius / 9;

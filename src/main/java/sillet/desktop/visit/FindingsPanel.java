@@ -26,6 +26,9 @@ final class FindingsPanel extends VBox {
     caution.getStyleClass().add(Looks.CAUTION);
     caution.setWrapText(true);
     caution.setMinHeight(USE_PREF_SIZE);
+    setFocusTraversable(true);
+    setId("findings");
+    setAccessibleText(head.getText());
     getStyleClass().addAll(Looks.PANEL, "findings");
     getChildren().addAll(head, lines, caution);
   }

@@ -3,6 +3,7 @@ package sillet.desktop.visit;
 import javafx.scene.control.Label;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.jspecify.annotations.Nullable;
@@ -27,7 +28,12 @@ final class NeckTable extends VBox {
     brackets.setText(texts.say("visit.neck.brackets"));
     brackets.getStyleClass().add(Looks.NOTE);
     brackets.setMinWidth(0);
-    HBox line = new HBox(head, sum, brackets);
+    Label keys = new Label(texts.say("visit.grid.keys"));
+    keys.getStyleClass().add(Looks.NOTE);
+    keys.setMinWidth(0);
+    Region apart = new Region();
+    HBox.setHgrow(apart, Priority.ALWAYS);
+    HBox line = new HBox(head, sum, apart, keys);
     line.getStyleClass().add("panel-line");
     table.getStyleClass().add("neck-table");
     getStyleClass().add("neck");
@@ -39,7 +45,6 @@ final class NeckTable extends VBox {
     boolean byFret = wholeNeck && !wanted.notes().isEmpty();
     table.setVisible(byFret);
     table.setManaged(byFret);
-    brackets.setVisible(byFret);
     if (wanted.equals(shown)) {
       return;
     }
@@ -50,6 +55,7 @@ final class NeckTable extends VBox {
     name(texts.say("visit.neck.fret"), 0);
     name(texts.say("visit.neck.now"), 1);
     name(texts.say("visit.neck.after"), 2);
+    table.add(brackets, 1, 3, GridPane.REMAINING, 1);
     int column = 1;
     for (NeckNotes.Note note : wanted.notes()) {
       figure(note.fret(), note.read() ? Looks.STRONG : Looks.SOFT, column, 0);

@@ -43,6 +43,7 @@ final class ReadingTermsBar extends BorderPane {
         TypedFieldModel.optional(Readers.number("0.01", "20", texts.say("visit.terms.cents")));
     frets.fill(model.frets().written());
     scatter.fill(scatterInFull());
+    said.getStyleClass().add(Looks.ERROR_HEAD);
     said.setMinWidth(0);
     HBox fields =
         new HBox(
@@ -59,19 +60,7 @@ final class ReadingTermsBar extends BorderPane {
     fields.setAlignment(Pos.CENTER_LEFT);
     setAlignment(said, Pos.CENTER_LEFT);
     setLeft(fields);
-    setCenter(said);
     say();
-  }
-
-  /** In a narrow window the keys stand under the fields. */
-  void narrow(boolean wanted) {
-    setCenter(null);
-    setBottom(null);
-    if (wanted) {
-      setBottom(said);
-    } else {
-      setCenter(said);
-    }
   }
 
   private Label name(String key) {
@@ -150,8 +139,7 @@ final class ReadingTermsBar extends BorderPane {
   private void say() {
     Optional<Message> problem =
         frets.problemProperty().get().or(() -> scatter.problemProperty().get());
-    String look = problem.isPresent() ? Looks.ERROR_HEAD : Looks.NOTE;
-    said.getStyleClass().setAll("label", "terms-said", look);
-    said.setText(problem.map(texts::say).orElseGet(() -> texts.say("visit.grid.keys")));
+    said.setText(problem.map(texts::say).orElse(""));
+    setBottom(problem.isPresent() ? said : null);
   }
 }

@@ -12,7 +12,6 @@ import sillet.logbook.text.Texts;
 /** Under the drawing: which frets, how they are read, and what the moves serve. */
 final class ReadingsFoot extends VBox {
   private final VisitModel model;
-  private final ReadingTermsBar terms;
   private final AimModel aimModel;
   private final AimBar aim;
   private final ToggleButton wholeNeck;
@@ -35,7 +34,6 @@ final class ReadingsFoot extends VBox {
     wholeNeck.setId("whole-neck");
     wholeNeck.getStyleClass().add(Looks.CHOICE);
     wholeNeck.setMinWidth(Region.USE_PREF_SIZE);
-    this.terms = new ReadingTermsBar(model, texts, wholeNeck, changed.frets(), changed.terms());
     this.aimModel = new AimModel(model.aim());
     this.aim =
         new AimBar(
@@ -45,7 +43,9 @@ final class ReadingsFoot extends VBox {
               desk.saves().keep(model.aimAt(wanted));
               changed.aim().run();
             });
-    getChildren().addAll(terms, aim);
+    getChildren()
+        .addAll(
+            new ReadingTermsBar(model, texts, wholeNeck, changed.frets(), changed.terms()), aim);
   }
 
   AimBar aim() {
@@ -61,10 +61,5 @@ final class ReadingsFoot extends VBox {
     }
     aim.refresh();
     aim.setDisable(!model.open());
-  }
-
-  /** In a narrow window the keys stand under the fields. */
-  void narrow(boolean wanted) {
-    terms.narrow(wanted);
   }
 }

@@ -39,6 +39,15 @@ final class SectionStates {
     return done();
   }
 
+  /** Findings: how many there are. */
+  Section.State found() {
+    int count = said.findings(model).size();
+    if (count > 0) {
+      return new Section.State(MarkShape.FINDING, Integer.toString(count), true);
+    }
+    return model.strings().stream().allMatch(string -> string.advice() == null) ? notYet() : done();
+  }
+
   Section.State checked() {
     long received = checks.made(Moment.RECEIVED);
     long left = checks.made(Moment.LEFT);

@@ -97,6 +97,12 @@ final class VisitParts {
         new Section(
             "readings", texts.say("visit.readings"), readings, this::focusStart, states()::read),
         new Section(
+            "findings",
+            texts.say("visit.findings"),
+            findings,
+            findings::requestFocus,
+            states()::found),
+        new Section(
             "checks", texts.say("visit.checks"), checksPanel, into(checksPanel), states()::checked),
         new Section("room", texts.say("visit.room"), roomPanel, into(roomPanel), states()::room),
         new Section(
@@ -210,7 +216,6 @@ final class VisitParts {
     readings.setShape(wanted);
     page.setShape(wanted, em);
     checksPanel.setNarrow(wanted == SheetShape.WIDE);
-    foot.narrow(wanted == SheetShape.NARROW);
     head.show(model, wanted);
     sections.refresh(wanted == SheetShape.NARROW);
   }

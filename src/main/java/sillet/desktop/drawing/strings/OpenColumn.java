@@ -9,6 +9,7 @@ import sillet.desktop.drawing.Stroke;
 final class OpenColumn {
   private static final double LIT_EM = 1.57;
   private static final double RING_HEIGHT_EM = 1.57;
+  private static final double RING_ROOM_EM = 0.57;
 
   private final Pen pen;
   private final SheetGeometry sheet;
@@ -39,7 +40,9 @@ final class OpenColumn {
         bottom,
         pen.edge(lower - half),
         bottom);
-    ring(Box.around(upper, sheet.headLineY(), pen.em(LIT_EM), pen.em(RING_HEIGHT_EM)));
+    Lettering number = Lettering.bold(1.14, pen.inks().ink());
+    double around = number.width(Integer.toString(column.fret()), pen.em(1)) + pen.em(RING_ROOM_EM);
+    ring(Box.around(upper, sheet.headLineY(), around, pen.em(RING_HEIGHT_EM)));
   }
 
   private void ring(Box around) {
