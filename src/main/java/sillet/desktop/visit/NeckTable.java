@@ -36,6 +36,8 @@ final class NeckTable extends VBox {
     HBox line = new HBox(head, sum, apart, keys);
     line.getStyleClass().add("panel-line");
     table.getStyleClass().add("neck-table");
+    table.setMinWidth(0);
+    setMinWidth(0);
     getStyleClass().add("neck");
     getChildren().addAll(line, table);
   }

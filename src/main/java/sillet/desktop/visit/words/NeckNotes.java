@@ -18,6 +18,9 @@ import sillet.logbook.visits.StringPass;
  * @param notes by fret; empty while nothing was read
  */
 public record NeckNotes(String head, String sum, List<Note> notes) {
+  /** Beyond the octave only what was read is shown, as on the drawing. */
+  private static final int LAST_ESTIMATED = 12;
+
   /**
    * One note.
    *
@@ -43,7 +46,9 @@ public record NeckNotes(String head, String sum, List<Note> notes) {
       return new NeckNotes(head, texts.say("visit.words.not-read"), List.of());
     }
     List<Note> notes = new ArrayList<>();
-    advice.neck().forEach(cents -> notes.add(note(cents)));
+    advice.neck().stream()
+        .filter(cents -> cents.read() || cents.fret() <= LAST_ESTIMATED)
+        .forEach(cents -> notes.add(note(cents)));
     String sum =
         texts.say(
             "visit.neck.rms",
