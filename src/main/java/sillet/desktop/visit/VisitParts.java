@@ -5,7 +5,9 @@ import java.util.List;
 import java.util.Optional;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
 import sillet.desktop.controls.KeyHint;
 import sillet.desktop.drawing.strings.SheetShape;
 import sillet.desktop.visit.aim.AimBar;
@@ -34,6 +36,7 @@ final class VisitParts {
   private final ReadingsPanel readings;
   private final ReadingsFoot foot;
   private final FindingsPanel findings;
+  private final BridgePanel bridge;
   private final ChecksModel checks;
   private final ChecksPanel checksPanel;
   private final RoomModel room;
@@ -66,6 +69,7 @@ final class VisitParts {
                 this::remade, this::showReadings, this::turnNeck, this::aimed));
     readings.getChildren().add(foot);
     this.findings = new FindingsPanel(texts);
+    this.bridge = new BridgePanel(texts);
     this.checks = new ChecksModel(record, unit, new UnusualCheck(unit));
     this.checksPanel =
         new ChecksPanel(
@@ -84,7 +88,10 @@ final class VisitParts {
     this.made = new MadeMode(desk, readings, this::refresh);
     this.sections = new SectionWords(sections());
     List<Region> below = List.of(checksPanel, findings, log.work());
-    this.page = new VisitPage(head, sections, readings, below, List.of(roomPanel, log.notes()));
+    VBox saddles = new VBox(bridge, roomPanel);
+    saddles.getStyleClass().add("panels");
+    VBox.setVgrow(roomPanel, Priority.ALWAYS);
+    this.page = new VisitPage(head, sections, readings, below, List.of(saddles, log.notes()));
     refresh();
   }
 
@@ -199,6 +206,7 @@ final class VisitParts {
     String caution = texts.say(onePiece ? "visit.caution.file" : "visit.caution.tension");
     findings.show(new FindingsPanel.Shown(found, none, moving || made.on() ? caution : ""));
     foot.refresh(readings.neck());
+    bridge.show(said.bridge(model));
     made.showButtons();
     sections.refresh(shape == SheetShape.NARROW);
   }

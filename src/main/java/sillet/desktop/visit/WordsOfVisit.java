@@ -2,6 +2,8 @@ package sillet.desktop.visit;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import sillet.desktop.visit.words.BridgeLine;
 import sillet.desktop.visit.words.FindingLine;
 import sillet.desktop.visit.words.FindingLines;
 import sillet.desktop.visit.words.MoveWords;
@@ -40,6 +42,13 @@ final class WordsOfVisit {
   /** What stands below the drawing. */
   List<FindingLine> findings(VisitModel model) {
     return findings.of(model.now());
+  }
+
+  /** What a saddle or bridge in one piece can do; empty where each string has its own. */
+  Optional<BridgeLine> bridge(VisitModel model) {
+    SaddleKind kind = model.record().instrument().saddle().kind();
+    return Optional.ofNullable(model.now().bridge())
+        .map(advice -> BridgeLine.of(advice, kind, texts));
   }
 
   /** What clockwise does; empty while it is not known. */

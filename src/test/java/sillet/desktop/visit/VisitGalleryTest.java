@@ -138,6 +138,13 @@ class VisitGalleryTest {
         new Look("neck-dark", Theme.DARK, 100, 1280, 800),
         VisitGalleryTest::six,
         scene -> ((ToggleButton) scene.lookup("#whole-neck")).fire());
+    draw(
+        Look.light("aim"),
+        VisitGalleryTest::manyFrets,
+        scene -> {
+          ((ToggleButton) scene.lookup("#aim-neck")).fire();
+          ((ToggleButton) scene.lookup("#nut-each")).fire();
+        });
     draw(new Look("neck-1920", Theme.LIGHT, 100, 1920, 1080), VisitGalleryTest::manyFrets);
     draw(new Look("neck-150", Theme.DARK, 150, 1280, 1600), VisitGalleryTest::manyFrets);
   }

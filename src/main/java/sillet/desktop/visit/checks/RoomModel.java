@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.UUID;
 import sillet.logbook.actions.RecordTravel;
+import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.strings.FittedString;
 import sillet.logbook.units.LengthUnit;
 import sillet.logbook.visits.MadeMove;
@@ -14,6 +15,7 @@ import sillet.logbook.visits.VisitRecord;
 /** The room at the saddles. It is typed as it stands now and kept as it was on arrival. */
 public final class RoomModel {
   private final List<RoomRow> rows = new ArrayList<>();
+  private final boolean onePiece;
 
   /**
    * The room of a visit.
@@ -22,10 +24,16 @@ public final class RoomModel {
    * @param unit the shop's
    */
   public RoomModel(VisitRecord record, LengthUnit unit) {
+    this.onePiece = record.instrument().saddle().kind() == SaddleKind.ONE_PIECE;
     for (FittedString string : record.visit().strings().strings()) {
       rows.add(new RoomRow(string.number(), unit));
     }
     take(record);
+  }
+
+  /** Whether all strings share a fixed saddle, whose edges must be kept. */
+  boolean onePiece() {
+    return onePiece;
   }
 
   /** A row for each string. */

@@ -41,6 +41,13 @@ public final class RoomPanel extends VBox {
     said.setManaged(false);
     getStyleClass().addAll(Looks.PANEL, "room");
     getChildren().addAll(head, table, said);
+    if (model.onePiece()) {
+      Label edges = new Label(texts.say("visit.room.edges"));
+      edges.getStyleClass().add(Looks.NOTE);
+      edges.setWrapText(true);
+      edges.setMinHeight(USE_PREF_SIZE);
+      getChildren().add(edges);
+    }
     make(true);
   }
 

@@ -49,9 +49,11 @@ public final class MoveTexts {
     Lie lie = picture.lie();
     MarkShape arrow = away == lie.bridgeLeft() ? MarkShape.ARROW_LEFT : MarkShape.ARROW_RIGHT;
     MoveText text = MoveText.move(arrow, figure(words), unit(words), head(words));
-    String detail = words.sentence().isEmpty() ? words.range() : words.sentence();
+    String said = words.nut().isEmpty() ? words.range() : words.nut();
+    String detail = words.sentence().isEmpty() ? said : words.sentence();
     String mm = onePiece() && !words.sentence().isEmpty() ? "" : mm(words);
-    return place(text.below(mm, detail, left(words)), words);
+    String left = words.nut().isEmpty() ? left(words) : "";
+    return place(text.below(mm, detail, left), words);
   }
 
   /** On one line there is no room for a sentence: the verdict stands beside the direction. */
@@ -122,7 +124,8 @@ public final class MoveTexts {
     MoveText text = MoveText.verdict(mark, words.head());
     if (words.kind() == StringWords.Kind.LEAVE) {
       String mm = oneLine ? words.mm() : words.mm() + UNIT_SPACE + texts.say("visit.words.mm");
-      String why = headed ? texts.say("visit.words.less-short") : words.sentence();
+      String little = headed ? texts.say("visit.words.less-short") : words.sentence();
+      String why = words.nut().isEmpty() ? little : words.nut();
       return place(text.below(mm, why, ""), words);
     }
     return text.below("", words.sentence(), "");

@@ -76,6 +76,7 @@ public final class MoveWords {
               texts.say("visit.words.leave"),
               mm(Math.abs(figures.saddleMm())),
               "",
+              nut(figures),
               "",
               texts.say("visit.words.less"));
       case MOVE -> move(string, figures);
@@ -96,6 +97,7 @@ public final class MoveWords {
         way(figures.direction()),
         mm(size),
         texts.say("visit.words.range", mm(least), mm(most)),
+        nut(figures),
         room == null ? "" : Figures.fixed(Math.max(0, room - size), LEFT_DECIMALS),
         "");
   }
@@ -123,6 +125,7 @@ public final class MoveWords {
         way(figures.direction()),
         mm(possible),
         "",
+        nut(figures),
         "",
         sentence);
   }
@@ -175,7 +178,19 @@ public final class MoveWords {
 
   private StringWords plain(
       StringPass string, StringWords.Kind kind, String head, String sentence) {
-    return new StringWords(number(string), kind, Direction.STAY, null, head, "", "", "", sentence);
+    return new StringWords(
+        number(string), kind, Direction.STAY, null, head, "", "", "", "", sentence);
+  }
+
+  /** What the nut shall do, where it can and that is enough to be seen. */
+  private String nut(MoveFigures figures) {
+    Double nut = figures.nutMm();
+    if (nut == null || mm(Math.abs(nut)).equals(mm(0))) {
+      return "";
+    }
+    return nut > 0
+        ? texts.say("visit.words.nut-toward-bridge", mm(nut))
+        : texts.say("visit.words.nut-away", mm(-nut));
   }
 
   private String way(Direction direction) {

@@ -14,6 +14,7 @@ import sillet.logbook.moves.Direction;
  * @param head bold, in the first line
  * @param mm the move without sign and unit; empty where there is none
  * @param range its 95 % interval; empty where there is none
+ * @param nut what the nut shall do beside it; empty where it stays
  * @param left travel left after the move, without unit; empty if not known
  * @param sentence in the second line, in place of interval and travel; empty where they stand
  */
@@ -25,6 +26,7 @@ public record StringWords(
     String head,
     String mm,
     String range,
+    String nut,
     String left,
     String sentence) {
 
