@@ -10,7 +10,7 @@ import org.jspecify.annotations.Nullable;
  * @param strings string 1 first
  * @param nutMm place of the nut all strings share: positive toward the bridge of its nominal place
  * @param frets frets worth naming, in order
- * @param endFactor how much the ends of the strings give, against what is usual; 1 is usual
+ * @param heldEnds how firmly the ends hold the strings: 0 free to turn, 1 usual, 2 clamped
  * @param passes how many rounds of reading it comes from
  * @param visits from how many visits these are
  * @param learnedFrom learning was reset at this moment; null if never
@@ -19,7 +19,7 @@ public record LearnedInstrument(
     List<LearnedString> strings,
     LearnedFigure nutMm,
     List<LearnedFret> frets,
-    LearnedFigure endFactor,
+    LearnedFigure heldEnds,
     int passes,
     int visits,
     @Nullable Instant learnedFrom) {

@@ -21,6 +21,10 @@ final class BenchEvidence {
   /** A tuner that shows thousandths still reads a hand's note. */
   private static final double SMALLEST_SD_CENTS = 1e-3;
 
+  /** Between measured strings, each with a slot and a groove of its own (chosen; no source), m. */
+  private static final HeightSds BETWEEN =
+      new HeightSds(1.5e-4, 6e-5, HeightSds.measured().relief());
+
   private BenchEvidence() {}
 
   static InstrumentEvidence of(List<BenchHistory> strings) {
@@ -96,7 +100,7 @@ final class BenchEvidence {
   }
 
   private static HeightSds sds(Heights heights, Construction construction) {
-    HeightSds measured = HeightSds.measured();
+    HeightSds measured = heights.between() ? BETWEEN : HeightSds.measured();
     HeightSds unknown = HeightSds.unknown(construction);
     return new HeightSds(
         heights.action12Mm() == null ? unknown.atTwelve() : measured.atTwelve(),

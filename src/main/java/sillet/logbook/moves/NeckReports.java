@@ -1,7 +1,15 @@
 package sillet.logbook.moves;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.OptionalInt;
+import sillet.acoustics.estimate.NeckEstimate;
+import sillet.acoustics.findings.FindingOptions;
+import sillet.acoustics.findings.Kind;
+import sillet.acoustics.findings.NeckFinding;
+import sillet.acoustics.findings.NeckFindings;
 import sillet.logbook.text.Message;
 
 /** The findings of an instrument for people, in the order in which to look. */
@@ -9,16 +17,46 @@ final class NeckReports {
   private NeckReports() {}
 
   static List<FindingReport> of(KnownNeck neck) {
+    Map<FindingOptions.Note, Message> odd = new HashMap<>();
     List<FindingReport> reports = new ArrayList<>();
-    for (BenchHistory string : neck.strings()) {
-      for (Disagreements.Odd odd : Disagreements.of(string.now())) {
-        int number = string.now().string().number();
-        Message again = Message.of("finding.reading.do");
-        reports.add(
-            new FindingReport(
-                Finding.READING, number, odd.fret(), false, 0, odd.said(), again, null));
+    for (int i = 0; i < neck.strings().size(); i++) {
+      BenchString string = neck.strings().get(i).now();
+      for (Disagreements.Odd one : Disagreements.of(string)) {
+        if (neck.place(i) < 0) {
+          reports.add(oddTries(string.string().number(), one));
+        } else {
+          odd.put(new FindingOptions.Note(neck.place(i), one.fret()), one.said());
+        }
+      }
+    }
+    NeckEstimate estimate = neck.estimate();
+    if (estimate != null) {
+      FindingOptions options = new FindingOptions(Map.of(), odd.keySet());
+      for (NeckFinding found : NeckFindings.of(estimate, options)) {
+        reports.add(report(found, neck, odd));
       }
     }
     return reports;
+  }
+
+  /** Tries that disagree explain a reading better than its distance from the others. */
+  private static FindingReport report(
+      NeckFinding found, KnownNeck neck, Map<FindingOptions.Note, Message> odd) {
+    OptionalInt string = found.string();
+    OptionalInt fret = found.fret();
+    if (found.kind() == Kind.READING && string.isPresent() && fret.isPresent()) {
+      int place = string.getAsInt();
+      Message said = odd.get(new FindingOptions.Note(place, fret.getAsInt()));
+      if (said != null) {
+        return oddTries(neck.number(place), new Disagreements.Odd(fret.getAsInt(), said));
+      }
+    }
+    return new FindingWords(found, neck).report();
+  }
+
+  private static FindingReport oddTries(int number, Disagreements.Odd odd) {
+    Message again = Message.of("finding.reading.do");
+    return new FindingReport(
+        Finding.READING, number, odd.fret(), false, 0, odd.said(), again, null);
   }
 }

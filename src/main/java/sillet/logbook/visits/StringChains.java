@@ -4,8 +4,8 @@ import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import java.util.TreeMap;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 import sillet.logbook.moves.BenchHistory;
 import sillet.logbook.moves.BenchOccasion;
@@ -38,12 +38,8 @@ final class StringChains {
     return visit;
   }
 
-  /**
-   * What is known at a pass of the visit.
-   *
-   * @param slipped strings whose move before this pass did not act as it must: it counts as unknown
-   */
-  List<BenchHistory> upTo(int pass, Set<Integer> slipped) {
+  /** What is known at a pass of the visit, string 1 first. */
+  List<BenchHistory> upTo(int pass) {
     Map<Integer, List<Link>> chains = new TreeMap<>();
     int round = 0;
     for (VisitStrings one : earlier) {
@@ -63,20 +59,27 @@ final class StringChains {
     List<BenchHistory> histories = new ArrayList<>();
     for (BenchString string : visit.in(pass)) {
       List<Link> chain = chains.computeIfAbsent(string.string().number(), n -> new ArrayList<>());
-      Link link = link(chain, string, visit, pass, round + 1);
-      boolean slip = slipped.contains(string.string().number());
-      chain.add(slip ? unknownMove(link) : link);
+      chain.add(link(chain, string, visit, pass, round + 1));
       histories.add(new BenchHistory(chain.stream().map(Link::occasion).toList()));
     }
     return histories;
   }
 
-  private static Link unknownMove(Link link) {
-    BenchOccasion one = link.occasion();
-    return new Link(
-        new BenchOccasion(one.string(), one.round(), one.wire(), null, one.nutMovedMm()),
-        link.visit(),
-        link.pass());
+  /** Visits with a reading that counts, the one that is reckoned among them. */
+  int visitsRead() {
+    long before =
+        earlier.stream()
+            .filter(
+                one ->
+                    IntStream.rangeClosed(1, one.lastPass())
+                        .anyMatch(pass -> read(one, pass) && counts(one, pass)))
+            .count();
+    boolean now = IntStream.rangeClosed(1, visit.lastPass()).anyMatch(pass -> read(visit, pass));
+    return (int) before + (now ? 1 : 0);
+  }
+
+  private static boolean read(VisitStrings one, int pass) {
+    return one.record().readings().stream().anyMatch(r -> r.pass() == pass && r.tries() != null);
   }
 
   private boolean counts(VisitStrings one, int pass) {
@@ -112,7 +115,9 @@ final class StringChains {
     int number = string.string().number();
     boolean here = last.visit().equals(visit);
     int wire = last.occasion().wire() + (sameWire(last, string, visit) ? 0 : 1);
-    Double moved = here ? Double.valueOf(visit.movedMm(number, last.pass(), pass)) : null;
+    double made = visit.movedMm(number, last.pass(), pass);
+    boolean known = here && !SlippedSaddle.is(last.occasion().string(), string, made);
+    Double moved = known ? Double.valueOf(made) : null;
     double nut =
         here
             ? visit.nutMovedMm(number, last.pass(), pass)

@@ -36,7 +36,13 @@ final class StringHeights {
     return new Heights(
         along(string, CheckKind.ACTION),
         along(string, CheckKind.FIRST_FRET_CLEARANCE),
-        along(string, CheckKind.RELIEF));
+        along(string, CheckKind.RELIEF),
+        onALine(string, CheckKind.ACTION) || onALine(string, CheckKind.FIRST_FRET_CLEARANCE));
+  }
+
+  private boolean onALine(int string, CheckKind kind) {
+    boolean here = MeasuredHeights.byString(checks, kind).containsKey(string);
+    return !here && along(string, kind) != null;
   }
 
   private @Nullable Double along(int string, CheckKind kind) {

@@ -2,10 +2,8 @@ package sillet.logbook.visits;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import sillet.logbook.moves.AimChoice;
 import sillet.logbook.moves.BenchHistory;
@@ -64,7 +62,18 @@ public final class VisitMoves {
    */
   public static List<BenchHistory> histories(VisitRecord record, InstrumentPast past) {
     StringChains chains = new StringChains(past, record);
-    return chains.upTo(chains.visit().lastPass(), Set.of());
+    return chains.upTo(chains.visit().lastPass());
+  }
+
+  /**
+   * From how many visits the histories come.
+   *
+   * @param record everything the logbook holds of the visit
+   * @param past what came before
+   * @return visits with a reading that still teaches
+   */
+  public static int visitsRead(VisitRecord record, InstrumentPast past) {
+    return new StringChains(past, record).visitsRead();
   }
 
   /**
@@ -92,26 +101,9 @@ public final class VisitMoves {
       InstrumentAdvice none = new InstrumentAdvice(List.of(), List.of(), null);
       return new VisitPass(strings(pass, bench, none, before), List.of(), null);
     }
-    InstrumentAdvice advice = advisor.adviseOn(chains.upTo(pass, Set.of()), aim);
+    InstrumentAdvice advice = advisor.adviseOn(chains.upTo(pass), aim);
     List<StringPass> strings = strings(pass, bench, advice, before);
-    Set<Integer> slipped = slipped(strings);
-    if (!slipped.isEmpty()) {
-      advice = advisor.adviseOn(chains.upTo(pass, slipped), aim);
-      strings = strings(pass, bench, advice, before);
-    }
     return new VisitPass(strings, findings(advice, strings), advice.bridge());
-  }
-
-  /** Strings whose move before this pass did not act as the model says. */
-  private static Set<Integer> slipped(List<StringPass> strings) {
-    Set<Integer> slipped = new HashSet<>();
-    for (StringPass string : strings) {
-      MoveProof proof = string.proof();
-      if (proof != null && !proof.asPredicted()) {
-        slipped.add(string.string().string().number());
-      }
-    }
-    return slipped;
   }
 
   /** Those of the instrument, and what the proofs add. */

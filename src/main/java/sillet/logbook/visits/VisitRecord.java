@@ -37,4 +37,14 @@ public record VisitRecord(
     work = List.copyOf(work);
     notes = List.copyOf(notes);
   }
+
+  /**
+   * The same visit with other readings.
+   *
+   * @param others in the order they were read
+   * @return the record with them
+   */
+  public VisitRecord withReadings(List<Reading> others) {
+    return new VisitRecord(visit, instrument, customer, checks, others, moves, work, notes, aim);
+  }
 }

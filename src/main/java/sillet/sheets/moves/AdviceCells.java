@@ -1,10 +1,14 @@
 package sillet.sheets.moves;
 
+import java.util.Collection;
 import java.util.Comparator;
+import java.util.LinkedHashSet;
+import java.util.Set;
 import java.util.stream.Collectors;
 import sillet.logbook.moves.Direction;
 import sillet.logbook.moves.FindingReport;
 import sillet.logbook.moves.MoveAdvice;
+import sillet.logbook.text.Message;
 import sillet.logbook.text.Texts;
 import sillet.logbook.units.Figures;
 
@@ -37,8 +41,22 @@ public final class AdviceCells {
         .collect(Collectors.joining(";"));
   }
 
-  /** The sentences for people, one after the other. */
+  /** The sentences for people, one after the other: the move, then each finding. */
   public static String note(MoveAdvice advice, Texts texts) {
-    return advice.notes().stream().map(texts::say).collect(Collectors.joining(" "));
+    Set<Message> said = new LinkedHashSet<>(advice.notes());
+    for (FindingReport finding : advice.findings()) {
+      said.add(finding.evidence());
+      said.add(finding.whatToDo());
+      Message caution = finding.caution();
+      if (caution != null) {
+        said.add(caution);
+      }
+    }
+    return sentences(said, texts);
+  }
+
+  /** Sentences one after the other, in the signs of a file: no true minus. */
+  public static String sentences(Collection<Message> said, Texts texts) {
+    return said.stream().map(texts::say).collect(Collectors.joining(" ")).replace('\u2212', '-');
   }
 }

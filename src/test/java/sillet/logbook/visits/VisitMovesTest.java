@@ -126,7 +126,7 @@ class VisitMovesTest {
         new BenchCheck(CheckKind.RELIEF, 0, 8, CheckMethod.STRAIGHTEDGE, Moment.RECEIVED, 0.2, ""));
     StringHeights heights = StringHeights.received(checks);
     assertThat(heights.of(1)).isEqualTo(new Heights(1.0, null, 0.2));
-    assertThat(heights.of(2)).isEqualTo(new Heights(2.0, null, 0.2));
+    assertThat(heights.of(2)).isEqualTo(new Heights(2.0, null, 0.2, true));
     assertThat(heights.of(4).action12Mm()).isNull();
   }
 

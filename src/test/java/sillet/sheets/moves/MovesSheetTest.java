@@ -46,7 +46,8 @@ class MovesSheetTest {
         .isEqualTo(
             HEADER
                 + "Demo,1,1.860,1.660,2.060,3.72,away from neck,,5.00,0.01,2.50,0.50,move,reading,"
-                + "Leave it: less than the reading can tell.\n");
+                + "\"Leave it: less than the reading can tell. Read that note again, three tries, before"
+                + " anything is moved.\"\n");
   }
 
   @Test
