@@ -22,7 +22,7 @@ final class Expectations {
   static final double SLOT = 3e-5;
 
   /** A fret's place, m; trade texts call 0.08 mm good slotting. */
-  static final double FRET_PLACE = 4e-5;
+  static final double FRET_PLACE = 3.5e-5;
 
   /**
    * Clamped ends of a note: 1.1 +- 0.2 measured on plain nylon (M. B. Anderson, R. G. Beausoleil,
@@ -66,10 +66,19 @@ final class Expectations {
    * The notes of a measured flat-top guitar stray from a smooth curve by 0.33 to 1.32 cents rms,
    * their scatter of reading included (J. M. Hjerrild, M. G. Christensen, ICASSP 2019, open data).
    */
-  static final double STRAY_CENTS = 0.25;
+  static final double STRAY_CENTS = 0.14;
 
   /** How many notes that expectation counts for. */
-  static final double STRAY_COUNT = 8;
+  static final double STRAY_COUNT = 5;
+
+  /** What a body does to an open string of mean mass, cents, to begin with; learned. */
+  static final double BODY = 0.15;
+
+  /** How many pitches that expectation counts for. */
+  static final double BODY_COUNT = 2;
+
+  /** Width of a body's resonance, semitones: a quality of 17. */
+  static final double BODY_WIDTH = 1;
 
   private Expectations() {}
 }

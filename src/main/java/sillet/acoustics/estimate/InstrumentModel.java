@@ -2,6 +2,8 @@ package sillet.acoustics.estimate;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Objects;
+import org.jspecify.annotations.Nullable;
 import sillet.acoustics.neck.StringLie;
 import sillet.acoustics.pitch.Cents;
 import sillet.acoustics.readings.FretReading;
@@ -16,6 +18,8 @@ final class InstrumentModel {
   private final List<OccasionModel> occasions = new ArrayList<>();
   private final List<OccasionModel> now = new ArrayList<>();
 
+  private @Nullable Body body;
+
   private InstrumentModel() {}
 
   static Outcome<InstrumentModel> of(InstrumentEvidence evidence) {
@@ -28,11 +32,17 @@ final class InstrumentModel {
         return Outcome.notSolved(not.because());
       }
     }
+    model.body = Body.of(model.unknowns, model.occasions);
     return Outcome.solved(model);
   }
 
   Unknowns unknowns() {
     return unknowns;
+  }
+
+  /** How the body makes notes stray. */
+  Body body() {
+    return Objects.requireNonNull(body);
   }
 
   /** Every occasion of every string, string by string. */
@@ -43,6 +53,16 @@ final class InstrumentModel {
   /** The last occasion of each string. */
   List<OccasionModel> now() {
     return now;
+  }
+
+  /** Adds the body's slopes of a note; gives what it does to it at a point, cents. */
+  double body(OccasionModel occasion, int fret, double[] point, double[] sds, double[] slopes) {
+    body().chain(occasion.occasion().lie(), fret, sds, slopes);
+    double cents = 0;
+    for (int place : body().places()) {
+      cents += slopes[place] * point[place];
+    }
+    return cents;
   }
 
   /** Where the frets lie at a point of the unknowns. */

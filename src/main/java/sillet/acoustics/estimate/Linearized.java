@@ -36,6 +36,7 @@ final class Linearized {
         curve.chain(i, occasion, sds, slopes[row]);
         int place = model.unknowns().placeOfFret(frets[i]);
         slopes[row][place] = sds[place] * situation.centsPerMetreOfPlace(frets[i]);
+        residuals[row] -= model.body(occasion, frets[i], point, sds, slopes[row]);
         row++;
       }
     }

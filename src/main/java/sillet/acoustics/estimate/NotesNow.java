@@ -35,6 +35,7 @@ final class NotesNow {
       double[] slopes = new double[solution.point().length];
       curve.chain(fret - 1, now, solution.sds(), slopes);
       double cents = curve.cents(fret - 1) + situation.placeCents(fret);
+      cents += solution.model().body(now, fret, solution.point(), solution.sds(), slopes);
       double own = solution.placeVariance(fret, situation.centsPerMetreOfPlace(fret), slopes);
       all.notes[fret] = solution.withReadings(new NoteEstimate(cents, slopes, own), now, fret);
     }

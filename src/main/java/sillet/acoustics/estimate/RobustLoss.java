@@ -15,6 +15,8 @@ final class RobustLoss {
   private static final int LET_GO_FROM = 3;
 
   private static final double LEAST_WEIGHT = 1e-6;
+  private static final double LEAST_STRAY = 0.02;
+  private static final double LEAST_BODY = 0.02;
 
   private final InstrumentModel model;
   private final Noise noise;
@@ -56,6 +58,7 @@ final class RobustLoss {
       noise.weight(row, weight(rows.residual(row) / noise.sd(row), round >= LET_GO_FROM));
     }
     noise.stray(stray(rows, posterior));
+    learnBody(posterior, state);
     expect(state);
     return true;
   }
@@ -65,10 +68,14 @@ final class RobustLoss {
     return Math.max(LEAST_WEIGHT, letGo ? share * share : share);
   }
 
-  /** One step of expectation and maximisation. */
+  /**
+   * How far notes stray, from what the fit says of each note's straying: D. J. C. MacKay's fixed
+   * point, squares over the number of strayings that the readings determine (from memory).
+   */
   private double stray(Linearized rows, Posterior posterior) {
     double squares = Expectations.STRAY_COUNT * Expectations.STRAY_CENTS * Expectations.STRAY_CENTS;
-    double count = Expectations.STRAY_COUNT;
+    double determined = Expectations.STRAY_COUNT;
+    double variance = noise.stray() * noise.stray();
     for (int[] note : noise.readings().notes()) {
       double left = noise.strayLeft(note);
       double[] slopes = new double[expected.length];
@@ -81,9 +88,28 @@ final class RobustLoss {
           slopes[i] += weighed * own[i];
         }
       }
-      squares += strays * strays + left + posterior.variance(slopes);
-      count++;
+      squares += strays * strays;
+      determined += Math.max(0, 1 - (left + posterior.variance(slopes)) / variance);
     }
-    return Math.sqrt(squares / count);
+    return Math.max(LEAST_STRAY, Math.sqrt(squares / determined));
+  }
+
+  /** How much the body yields, by the same fixed point. */
+  private void learnBody(Posterior posterior, State state) {
+    int[] places = model.body().places();
+    double squares = Expectations.BODY_COUNT * Expectations.BODY * Expectations.BODY;
+    double determined = Expectations.BODY_COUNT;
+    double[] one = new double[expected.length];
+    for (int place : places) {
+      double value = state.value(place);
+      squares += value * value;
+      one[place] = 1;
+      determined += Math.max(0, 1 - posterior.variance(one));
+      one[place] = 0;
+    }
+    double learned = Math.max(LEAST_BODY, Math.sqrt(squares / determined));
+    for (int place : places) {
+      state.countIn(place, learned);
+    }
   }
 }

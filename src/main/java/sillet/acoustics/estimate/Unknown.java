@@ -45,6 +45,8 @@ public record Unknown(Kind kind, int string, int fret, double sd) {
     GAP,
     /** Depth of the neck's bow, m. */
     RELIEF,
+    /** What the body does to notes of one pitch and of those above it, cents. */
+    BODY,
     /** Place of a fret, m toward the bridge. */
     FRET
   }
