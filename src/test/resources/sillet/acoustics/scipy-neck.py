@@ -2,9 +2,9 @@
 import sys, numpy as np, scipy
 from scipy.optimize import least_squares, brentq
 C = 1200/np.log(2); JOINT = 15; FIRST = 1-2**(-1/12)
-P = dict(saddle_cents=10, nut=2.5e-4, slot=3e-5, fret=4e-5, held=.2, held_open=.1, share=.3, press_m=7e-5,
+P = dict(saddle_cents=10, nut=2.5e-4, slot=3e-5, fret=3.5e-5, held=.2, held_open=.1, share=.3, press_m=7e-5,
          press=.4, press_own=.5, after_share=.028, after=.5, after_own=.7, action_own=1.2e-4, gap_own=4e-5,
-         stray=.25, stray_count=8, believed=2.5)
+         stray=.14, stray_count=5, body=.15, body_count=2, body_width=1, believed=2.5)
 G = lambda n: 2**(n/12)
 def tension(mu, EI, L, f, alpha):
     def off(T):
@@ -76,19 +76,31 @@ class Zero(dict):
     def __getitem__(self, k): return 0.
 base = [0., 0.]
 for i in range(2): situation(i, Zero(), Zero(), base)  # names the unknowns
+# what the body does to a pitch, cents at an open string of mean mass; alike at pitches that are near
+number = lambda hz: int(round(12*np.log2(hz/440)))
+low = min(number(S['hz']) for S in STRINGS); high = max(number(S['hz'])+max(READ) for S in STRINGS)
+K = high-low+1; OWN = len(U.names)
+for k in range(K): U(('body', k), P['body'])
 N = len(U.names)
+gap = np.subtract.outer(np.arange(K), np.arange(K))/P['body_width']
+ROOT = np.linalg.cholesky(1/(1+gap**2)+1e-6*np.eye(K))
+MASS = np.mean([S['mu']*S['scale'] for S in STRINGS])
+def body(i, x, sd, frets):
+    by_pitch = ROOT@(sd[OWN:]*x[OWN:]); S = STRINGS[i]; m = S['mu']*S['scale']/MASS; o = number(S['hz'])-low
+    return np.array([m*by_pitch[o]-m/G(n)*by_pitch[o+n] for n in frets])
 for i in range(2):
     z = np.zeros(N); s = np.array(U.sd)
     def off(p):
         b = list(base); b[i] = p; return cents(situation(i, z, s, b), [12])[0]
     base[i] = brentq(off, -.005, .02, xtol=1e-14)
-def sds(stray):
+def sds(stray, yields):
     sd = np.array(U.sd, float)
     for k, n in enumerate(U.names):
         if n[0] == 'slot': sd[k] = np.hypot(P['slot'], stray*.648/C)
+    sd[OWN:] = yields
     return sd
 def model(x, sd, frets=READ):
-    return np.concatenate([cents(situation(i, x, sd, base), frets) for i in range(2)])
+    return np.concatenate([cents(situation(i, x, sd, base), frets)+body(i, x, sd, frets) for i in range(2)])
 Y = np.concatenate(DATA)
 def weight(r, stray):
     u = np.abs(r)/np.hypot(SD, stray); return np.minimum(1, (P['believed']/np.maximum(u, 1e-300))**2)
@@ -101,22 +113,25 @@ def jac(x, sd, frets=READ):
         e = np.zeros(N); e[k] = h
         J[:, k] = (model(x+e, sd, frets)-model(x-e, sd, frets))/(2*h)
     return J
-stray = P['stray']; x = np.zeros(N)
+stray = P['stray']; yields = P['body']; x = np.zeros(N)
 for rounds in range(200):
-    sd = sds(stray)
+    sd = sds(stray, yields)
     fun = lambda v: np.concatenate([v, (lambda r: np.sign(r)*np.sqrt(rho(r, stray)))(Y-model(v, sd))])
     fit = least_squares(fun, x, method='trf', xtol=1e-13, ftol=1e-13, gtol=1e-13, jac='3-point')
     x = fit.x; r = Y-model(x, sd); w = weight(r, stray); J = jac(x, sd)
     p = w/SD**2; lam = 1/(1/p+stray**2); H = np.eye(N)+J.T@(lam[:, None]*J); V = np.linalg.inv(H)
     left = stray**2/(1+stray**2*p); g = left*p
-    new = np.sqrt((P['stray_count']*P['stray']**2+np.sum((g*r)**2+left+g**2*np.einsum('ij,jk,ik->i', J, V, J)))/(P['stray_count']+len(Y)))
-    done = abs(new-stray) < 1e-9
+    # fixed point of evidence: squares over how many of them the readings determine
+    unsure = (left+g**2*np.einsum('ij,jk,ik->i', J, V, J))/stray**2
+    new = np.sqrt((P['stray_count']*P['stray']**2+np.sum((g*r)**2))/(P['stray_count']+np.sum(np.maximum(0, 1-unsure))))
+    more = np.sqrt((P['body_count']*P['body']**2+np.sum((sd[OWN:]*x[OWN:])**2))/(P['body_count']+np.sum(np.maximum(0, 1-np.diag(V)[OWN:]))))
+    done = abs(new-stray) < 1e-9 and abs(more-yields) < 1e-9
     slot = [k for k, n in enumerate(U.names) if n[0] == 'slot']
-    x = x*sds(stray)/sds(new); stray = new
+    x = x*sds(stray, yields)/sds(new, more); stray = new; yields = more
     if done: break
-print('rounds', rounds, 'stray', stray, 'wild weight', w.min())
+print('rounds', rounds, 'stray', stray, 'body', yields, 'wild weight', w.min())
 assert all(abs(x[k]) < P['believed'] for k, n in enumerate(U.names) if n[0] in ('fret', 'slot'))
-sd = sds(stray)
+sd = sds(stray, yields)
 frets = list(range(1, 13))
 JJ = jac(x, sd, frets); cc = model(x, sd, frets)
 rows = []
@@ -137,7 +152,7 @@ OUT = sys.argv[1] if len(sys.argv) > 1 else '.'
 HEAD = '''# Robust maximum a posteriori estimate of two strings on one neck, nine frets read, one reading wild (string 1, fret 7: about 5 cents too high),
 # by a program that shares no code with this one: scipy-neck.py beside this file, scipy.optimize.least_squares and brentq,
 # numpy %s, scipy %s, Python %s [D]. Loss: square up to 2.5 sd of a reading about the curve, beyond it the reading's own variance
-# grows as the square of its distance; straying of notes by expectation and maximisation.
+# grows as the square of its distance; straying of notes and yielding of the body by the fixed point of the evidence.
 ''' % (np.__version__, scipy.__version__, sys.version.split()[0])
 with open(OUT+'/scipy-neck-notes.csv', 'w') as f:
     f.write(HEAD+'# True note against the open string and its sd, cents.\nstring,fret,cents,sd\n')
