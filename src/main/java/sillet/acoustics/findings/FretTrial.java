@@ -12,8 +12,8 @@ final class FretTrial implements CauseTrial {
   /** From which a fret is called out of place, m. */
   static final double OFF = 2.2e-4;
 
-  private static final double SIGNIFICANT = 3.0;
-  private static final double SIGNIFICANT_SLANT = 3.5;
+  private static final double SIGNIFICANT = 3.1;
+  private static final double SIGNIFICANT_SLANT = 3.6;
 
   /** What the second amount of a slanted fret costs. */
   private static final double ONE_MORE = 3;
@@ -43,7 +43,7 @@ final class FretTrial implements CauseTrial {
   private static void straight(NeckCase notes, LinearNeck neck, int fret, List<Suspect> suspects) {
     double[] shape = notes.frets().get(fret);
     Amount amount = neck.amount(shape);
-    double significant = SIGNIFICANT * Math.sqrt(notes.restless());
+    double significant = SIGNIFICANT;
     if (stands(amount, significant)) {
       double enough = significant * significant;
       suspects.add(suspect(fret, false, amount, amount.gain(), enough, Suspect.Shapes.of(shape)));
@@ -55,7 +55,7 @@ final class FretTrial implements CauseTrial {
     double[] slope = notes.acrossTheBoard(shape);
     Pair pair = Pair.of(neck, neck.trace(shape), neck.trace(slope));
     boolean turnsOver = Math.abs(pair.second().value()) > Math.abs(pair.first().value());
-    double significant = SIGNIFICANT_SLANT * Math.sqrt(notes.restless());
+    double significant = SIGNIFICANT_SLANT;
     if (turnsOver && stands(pair.second(), significant)) {
       double enough = significant * significant + ONE_MORE;
       Suspect.Effect effect = Suspect.Shapes.of(shape, slope);

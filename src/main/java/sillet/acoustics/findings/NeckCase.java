@@ -7,9 +7,6 @@ import java.util.List;
  * the causes looked for, as columns over the rows.
  */
 final class NeckCase {
-  /** Straying of notes on an instrument whose top does not resound in single notes, cents. */
-  private static final double QUIET = 0.24;
-
   /** The fret of a row that is no note but a clearance. */
   static final int HEIGHT = 0;
 
@@ -66,17 +63,9 @@ final class NeckCase {
    */
   record Row(int string, int fret, int pass, boolean low) {}
 
-  /** How many times wider than on a quiet instrument single notes stray; 1 or more. */
-  double restless() {
-    double squares = 0;
-    int count = 0;
-    for (Row row : rows) {
-      if (row.fret != HEIGHT) {
-        squares += stray.of(row.low) * stray.of(row.low);
-        count++;
-      }
-    }
-    return count == 0 ? 1 : Math.max(1, Math.sqrt(squares / count) / QUIET);
+  /** Whether the top resounds at single pitches. */
+  boolean resounds() {
+    return stray.together();
   }
 
   /** Whether a string's clearance at fret 1 was measured. */

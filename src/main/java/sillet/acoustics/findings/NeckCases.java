@@ -58,7 +58,8 @@ final class NeckCases {
     }
     NeckCase first = new Build(cases, linear, Spread.SOUND, even).sound();
     Straying stray = Straying.of(first, estimate.strayCents());
-    return new Build(cases, linear, Spread.SOUND, stray).sound();
+    Build sound = new Build(cases, linear, Spread.SOUND, stray);
+    return stray.together() ? sound.resounding(estimate).sound() : sound.sound();
   }
 
   private boolean low(int string, int fret) {
@@ -152,7 +153,8 @@ final class NeckCases {
             if (last) {
               add(slots.get(unknown.string()), column, 1);
             }
-            unknown(new double[count], unknown.sd());
+            boolean replaced = last || unknown.string() < 0;
+            unknown(replaced ? new double[count] : column, unknown.sd());
           }
           case SLOT -> unknown(column, edge(unknown.string()));
           default -> unknown(column, unknown.sd());
@@ -164,7 +166,7 @@ final class NeckCases {
     private double edge(int string) {
       return Math.hypot(
           EDGE,
-          stray.of(cases.low(string, 0)) / Cents.PER_UNIT * cases.estimate.lie(string).scale());
+          stray.alone(cases.low(string, 0)) / Cents.PER_UNIT * cases.estimate.lie(string).scale());
     }
 
     private void unknown(double[] column, double sd) {
@@ -202,6 +204,28 @@ final class NeckCases {
       for (double[] slot : slots) {
         unknown(slot, spread.gap());
       }
+    }
+
+    /** With pitches that resound; those found loud may be louder still. */
+    Build resounding(NeckEstimate estimate) {
+      Resonances resonances = new Resonances(estimate, cases.rows);
+      List<double[]> shapes = resonances.shapes();
+      int first = columns.size();
+      for (int i = 0; i < shapes.size(); i++) {
+        unknown(shapes.get(i), stray.together(resonances.low().get(i)));
+      }
+      double[] likely = new LinearNeck(misfit, sd, turned()).likely();
+      for (int i = 0; i < shapes.size(); i++) {
+        double louder = Math.max(1, Math.abs(likely[first + i]) / LOUD);
+        columns.set(first + i, times(columns.get(first + i), louder));
+      }
+      return this;
+    }
+
+    private double[] times(double[] column, double factor) {
+      double[] times = new double[count];
+      add(times, column, factor);
+      return times;
     }
 
     NeckCase sound() {
@@ -253,6 +277,9 @@ final class NeckCases {
       }
     }
   }
+
+  /** A pitch this many standard deviations off is given more room. */
+  private static final double LOUD = 1.2;
 
   /** Below this clearance the model would press the string through the fret, m. */
   private static final double LEAST_GAP = 5e-5;

@@ -11,7 +11,7 @@ final class NutPlaceTrial implements CauseTrial {
   /** From which a nut is called out of place, m. */
   static final double OFF = 5.0e-4;
 
-  private static final double SIGNIFICANT = 2.15;
+  private static final double SIGNIFICANT = 2.05;
   private static final int FEWEST_STRINGS = 3;
   private static final int FEWEST_FRETS = 4;
 

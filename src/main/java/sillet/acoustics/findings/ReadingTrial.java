@@ -11,10 +11,13 @@ final class ReadingTrial implements CauseTrial {
 
   private static final double SIGNIFICANT = 4.8;
 
+  /** Where the top resounds single notes stray far by themselves. */
+  private static final double RESOUNDING = 1.2;
+
   @Override
   public List<Suspect> look(NeckCase notes, LinearNeck neck) {
     List<Suspect> suspects = new ArrayList<>();
-    double significant = SIGNIFICANT * notes.restless();
+    double significant = SIGNIFICANT * (notes.resounds() ? RESOUNDING : 1);
     for (int row = 0; row < neck.rows(); row++) {
       NeckCase.Row note = notes.rows().get(row);
       if (note.fret() == NeckCase.HEIGHT) {

@@ -35,10 +35,7 @@ final class SlotTrial implements CauseTrial {
       }
       double[] shape = notes.slots().get(string);
       Amount amount = neck.amount(shape);
-      double significant =
-          notes.gapMeasured(string)
-              ? SIGNIFICANT
-              : SIGNIFICANT_UNMEASURED * Math.sqrt(notes.restless());
+      double significant = notes.gapMeasured(string) ? SIGNIFICANT : SIGNIFICANT_UNMEASURED;
       if (amount.value() >= HIGH && amount.significance() >= significant) {
         suspects.add(
             new Suspect(

@@ -1,6 +1,7 @@
 package sillet.acoustics.findings;
 
 import java.util.Arrays;
+import java.util.function.IntFunction;
 
 /**
  * How far notes of this instrument stray from smooth curves, cents (sd): more at low notes, where
@@ -13,6 +14,9 @@ import java.util.Arrays;
 record Straying(double low, double high) {
   /** Hz. */
   static final double LOW_BELOW = 300;
+
+  /** On a quiet instrument notes stray this far, cents; beyond it pitches do. */
+  private static final double ALONE_AT_MOST = 0.245;
 
   /** Fewer free readings of a string say nothing of it. */
   private static final double FEWEST_FREE = 2;
@@ -28,24 +32,46 @@ record Straying(double low, double high) {
 
   /** Learned from a problem whose readings have an even straying in their sd. */
   static Straying of(NeckCase notes, double even) {
-    return new Straying(of(notes, even, true), of(notes, even, false));
+    double all = of(notes, even, notes::rowsOf);
+    if (all <= ALONE_AT_MOST) {
+      return even(all);
+    }
+    return new Straying(
+        of(notes, even, string -> notes.rowsOf(string, true)),
+        of(notes, even, string -> notes.rowsOf(string, false)));
   }
 
   double of(boolean lowNote) {
     return lowNote ? low : high;
   }
 
-  /** Sd of a reading with this straying instead of an even one. */
+  /** What notes stray each by itself. */
+  double alone(boolean lowNote) {
+    return Math.min(of(lowNote), ALONE_AT_MOST);
+  }
+
+  /** What all notes of one pitch stray together, because the top resounds there. */
+  double together(boolean lowNote) {
+    double alone = alone(lowNote);
+    return Math.sqrt(of(lowNote) * of(lowNote) - alone * alone);
+  }
+
+  /** Whether there is such a pitch. */
+  boolean together() {
+    return together(true) > 0 || together(false) > 0;
+  }
+
+  /** Sd of a reading with this straying, note by note, instead of an even one. */
   double in(double sd, double even, boolean lowNote) {
-    double cents = of(lowNote);
+    double cents = alone(lowNote);
     return Math.sqrt(sd * sd - even * even + cents * cents);
   }
 
-  private static double of(NeckCase notes, double even, boolean low) {
+  private static double of(NeckCase notes, double even, IntFunction<boolean[]> rows) {
     double[] ratios = new double[notes.strings()];
     int count = 0;
     for (int string = 0; string < notes.strings(); string++) {
-      Residuals left = Residuals.of(notes.linear(), notes.rowsOf(string, low));
+      Residuals left = Residuals.of(notes.linear(), rows.apply(string));
       if (left.free() >= FEWEST_FREE) {
         ratios[count++] = left.ratio();
       }

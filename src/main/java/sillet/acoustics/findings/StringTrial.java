@@ -11,7 +11,7 @@ import sillet.acoustics.findings.LinearNeck.Trace;
  */
 final class StringTrial implements CauseTrial {
   /** Gain from which a swing is believed: the best of eleven waves, each with two amounts. */
-  private static final double SWING_ENOUGH = 17;
+  private static final double SWING_ENOUGH = 15.5;
 
   /** What must be left of it without the string's worst note, as a share. */
   private static final double WITHOUT_WORST = 0.5;
@@ -23,6 +23,9 @@ final class StringTrial implements CauseTrial {
 
   /** Gain of a wider spread that is believed, twice the logarithm of a likelihood ratio. */
   private static final double SPREAD_ENOUGH = 25;
+
+  /** Where the top resounds single notes stray far by themselves. */
+  private static final double RESOUNDING = 1.7;
 
   private static final double LEAST_TIMES = 1.5;
 
@@ -40,7 +43,7 @@ final class StringTrial implements CauseTrial {
       if (notes.fretsOf(string) < FEWEST_FRETS || spread.free() < FEWEST_FREE) {
         continue;
       }
-      double restless = notes.restless() * notes.restless();
+      double restless = notes.resounds() ? RESOUNDING : 1;
       double beyond =
           Math.max(
               swingBeyond(notes, neck, string, SWING_ENOUGH * restless),

@@ -24,7 +24,7 @@ import sillet.acoustics.virtual.VirtualInstrument;
 /** On virtual electric guitars, which are not the model; the whole table is the bench's. */
 class NeckFindingsTest {
   private static final VirtualInstrument SOUND =
-      Readout.build(sillet.acoustics.virtual.Kind.ELECTRIC, 4);
+      Readout.build(sillet.acoustics.virtual.Kind.ELECTRIC, 7);
 
   @ParameterizedTest
   @ValueSource(longs = {1, 2, 3, 4, 5})
