@@ -23,12 +23,20 @@ final class Printout {
   }
 
   void octave(Row row, boolean judged) {
+    left(row, judged, 0.10, 0.30);
+  }
+
+  void forecast(Row row, boolean judged) {
+    left(row, judged, 1.0, 4.0);
+  }
+
+  private void left(Row row, boolean judged, double median, double ninetyFifth) {
     if (!score.has(row)) {
       return;
     }
     Tally all = score.of(row);
-    line(row, "median left, cents", all.median(), judged ? 0.10 : Double.NaN);
-    line(row, "95th percentile, cents", all.ninetyFifth(), judged ? 0.30 : Double.NaN);
+    line(row, "median left, cents", all.median(), judged ? median : Double.NaN);
+    line(row, "95th percentile, cents", all.ninetyFifth(), judged ? ninetyFifth : Double.NaN);
     coverage(row, judged);
   }
 

@@ -9,6 +9,9 @@ import sillet.acoustics.estimate.NeckEstimate;
 import sillet.acoustics.estimate.NeckEstimator;
 import sillet.acoustics.estimate.Occasion;
 import sillet.acoustics.estimate.StringHistory;
+import sillet.acoustics.forecast.Forecaster;
+import sillet.acoustics.forecast.InstrumentForecast;
+import sillet.acoustics.forecast.StringChange;
 import sillet.acoustics.moves.Aim;
 import sillet.acoustics.moves.MoveEstimate;
 import sillet.acoustics.moves.MoveSolver;
@@ -81,6 +84,11 @@ final class Solver {
       estimates.add(estimate(List.of(strings.get(i)), List.of(readings.get(i))));
     }
     return estimates;
+  }
+
+  /** Where the saddles will have to stand for fret 12. */
+  static InstrumentForecast forecast(NeckEstimate estimate, List<StringChange> changes) {
+    return Forecaster.of(estimate, changes, Aim.OCTAVE, NutFreedom.FIXED).orElseThrow();
   }
 
   static Move move(MoveEstimate estimate) {

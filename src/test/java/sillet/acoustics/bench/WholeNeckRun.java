@@ -8,7 +8,7 @@ import java.util.stream.IntStream;
  */
 record WholeNeckRun(int instruments, long seed, List<Task> tasks) {
   static List<Task> everything() {
-    return List.of(new OctaveTask(), new NeckTask(), new FindingTask());
+    return List.of(new OctaveTask(), new NeckTask(), new FindingTask(), new ForecastTask());
   }
 
   Score run() {

@@ -38,6 +38,12 @@ public final class WholeNeckTable {
     neck(print, NutFreedom.WHOLE, NO_BAR);
     findings(print, true);
     findings(print, false);
+    print.forecast(ForecastTask.MEASURED, true);
+    print.forecast(ForecastTask.SAME_MAKE, false);
+    print.forecast(ForecastTask.OTHER_MAKE, false);
+    print.forecast(ForecastTask.UNMEASURED, false);
+    print.forecast(ForecastTask.OCTAVE_READ, false);
+    print.forecast(ForecastTask.UNREAD, false);
   }
 
   private static void octave(Printout print) {

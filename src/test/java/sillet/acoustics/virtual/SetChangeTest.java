@@ -39,7 +39,7 @@ class SetChangeTest {
     double sharper = 0;
     for (int i = 0; i < 20; i++) {
       VirtualInstrument old = workshop.build(kind);
-      VirtualInstrument loose = workshop.restring(old, new SetChange(1, 4, 0));
+      VirtualInstrument loose = workshop.restring(old, new SetChange(1, 4, 0, true));
       for (int k = 0; k < old.strings().size(); k++) {
         sharper +=
             loose.strings().get(k).string().centsAgainstOpen(12, 0, 0)

@@ -18,24 +18,28 @@ public final class WireMill {
     this.luck = luck;
   }
 
-  /** The wire and, for a wound one, how thick its core is across the flats. */
-  public record Drawn(VirtualWire wire, double core) {}
+  /** The wire, how thick the core of a wound one is across the flats, and its make. */
+  public record Drawn(VirtualWire wire, double core, StringMake make) {}
 
   Drawn draw(StringPlan plan, Kind kind, double scale) {
+    return draw(plan, StringMake.draw(luck, plan, kind), scale);
+  }
+
+  private Drawn draw(StringPlan plan, StringMake make, double scale) {
     double diameter = plan.diameter() * luck.normal(1, 0.003);
-    double modulus = luck.between(190e9, 207e9);
     if (plan.construction().nylon()) {
-      return new Drawn(nylon(plan, diameter, scale), diameter);
+      return new Drawn(nylon(plan, diameter, make, scale), diameter, make);
     }
     if (plan.construction() == Construct.PLAIN_STEEL) {
       double area = Math.PI / 4 * diameter * diameter;
       double second = area * diameter * diameter / 16;
       double density = luck.normal(STEEL, 25);
-      return new Drawn(new VirtualWire(density * area, modulus * area, modulus * second), diameter);
+      VirtualWire wire =
+          new VirtualWire(density * area, make.modulus() * area, make.modulus() * second);
+      return new Drawn(wire, diameter, make);
     }
-    double core = diameter * plan.coreShare() * luck.normal(1, kind.coreScatter());
-    core = Math.min(core, 0.8 * diameter);
-    return new Drawn(wound(plan, diameter, core, modulus), core);
+    double core = Math.min(diameter * plan.coreShare() * make.core(), 0.8 * diameter);
+    return new Drawn(wound(plan, diameter, core, make), core, make);
   }
 
   /**
@@ -44,10 +48,10 @@ public final class WireMill {
    * Acustica 105, 516 (2019), as quoted elsewhere); the filaments of a wound one carry about 0.15
    * GPa (assumed).
    */
-  Drawn redraw(StringPlan usual, StringPlan tuned, Kind kind, double scale) {
+  Drawn redraw(StringPlan usual, StringPlan tuned, StringMake make, double scale) {
     StringPlan fresh =
         new StringPlan(usual.hz(), tuned.gauge(), usual.construction(), usual.coreShare());
-    Drawn drawn = draw(fresh, kind, scale);
+    Drawn drawn = draw(fresh, make, scale);
     if (!usual.construction().nylon()) {
       return drawn;
     }
@@ -64,21 +68,22 @@ public final class WireMill {
             wire.slackMass() * wider * wider,
             wire.axial() * wider * wider * softer,
             wire.bending() * Math.pow(wider, 4) * softer),
-        drawn.core());
+        drawn.core(),
+        make);
   }
 
-  private VirtualWire wound(StringPlan plan, double diameter, double core, double modulus) {
-    boolean hexagon = luck.chance(0.5);
+  private VirtualWire wound(StringPlan plan, double diameter, double core, StringMake make) {
+    boolean hexagon = make.hexagon();
     double area = hexagon ? Math.sqrt(3) / 2 * core * core : Math.PI / 4 * core * core;
     double second = hexagon ? 5 / (48 * Math.sqrt(3)) * Math.pow(core, 4) : area * core * core / 16;
     double seat = hexagon ? 2 / Math.sqrt(3) * core : core;
     double wrap = (diameter - seat) / 2;
     double turn = Math.hypot(Math.PI * (seat + wrap), wrap);
     double winding = luck.normal(plan.construction().wrapDensity(), 60) * Math.PI / 4 * wrap * turn;
-    return new VirtualWire(STEEL * area + winding, modulus * area, modulus * second);
+    return new VirtualWire(STEEL * area + winding, make.modulus() * area, make.modulus() * second);
   }
 
-  private VirtualWire nylon(StringPlan plan, double diameter, double scale) {
+  private VirtualWire nylon(StringPlan plan, double diameter, StringMake make, double scale) {
     boolean wound = plan.construction() == Construct.WOUND_NYLON;
     double speedOfTheTable = 2 * 0.65 * plan.hz();
     double mass =
@@ -87,9 +92,7 @@ public final class WireMill {
             : luck.normal(975, 25) * Math.PI / 4 * diameter * diameter;
     double speed = 2 * scale * plan.hz();
     double tension = mass * speed * speed;
-    double stretch = wound ? luck.normal(50, 6) : luck.normal(53, 6);
-    double bendingShare = wound ? luck.between(0.2, 0.6) : luck.normal(0.5, 0.03);
-    double reach = bendingShare * Math.sqrt(stretch) * diameter / 2;
-    return new VirtualWire(mass, stretch * tension, reach * reach * tension);
+    double reach = make.bending() * Math.sqrt(make.stretch()) * diameter / 2;
+    return new VirtualWire(mass, make.stretch() * tension, reach * reach * tension);
   }
 }

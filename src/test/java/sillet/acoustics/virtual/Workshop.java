@@ -67,8 +67,12 @@ public final class Workshop {
     List<StringPlan> tuned = old.kind().strings(change.gaugeFactor(), change.semitonesLower());
     List<VirtualInstrument.Course> strings = new ArrayList<>();
     for (int i = 0; i < usual.size(); i++) {
-      WireMill.Drawn drawn =
-          mill.redraw(usual.get(i), tuned.get(i), old.kind(), old.neck().scale());
+      StringMake before = old.strings().get(i).drawn().make();
+      StringMake make =
+          change.sameMake()
+              ? before.anotherGauge(luck)
+              : StringMake.draw(luck, usual.get(i), old.kind());
+      WireMill.Drawn drawn = mill.redraw(usual.get(i), tuned.get(i), make, old.neck().scale());
       double higherAtSaddle = 2 * (change.higherAtTwelve() + luck.normal(0, 8e-5));
       VirtualString string =
           old.strings().get(i).string().restrung(drawn.wire(), tuned.get(i).hz(), higherAtSaddle);
