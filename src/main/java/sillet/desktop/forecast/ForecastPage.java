@@ -1,6 +1,7 @@
 package sillet.desktop.forecast;
 
 import java.util.List;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Function;
 import javafx.scene.control.Label;
@@ -17,6 +18,8 @@ import sillet.logbook.text.Texts;
 
 /** The page of a forecast: what changes above, what that asks for beside each string and below. */
 final class ForecastPage extends ScrollPane {
+  private static final String SHEET = sheet();
+
   private final ForecastModel model;
   private final Texts texts;
   private final Function<InstrumentChange, InstrumentForecast> forecaster;
@@ -59,8 +62,15 @@ final class ForecastPage extends ScrollPane {
     setContent(page);
     setFitToWidth(true);
     setHbarPolicy(ScrollBarPolicy.NEVER);
-    getStyleClass().add("visit-pane");
+    getStylesheets().add(SHEET);
+    getStyleClass().add("forecast-pane");
     changed();
+  }
+
+  private static String sheet() {
+    var place = ForecastPage.class.getResource("/sillet/desktop/forecast.css");
+    return Objects.requireNonNull(place, "forecast.css is missing from the program")
+        .toExternalForm();
   }
 
   private HBox head(String of) {

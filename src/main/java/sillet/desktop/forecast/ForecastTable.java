@@ -88,7 +88,7 @@ final class ForecastTable extends GridPane {
         new Label(row.now().pitch().typed() + " " + Figures.gauge(row.now().make().gaugeIn()));
     what.setMinWidth(Region.USE_PREF_SIZE);
     HBox string = new HBox(name, what);
-    string.getStyleClass().add("panel-line");
+    string.getStyleClass().add("forecast-part");
     string.setAlignment(Pos.CENTER_LEFT);
     pitches.add(cell(row.pitch(), "pitch-" + number, texts.say("forecast.pitch-of", number)));
     gauges.add(cell(row.gauge(), "gauge-" + number, texts.say("forecast.gauge-of", number)));

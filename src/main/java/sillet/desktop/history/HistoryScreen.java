@@ -1,5 +1,6 @@
 package sillet.desktop.history;
 
+import java.time.Instant;
 import java.time.LocalDate;
 import java.util.List;
 import java.util.Map;
@@ -24,6 +25,9 @@ import sillet.desktop.controls.ListKeys;
 import sillet.desktop.controls.Narrow;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.theme.Looks;
+import sillet.logbook.actions.ForgetLearned;
+import sillet.logbook.learned.LearnedInstrument;
+import sillet.logbook.learned.Learning;
 import sillet.logbook.text.Message;
 import sillet.logbook.text.Texts;
 import sillet.logbook.visits.VisitRecord;
@@ -32,7 +36,10 @@ import sillet.store.reading.InstrumentLine;
 
 /** One instrument: its visits, and for the chosen one what was before and what is after. */
 public final class HistoryScreen implements Screen {
-  private record Fetched(Optional<InstrumentLine> line, List<VisitRecord> visits) {}
+  private record Fetched(
+      Optional<InstrumentLine> line,
+      List<VisitRecord> visits,
+      Optional<LearnedInstrument> learned) {}
 
   private final Desk desk;
   private final Texts texts;
@@ -42,6 +49,7 @@ public final class HistoryScreen implements Screen {
   private final HistoryHead head;
   private final CentsPanel cents;
   private final VisitPanels panels;
+  private final LearnedPanel learned;
   private final VBox declined = new VBox();
   private final Label said = new Label();
   private final Button openVisit;
@@ -65,6 +73,7 @@ public final class HistoryScreen implements Screen {
     Narrow narrow = new Narrow(page);
     this.panels =
         new VisitPanels(texts, words, desk.atBench().clock().getZone(), narrow.narrowProperty());
+    this.learned = new LearnedPanel(texts, this::forget);
     this.openVisit =
         KeyHint.button(
             texts.say("history.open-visit"), texts.say("history.open-visit-key"), this::openVisit);
@@ -143,7 +152,7 @@ public final class HistoryScreen implements Screen {
 
   private ScrollPane right() {
     VBox.setVgrow(panels, Priority.ALWAYS);
-    VBox column = new VBox(cents, panels);
+    VBox column = new VBox(cents, panels, learned);
     column.getStyleClass().add("panel-column");
     ScrollPane pane = new ScrollPane(column);
     pane.setFitToWidth(true);
@@ -155,9 +164,16 @@ public final class HistoryScreen implements Screen {
 
   private Fetched fetch() {
     Logbook logbook = desk.logbook();
+    List<VisitRecord> visits = logbook.visits().ofInstrument(instrumentId);
     return new Fetched(
-        logbook.instruments().instrument(instrumentId),
-        logbook.visits().ofInstrument(instrumentId));
+        logbook.instruments().instrument(instrumentId), visits, learned(logbook, visits));
+  }
+
+  /** The newest visit stands first. */
+  private static Optional<LearnedInstrument> learned(Logbook logbook, List<VisitRecord> visits) {
+    return visits.stream()
+        .findFirst()
+        .flatMap(newest -> Learning.of(newest, logbook.visits().past(newest)));
   }
 
   private void show(Fetched fetched) {
@@ -165,6 +181,7 @@ public final class HistoryScreen implements Screen {
     model.show(fetched.line(), fetched.visits());
     model.instrumentProperty().get().ifPresent(head::show);
     model.chosenProperty().get().ifPresent(visit -> list.getSelectionModel().select(visit));
+    learned.show(fetched.learned());
     showDeclined();
     say();
     if (first && body.isVisible()) {
@@ -208,6 +225,25 @@ public final class HistoryScreen implements Screen {
       Label text = new Label(one.text());
       text.setWrapText(true);
       declined.getChildren().addAll(day, text);
+    }
+  }
+
+  /** Asks first: what was learned cannot be called back, though every reading stays. */
+  private void forget() {
+    if (desk.ask().confirm(Message.of("history.forget-sure"))) {
+      Instant now = desk.atBench().clock().instant();
+      String technician = desk.atBench().technician();
+      desk.background()
+          .run(
+              () -> {
+                desk.logbook().perform(new ForgetLearned(instrumentId, now), technician);
+                return fetch();
+              },
+              fetched -> {
+                desk.sign().saved(now);
+                show(fetched);
+              },
+              desk.sign()::notSaved);
     }
   }
 

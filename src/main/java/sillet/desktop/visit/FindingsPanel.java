@@ -84,6 +84,7 @@ final class FindingsPanel extends VBox {
     sentence(words, finding.toDo(), Looks.TIGHT, Looks.SENTENCE, "to-do");
     sentence(words, finding.worth(), Looks.NOTE);
     sentence(words, finding.caution(), Looks.CAUTION, Looks.TIGHT);
+    words.getStyleClass().add("finding-words");
     words.setMinWidth(0);
     HBox.setHgrow(words, Priority.ALWAYS);
     HBox line = new HBox(new Balloon(number, false, finding.head()), words);

@@ -75,7 +75,7 @@ final class VisitPage extends VBox {
 
   private void usual() {
     getChildren().addAll(head, sections, readings);
-    getChildren().add(row(below, 48, 26, 26));
+    getChildren().add(row(below, 44, 32, 24));
     getChildren().add(row(lower, 50, 50));
   }
 

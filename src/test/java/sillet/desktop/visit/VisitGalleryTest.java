@@ -149,6 +149,32 @@ class VisitGalleryTest {
     draw(new Look("neck-150", Theme.DARK, 150, 1280, 1600), VisitGalleryTest::manyFrets);
   }
 
+  /** Fret 7 sharp on all strings, the slot of string 2 high: causes a saddle does not cure. */
+  private static void spoilt(SampleVisits visits) {
+    visits.takeIn(
+        SampleVisits.six(),
+        SampleVisits.sixStrings(648),
+        SampleVisits.brackets(-0.3, 0.6, 0.6, 1.4, 1.4, 3.1));
+    visits
+        .check(6)
+        .read(1, 1, "0.6", "7.4", "0.9", "0.4", "0.3", "0.1")
+        .read(1, 2, "0.9", "5.1", "1.2", "0.5", "0.5", "0.0")
+        .read(1, 3, "1.2", "4.0", "1.8", "0.4", "0.8", "-0.2")
+        .read(1, 5, "1.8", "3.0", "2.9", "0.3", "1.0", "-0.7")
+        .read(1, 7, "5.2", "5.3", "6.9", "3.0", "4.2", "1.6")
+        .read(1, 9, "3.4", "2.8", "5.4", "0.3", "1.6", "-1.6")
+        .read(1, 12, "4.9/5.0/5.2", "3.4", "7.7/7.8/8.0", "0.3", "2.1", "-2.6")
+        .read(1, 15, "6.9", "4.3", "10.3", "0.4", "2.9", "-3.5")
+        .read(1, 17, "8.4", "4.9", "12.6", "0.5", "3.4", "-4.2");
+  }
+
+  @Test
+  void causes() throws IOException {
+    draw(Look.light("causes"), VisitGalleryTest::spoilt);
+    draw(new Look("causes-1920", Theme.DARK, 100, 1920, 1080), VisitGalleryTest::spoilt);
+    draw(new Look("causes-tall", Theme.LIGHT, 100, 1280, 1300), VisitGalleryTest::spoilt);
+  }
+
   @Test
   void whatHandsDo() throws IOException {
     draw(

@@ -67,7 +67,8 @@ final class FretMarks {
     if (advice == null || figures == null || string.madeMm() != null) {
       return null;
     }
-    if (advice.verdict() == Verdict.LEAVE) {
+    Double nut = figures.nutMm();
+    if (advice.verdict() == Verdict.LEAVE && (nut == null || nut == 0)) {
       return null;
     }
     double whole =

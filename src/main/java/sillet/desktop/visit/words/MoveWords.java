@@ -73,7 +73,9 @@ public final class MoveWords {
               StringWords.Kind.LEAVE,
               Direction.STAY,
               null,
-              texts.say("visit.words.leave"),
+              nut(figures).isEmpty()
+                  ? texts.say("visit.words.leave")
+                  : texts.say("visit.words.leave-saddle"),
               mm(Math.abs(figures.saddleMm())),
               "",
               nut(figures),
