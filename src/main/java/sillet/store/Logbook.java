@@ -8,6 +8,7 @@ import sillet.store.engine.Engine;
 import sillet.store.engine.Session;
 import sillet.store.place.LogbookPlace;
 import sillet.store.reading.InstrumentQueries;
+import sillet.store.reading.PartsQueries;
 import sillet.store.reading.ShopQueries;
 import sillet.store.reading.StringSetQueries;
 import sillet.store.reading.VisitQueries;
@@ -110,6 +111,10 @@ public final class Logbook implements AutoCloseable {
 
   public InstrumentQueries instruments() {
     return new InstrumentQueries(session);
+  }
+
+  public PartsQueries parts() {
+    return new PartsQueries(session);
   }
 
   public StringSetQueries stringSets() {

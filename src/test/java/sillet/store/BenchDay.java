@@ -16,7 +16,9 @@ import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
 import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
+import sillet.logbook.actions.RecordFretPlaces;
 import sillet.logbook.actions.RecordMoves;
+import sillet.logbook.actions.RecordPickups;
 import sillet.logbook.actions.RecordReadings;
 import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.ReviseCustomer;
@@ -31,6 +33,10 @@ import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.instruments.ScrewSense;
 import sillet.logbook.moves.AimChoice;
 import sillet.logbook.moves.NutMovable;
+import sillet.logbook.parts.FretPlace;
+import sillet.logbook.parts.FretPlaces;
+import sillet.logbook.parts.Pickup;
+import sillet.logbook.parts.PickupsMeasured;
 import sillet.logbook.shop.Customer;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.strings.FittedString;
@@ -207,6 +213,19 @@ public final class BenchDay {
     return new VisitNote(AT.plusSeconds(300), NoteKind.DECLINED, "\u201cno new nut, please\u201d");
   }
 
+  public static FretPlaces fretPlaces() {
+    return new FretPlaces(
+        AT.plusSeconds(400),
+        647.7,
+        List.of(new FretPlace(1, 36.4, "36.4"), new FretPlace(12, 323.85, "12.75in")));
+  }
+
+  public static PickupsMeasured pickups() {
+    return new PickupsMeasured(
+        AT.plusSeconds(500),
+        List.of(new Pickup("bridge", 41.5, 1.6, 2.0), new Pickup("neck", 162.25, null, null)));
+  }
+
   public static VisitAim aim() {
     return new VisitAim(AimChoice.parse("1 5 7 12:2.5"), NutMovable.WHOLE);
   }
@@ -246,6 +265,8 @@ public final class BenchDay {
         new ReviseInstrument(sold, 1),
         new ChooseAim(VISIT_ID, new VisitAim(AimChoice.NECK, NutMovable.NO)),
         new ChooseAim(VISIT_ID, aim()),
-        new ForgetLearned(INSTRUMENT_ID, AT.minusSeconds(86400)));
+        new ForgetLearned(INSTRUMENT_ID, AT.minusSeconds(86400)),
+        new RecordFretPlaces(INSTRUMENT_ID, fretPlaces()),
+        new RecordPickups(INSTRUMENT_ID, pickups()));
   }
 }

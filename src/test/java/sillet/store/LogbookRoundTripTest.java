@@ -14,11 +14,15 @@ import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
 import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
+import sillet.logbook.actions.RecordFretPlaces;
 import sillet.logbook.actions.RecordMoves;
+import sillet.logbook.actions.RecordPickups;
 import sillet.logbook.actions.RecordReadings;
 import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.TakeIn;
 import sillet.logbook.actions.WriteNote;
+import sillet.logbook.parts.FretPlace;
+import sillet.logbook.parts.FretPlaces;
 import sillet.logbook.shop.Shop;
 import sillet.logbook.visits.InstrumentPast;
 import sillet.logbook.visits.Travel;
@@ -69,6 +73,22 @@ class LogbookRoundTripTest {
     perform(new KeepStringSet(BenchDay.set()));
     perform(new KeepStringSet(BenchDay.set()));
     assertThat(logbook.stringSets().all()).containsExactly(BenchDay.set());
+  }
+
+  @Test
+  void keepsEveryMeasuringOfFretsAndPickups() {
+    takeIn();
+    perform(new RecordFretPlaces(BenchDay.INSTRUMENT_ID, BenchDay.fretPlaces()));
+    FretPlaces again =
+        new FretPlaces(
+            BenchDay.AT.plusSeconds(900), 647.7, List.of(new FretPlace(1, 36.35, "36.35")));
+    perform(new RecordFretPlaces(BenchDay.INSTRUMENT_ID, again));
+    perform(new RecordPickups(BenchDay.INSTRUMENT_ID, BenchDay.pickups()));
+    assertThat(logbook.parts().frets(BenchDay.INSTRUMENT_ID))
+        .containsExactly(again, BenchDay.fretPlaces());
+    assertThat(logbook.parts().pickups(BenchDay.INSTRUMENT_ID)).containsExactly(BenchDay.pickups());
+    assertThat(logbook.parts().frets(BenchDay.SHORT_FIFTH_ID)).isEmpty();
+    assertThat(logbook.parts().pickups(BenchDay.SHORT_FIFTH_ID)).isEmpty();
   }
 
   @Test

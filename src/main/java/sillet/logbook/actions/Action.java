@@ -15,6 +15,8 @@ public sealed interface Action
         KeepStringSet,
         TakeIn,
         RecordTravel,
+        RecordFretPlaces,
+        RecordPickups,
         RecordChecks,
         RecordReadings,
         RecordMoves,

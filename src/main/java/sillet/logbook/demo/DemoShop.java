@@ -57,6 +57,7 @@ public final class DemoShop {
     DemoInstruments.all()
         .forEach(i -> story.add(new DemoAction(start, TECHNICIAN, new AddInstrument(i))));
     story.addAll(DemoVisits.finished(today.minusMonths(20)));
+    story.addAll(DemoParts.lapwing(today.minusMonths(20)));
     story.addAll(DemoVisits.open(today));
     story.addAll(DemoVisits.arrived(today));
     return List.copyOf(story);

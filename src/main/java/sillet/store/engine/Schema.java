@@ -17,7 +17,7 @@ import org.flywaydb.core.Flyway;
  */
 final class Schema {
   /** The number of the newest script in db/migration. */
-  static final int NEWEST = 2;
+  static final int NEWEST = 3;
 
   private static final String NEWEST_ROW =
       "SELECT \"version\" FROM \"flyway_schema_history\" WHERE \"success\" = TRUE"

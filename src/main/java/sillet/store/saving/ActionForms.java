@@ -16,7 +16,9 @@ import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
 import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
+import sillet.logbook.actions.RecordFretPlaces;
 import sillet.logbook.actions.RecordMoves;
+import sillet.logbook.actions.RecordPickups;
 import sillet.logbook.actions.RecordReadings;
 import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.ReviseCustomer;
@@ -47,6 +49,8 @@ public final class ActionForms {
           new Form("record moves", 1, RecordMoves.class),
           new Form("log work", 1, LogWork.class),
           new Form("write note", 1, WriteNote.class),
+          new Form("record fret places", 1, RecordFretPlaces.class),
+          new Form("record pickups", 1, RecordPickups.class),
           new Form("choose aim", 1, ChooseAim.class),
           new Form("forget learned", 1, ForgetLearned.class),
           new Form("hand out", 1, HandOut.class));

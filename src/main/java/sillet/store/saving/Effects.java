@@ -10,7 +10,9 @@ import sillet.logbook.actions.KeepStringSet;
 import sillet.logbook.actions.LogWork;
 import sillet.logbook.actions.NameShop;
 import sillet.logbook.actions.RecordChecks;
+import sillet.logbook.actions.RecordFretPlaces;
 import sillet.logbook.actions.RecordMoves;
+import sillet.logbook.actions.RecordPickups;
 import sillet.logbook.actions.RecordReadings;
 import sillet.logbook.actions.RecordTravel;
 import sillet.logbook.actions.ReviseCustomer;
@@ -58,6 +60,10 @@ final class Effects {
       BenchEffects.work(change, a.visitId(), a.line());
     } else if (action instanceof WriteNote a) {
       BenchEffects.note(change, a.visitId(), a.note());
+    } else if (action instanceof RecordFretPlaces a) {
+      PartsEffects.frets(change, a.instrumentId(), a.measured());
+    } else if (action instanceof RecordPickups a) {
+      PartsEffects.pickups(change, a.instrumentId(), a.measured());
     } else if (action instanceof ChooseAim a) {
       LearningEffects.aim(change, a.visitId(), a.aim());
     } else if (action instanceof ForgetLearned a) {

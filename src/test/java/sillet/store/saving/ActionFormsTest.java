@@ -66,6 +66,10 @@ class ActionFormsTest {
       assertThat(record.work()).containsExactly(BenchDay.work());
       assertThat(record.aim()).isEqualTo(BenchDay.aim());
       assertThat(record.notes()).containsExactly(BenchDay.note());
+      assertThat(logbook.parts().frets(BenchDay.INSTRUMENT_ID))
+          .containsExactly(BenchDay.fretPlaces());
+      assertThat(logbook.parts().pickups(BenchDay.INSTRUMENT_ID))
+          .containsExactly(BenchDay.pickups());
     }
   }
 
