@@ -25,6 +25,12 @@ public interface GoTo {
   /** What was read and done on an instrument, visit by visit. */
   void history(UUID instrumentId);
 
+  /** Where the frets of an instrument belong and where they stand. */
+  void frets(UUID instrumentId);
+
+  /** The pickups of an instrument. */
+  void pickups(UUID instrumentId);
+
   /** The first start: leaves the logbook that is open. */
   void start();
 

@@ -14,6 +14,7 @@ import javafx.scene.control.ScrollPane;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.StackPane;
@@ -115,7 +116,13 @@ public final class HistoryScreen implements Screen {
 
   @Override
   public Map<KeyCombination, Runnable> keys() {
-    return Map.of(new KeyCodeCombination(KeyCode.N, KeyCombination.SHORTCUT_DOWN), this::newVisit);
+    return Map.of(
+        new KeyCodeCombination(KeyCode.N, KeyCombination.SHORTCUT_DOWN),
+        this::newVisit,
+        new KeyCodeCombination(KeyCode.F, KeyCombination.SHORTCUT_DOWN),
+        () -> desk.goTo().frets(instrumentId),
+        new KeyCodeCombination(KeyCode.P, KeyCombination.SHORTCUT_DOWN),
+        () -> desk.goTo().pickups(instrumentId));
   }
 
   private void listen() {
@@ -145,9 +152,28 @@ public final class HistoryScreen implements Screen {
     list.setAccessibleText(texts.say("history.visits-head"));
     VBox.setVgrow(list, Priority.ALWAYS);
     declined.getStyleClass().add("declined");
-    VBox panel = new VBox(line, list, declined);
+    VBox panel = new VBox(line, list, declined, parts());
     panel.getStyleClass().addAll(Looks.PANEL, "visits-panel");
     return panel;
+  }
+
+  /** The sheets of parts that are measured by themselves. */
+  private FlowPane parts() {
+    Button frets =
+        KeyHint.button(
+            texts.say("history.frets"),
+            texts.say("history.frets-key"),
+            () -> desk.goTo().frets(instrumentId));
+    frets.setId("fret-sheet");
+    Button pickups =
+        KeyHint.button(
+            texts.say("history.pickups"),
+            texts.say("history.pickups-key"),
+            () -> desk.goTo().pickups(instrumentId));
+    pickups.setId("pickup-sheet");
+    FlowPane parts = new FlowPane(frets, pickups);
+    parts.getStyleClass().add("choice-flow");
+    return parts;
   }
 
   private ScrollPane right() {

@@ -4,9 +4,11 @@ import javafx.beans.property.StringProperty;
 import sillet.desktop.bench.BenchScreen;
 import sillet.desktop.controls.Desk;
 import sillet.desktop.controls.Screen;
+import sillet.desktop.frets.FretScreen;
 import sillet.desktop.history.HistoryScreen;
 import sillet.desktop.instruments.InstrumentsScreen;
 import sillet.desktop.intake.IntakeScreen;
+import sillet.desktop.pickups.PickupScreen;
 import sillet.desktop.sets.SetsScreen;
 import sillet.desktop.visit.VisitScreen;
 
@@ -39,6 +41,12 @@ final class AllScreens implements Screens {
   public Screen at(Place place) {
     if (place instanceof Place.History history) {
       return new HistoryScreen(desk, history.instrumentId());
+    }
+    if (place instanceof Place.Frets frets) {
+      return new FretScreen(desk, frets.instrumentId());
+    }
+    if (place instanceof Place.Pickups pickups) {
+      return new PickupScreen(desk, pickups.instrumentId());
     }
     if (place instanceof Place.AtVisit visit) {
       return new VisitScreen(desk, visit.ticket());

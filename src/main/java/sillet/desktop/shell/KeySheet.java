@@ -35,6 +35,9 @@ final class KeySheet {
     row(grid, "shell.key-back", "shell.key-back-does");
     row(grid, "shell.key-theme", "shell.key-theme-does");
     row(grid, "shell.key-text", "shell.key-text-does");
+    row(grid, "shell.key-parts-sheets", "shell.key-parts-sheets-does");
+    row(grid, "shell.key-sets", "shell.key-sets-does");
+    row(grid, "shell.key-view", "shell.key-view-does");
     head(grid, "shell.keys-visit");
     row(grid, "shell.key-parts", "shell.key-parts-does");
     row(grid, "shell.key-neck", "shell.key-neck-does");

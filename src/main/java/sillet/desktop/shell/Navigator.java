@@ -67,6 +67,16 @@ final class Navigator implements GoTo {
   }
 
   @Override
+  public void frets(UUID instrumentId) {
+    to(new Place.Frets(instrumentId));
+  }
+
+  @Override
+  public void pickups(UUID instrumentId) {
+    to(new Place.Pickups(instrumentId));
+  }
+
+  @Override
   public void start() {
     leaver.run();
   }

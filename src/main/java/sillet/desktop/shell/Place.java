@@ -26,6 +26,12 @@ sealed interface Place {
   /** One instrument and its visits. */
   record History(UUID instrumentId) implements Place {}
 
+  /** The fret sheet of an instrument. */
+  record Frets(UUID instrumentId) implements Place {}
+
+  /** The pickup sheet of an instrument. */
+  record Pickups(UUID instrumentId) implements Place {}
+
   /** Under which word of the top line a place stands. */
   enum Word {
     BENCH,
@@ -41,7 +47,8 @@ sealed interface Place {
     if (this instanceof Sets) {
       return Word.SETS;
     }
-    boolean instruments = this instanceof Instruments || this instanceof History;
+    boolean parts = this instanceof Frets || this instanceof Pickups;
+    boolean instruments = parts || this instanceof Instruments || this instanceof History;
     return instruments ? Word.INSTRUMENTS : Word.BENCH;
   }
 }

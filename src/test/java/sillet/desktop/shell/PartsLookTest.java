@@ -47,6 +47,7 @@ class PartsLookTest {
       window.press(KeyCode.CONTROL, KeyCode.D);
       window.untilRows("#bench-list", 2);
       sets(window, size, shape);
+      instrument(window, size, shape);
     }
   }
 
@@ -71,6 +72,24 @@ class PartsLookTest {
     window.press(KeyCode.TAB);
     keep(window, size, "sets-edit-" + shape);
     window.press(KeyCode.ESCAPE);
+  }
+
+  private void instrument(TestWindow window, int[] size, String shape) throws IOException {
+    window.press(KeyCode.F3);
+    window.type("lapwing");
+    window.untilRows("#instrument-list", 1);
+    window.press(KeyCode.ENTER);
+    window.press(KeyCode.ENTER);
+    window.untilRows("#visit-list", 2);
+    keep(window, size, "parts-history-" + shape);
+    window.press(KeyCode.CONTROL, KeyCode.F);
+    window.untilSaid("costs most");
+    keep(window, size, "frets-" + shape);
+    window.press(KeyCode.ESCAPE);
+    window.untilRows("#visit-list", 2);
+    window.press(KeyCode.CONTROL, KeyCode.P);
+    window.untilSaid("hardly heard, up to");
+    keep(window, size, "pickups-" + shape);
   }
 
   /** The headless screen is 1280 wide; a larger window is laid out in a scene of its own. */

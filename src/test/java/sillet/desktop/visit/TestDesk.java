@@ -103,6 +103,16 @@ public final class TestDesk implements Ask, AtBench, GoTo, SaveSign {
   }
 
   @Override
+  public void frets(UUID instrumentId) {
+    went.add("frets");
+  }
+
+  @Override
+  public void pickups(UUID instrumentId) {
+    went.add("pickups");
+  }
+
+  @Override
   public void start() {
     went.add("start");
   }

@@ -1,4 +1,4 @@
-package sillet.desktop.sets;
+package sillet.desktop.controls;
 
 import javafx.geometry.HPos;
 import javafx.scene.Node;
@@ -10,11 +10,11 @@ import javafx.scene.layout.Region;
 import sillet.desktop.theme.Looks;
 
 /** A table of words and figures, a rule under each row. */
-final class FigureTable extends GridPane {
+public final class FigureTable extends GridPane {
   private int rows;
 
   /** How a column stands. */
-  enum Column {
+  public enum Column {
     /** Words, as wide as they are. */
     WORDS,
     /** Words that wrap and take the room there is. */
@@ -23,7 +23,7 @@ final class FigureTable extends GridPane {
     FIGURE
   }
 
-  FigureTable(Column... columns) {
+  public FigureTable(Column... columns) {
     getStyleClass().add("rule-table");
     for (Column kind : columns) {
       ColumnConstraints column = new ColumnConstraints();
@@ -39,7 +39,7 @@ final class FigureTable extends GridPane {
   }
 
   /** The heads of the columns, in small type. */
-  void head(String... heads) {
+  public void head(String... heads) {
     for (int column = 0; column < heads.length; column++) {
       Label head = new Label(heads[column]);
       head.getStyleClass().add(Looks.NOTE);
@@ -49,7 +49,7 @@ final class FigureTable extends GridPane {
   }
 
   /** A row; a text stands for a label, a node for itself. */
-  void row(Object... cells) {
+  public void row(Object... cells) {
     for (int column = 0; column < cells.length; column++) {
       add(node(cells[column]), column, rows);
     }
@@ -67,7 +67,7 @@ final class FigureTable extends GridPane {
   }
 
   /** A figure to act on. */
-  static Label strong(String text) {
+  public static Label strong(String text) {
     Label label = new Label(text);
     label.getStyleClass().add(Looks.STRONG);
     label.setMinWidth(Region.USE_PREF_SIZE);
@@ -75,7 +75,7 @@ final class FigureTable extends GridPane {
   }
 
   /** A second figure. */
-  static Label soft(String text) {
+  public static Label soft(String text) {
     Label label = new Label(text);
     label.getStyleClass().add(Looks.SOFT);
     label.setWrapText(true);
