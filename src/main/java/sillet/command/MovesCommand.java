@@ -1,7 +1,6 @@
 package sillet.command;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
@@ -9,20 +8,14 @@ import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 import sillet.logbook.moves.BenchString;
+import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.shop.Shop;
-import sillet.logbook.text.Message;
-import sillet.sheets.bench.BenchSheet;
 import sillet.sheets.bench.SheetString;
 import sillet.sheets.bench.SheetUse;
-import sillet.sheets.csv.Remark;
-import sillet.sheets.csv.Remarks;
-import sillet.sheets.csv.WholeFile;
-import sillet.sheets.moves.MovesSheet;
 
 /** From a bench sheet to the moves. */
 @Command(name = "moves", mixinStandardHelpOptions = true)
@@ -47,47 +40,13 @@ final class MovesCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
-    try (BenchSheet sheet = BenchSheet.open(file, SheetUse.MOVES)) {
-      warn(sheet.warnings());
-      Path target = out;
-      if (target == null) {
-        terminal.data(writer -> moves(sheet, new MovesSheet(writer, terminal.texts())));
-        return ExitCodes.DONE;
-      }
-      refuseInputAsOutput(target);
-      WholeFile.write(
-          target,
-          bytes -> {
-            var writer = Terminal.text(bytes);
-            moves(sheet, new MovesSheet(writer, terminal.texts()));
-            writer.flush();
-          });
-    }
-    return ExitCodes.DONE;
+    return new BenchSheetRun(terminal, spec).run(file, SheetUse.MOVES, out, this::moves);
   }
 
-  private void moves(BenchSheet sheet, MovesSheet moves) throws IOException {
-    MoveAdvisor advisor = new MoveAdvisor(Shop.USUAL_BREAKING_SHARE_PERCENT);
-    sheet.inOrder(
-        rows -> {
-          List<BenchString> strings = rows.stream().map(SheetString::string).toList();
-          return advisor.advise(strings, aim.choice()).strings();
-        },
-        moves::write);
-  }
-
-  private void refuseInputAsOutput(Path target) throws IOException {
-    if (Files.exists(target) && Files.isSameFile(file, target)) {
-      throw new ParameterException(
-          spec.commandLine(), terminal.texts().say("command.out-is-input", target.toString()));
-    }
-  }
-
-  private void warn(Remarks warnings) {
-    for (Remark warning : warnings.listed()) {
-      String said = warning.said(terminal.texts());
-      terminal.say(Message.of("command.unusual", said));
-    }
-    terminal.more(warnings.more());
+  private List<MoveAdvice> moves(List<SheetString> rows) {
+    List<BenchString> strings = rows.stream().map(SheetString::string).toList();
+    return new MoveAdvisor(Shop.USUAL_BREAKING_SHARE_PERCENT)
+        .advise(strings, aim.choice())
+        .strings();
   }
 }

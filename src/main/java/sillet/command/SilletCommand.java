@@ -39,6 +39,7 @@ public final class SilletCommand {
     CommandLine line =
         described(new RootCommand(terminal, around, window), texts.say("usage.sillet"))
             .addSubcommand(described(new MovesCommand(terminal), texts.say("usage.moves")))
+            .addSubcommand(described(new ForecastCommand(terminal), texts.say("usage.forecast")))
             .addSubcommand(described(new SheetCommand(terminal, around), texts.say("usage.sheet")))
             .addSubcommand(
                 described(new HistoryCommand(terminal, around), texts.say("usage.history")))

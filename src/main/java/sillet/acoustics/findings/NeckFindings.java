@@ -26,6 +26,9 @@ public final class NeckFindings {
    * @return in the order to look; none on a sound instrument
    */
   public static List<NeckFinding> of(NeckEstimate estimate, FindingOptions options) {
+    if (estimate.misfits().isEmpty()) {
+      return List.of();
+    }
     List<NeckFinding> findings = new ArrayList<>();
     NeckCase notes = NeckCases.of(estimate);
     NeckCurves curves = new NeckCurves(estimate, notes);

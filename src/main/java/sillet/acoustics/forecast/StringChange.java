@@ -1,6 +1,8 @@
 package sillet.acoustics.forecast;
 
 import java.util.OptionalDouble;
+import java.util.TreeMap;
+import sillet.acoustics.estimate.StringSituation;
 import sillet.acoustics.readings.Reference;
 
 /**
@@ -31,5 +33,14 @@ public record StringChange(
   /** Whether the piece of string itself stays on. */
   public boolean keepsTheString() {
     return now.spec().equals(then.spec());
+  }
+
+  /**
+   * The string in its situation then, with saddle and nut where they stand now.
+   *
+   * @param now most likely situation
+   */
+  public StringSituation situation(StringSituation now) {
+    return new NotesThen(this, new TreeMap<>(), against).then(now);
   }
 }

@@ -1,7 +1,9 @@
 package sillet.logbook.forecast;
 
+import java.util.ArrayList;
 import java.util.List;
 import sillet.logbook.moves.FindingReport;
+import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.text.Message;
 
 /**
@@ -29,5 +31,23 @@ public record InstrumentForecast(
     findings = List.copyOf(findings);
     redo = List.copyOf(redo);
     cautions = List.copyOf(cautions);
+  }
+
+  /**
+   * The forecast as it stands in a sheet: an advice for each string, with what must be redone among
+   * its sentences.
+   *
+   * @return string 1 first
+   */
+  public List<MoveAdvice> rows() {
+    List<MoveAdvice> rows = new ArrayList<>();
+    for (StringForecast one : strings) {
+      List<Message> notes = new ArrayList<>(one.notes());
+      notes.addAll(redo);
+      List<FindingReport> found =
+          findings.stream().filter(finding -> finding.concerns(one.then().number())).toList();
+      rows.add(new MoveAdvice(one.now(), one.figures(), one.verdict(), one.neck(), found, notes));
+    }
+    return rows;
   }
 }

@@ -5,6 +5,7 @@ import java.util.Locale;
 import java.util.SortedMap;
 import java.util.StringJoiner;
 import java.util.TreeMap;
+import sillet.acoustics.moves.Aim;
 import sillet.logbook.text.Quoted;
 import sillet.logbook.text.Rejection;
 import sillet.logbook.units.DecimalText;
@@ -121,6 +122,19 @@ public record AimChoice(Kind kind, SortedMap<Integer, Double> weights) {
     if (weights.put(Integer.valueOf(fret), weight) != null) {
       throw Rejection.of("aim.fret-twice", fret);
     }
+  }
+
+  /**
+   * The same for the physics.
+   *
+   * @return what a move is to make true
+   */
+  public Aim acoustic() {
+    return switch (kind) {
+      case OCTAVE -> Aim.OCTAVE;
+      case NECK -> Aim.NECK;
+      case FRETS -> Aim.frets(weights);
+    };
   }
 
   /**

@@ -18,15 +18,7 @@ final class InstrumentMoves {
 
   InstrumentMoves(KnownNeck neck, AimChoice aim) {
     this.neck = neck;
-    this.aim = of(aim);
-  }
-
-  static Aim of(AimChoice aim) {
-    return switch (aim.kind()) {
-      case OCTAVE -> Aim.OCTAVE;
-      case NECK -> Aim.NECK;
-      case FRETS -> Aim.frets(aim.weights());
-    };
+    this.aim = aim.acoustic();
   }
 
   /** One a string, in order, or why there is none. */

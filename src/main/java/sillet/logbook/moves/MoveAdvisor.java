@@ -12,6 +12,9 @@ import sillet.logbook.text.Message;
 
 /** Tells for each string of an instrument how far its saddle goes, and what a saddle cannot do. */
 public final class MoveAdvisor {
+  /** 1200/ln 2: cents at fret 12 for a move as long as the scale, by the plain length rule. */
+  public static final double CENTS_PER_SCALE = 1731.234;
+
   private final double breakingShare;
 
   /**
@@ -49,7 +52,7 @@ public final class MoveAdvisor {
       return new InstrumentAdvice(List.of(), List.of(), null);
     }
     KnownNeck neck = KnownNeck.of(strings);
-    List<FindingReport> findings = NeckReports.of(neck);
+    List<FindingReport> findings = InstrumentFindings.of(neck);
     List<Outcome<MoveEstimate>> moves = new InstrumentMoves(neck, aim).solve();
     List<MoveAdvice> advice = new ArrayList<>(strings.size());
     for (int i = 0; i < strings.size(); i++) {
@@ -92,6 +95,18 @@ public final class MoveAdvisor {
    */
   public static Verdict verdict(BenchString string, MoveFigures figures) {
     return MoveVerdict.of(string, figures);
+  }
+
+  /**
+   * The verdict on a move that is only forecast, where no reading is behind fret 12.
+   *
+   * @param room what saddle and bridge let it do
+   * @param figures of the move
+   * @return leave it where zero lies in the interval, else whether it fits into the travel
+   */
+  public static Verdict forecastVerdict(SaddleRoom room, MoveFigures figures) {
+    boolean zeroInside = figures.lowMm() <= 0 && figures.highMm() >= 0;
+    return zeroInside ? Verdict.LEAVE : MoveVerdict.fitting(room, figures);
   }
 
   /**

@@ -1,6 +1,7 @@
 package sillet.logbook.visits;
 
 import sillet.logbook.moves.BenchString;
+import sillet.logbook.moves.MoveAdvisor;
 import sillet.logbook.moves.NoteRead;
 
 /**
@@ -9,9 +10,6 @@ import sillet.logbook.moves.NoteRead;
  */
 final class SlippedSaddle {
   private static final int OCTAVE = 12;
-
-  /** 1200/ln 2: cents at fret 12 per share of the scale. */
-  private static final double CENTS_PER_SCALE = 1731.234;
 
   /** The plain length rule is off by up to 8 % on short scales and thick strings. */
   private static final double RULE_SHARE = 0.08;
@@ -37,7 +35,7 @@ final class SlippedSaddle {
         || before.readings().against() != now.readings().against()) {
       return false;
     }
-    double centsPerMm = -CENTS_PER_SCALE / now.string().scaleMm();
+    double centsPerMm = -MoveAdvisor.CENTS_PER_SCALE / now.string().scaleMm();
     double off = second.cents() - first.cents() - centsPerMm * movedMm;
     double read = Math.hypot(first.sdCents(), second.sdCents());
     double rule = RULE_SHARE * centsPerMm * movedMm;

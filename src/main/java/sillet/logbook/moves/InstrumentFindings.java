@@ -13,10 +13,16 @@ import sillet.acoustics.findings.NeckFindings;
 import sillet.logbook.text.Message;
 
 /** The findings of an instrument for people, in the order in which to look. */
-final class NeckReports {
-  private NeckReports() {}
+public final class InstrumentFindings {
+  private InstrumentFindings() {}
 
-  static List<FindingReport> of(KnownNeck neck) {
+  /**
+   * What stands out.
+   *
+   * @param neck an estimated instrument
+   * @return causes that a saddle cannot cure; empty for a sound instrument
+   */
+  public static List<FindingReport> of(KnownNeck neck) {
     Map<FindingOptions.Note, Message> odd = new HashMap<>();
     List<FindingReport> reports = new ArrayList<>();
     for (int i = 0; i < neck.strings().size(); i++) {
