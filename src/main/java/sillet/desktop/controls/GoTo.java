@@ -22,6 +22,9 @@ public interface GoTo {
   /** The visit of a ticket. */
   void visit(int ticket);
 
+  /** What other strings, tuning or action would ask of the instrument of a ticket. */
+  void forecast(int ticket);
+
   /** What was read and done on an instrument, visit by visit. */
   void history(UUID instrumentId);
 

@@ -14,6 +14,7 @@ import sillet.desktop.theme.Looks;
 import sillet.logbook.forecast.InstrumentChange;
 import sillet.logbook.forecast.InstrumentForecast;
 import sillet.logbook.strings.StringSet;
+import sillet.logbook.text.Rejection;
 import sillet.logbook.text.Texts;
 
 /** The page of a forecast: what changes above, what that asks for beside each string and below. */
@@ -94,9 +95,19 @@ final class ForecastPage extends ScrollPane {
     wrong.setManaged(!wrong.getText().isEmpty());
     if (change.isPresent() && !change.get().equals(shown)) {
       shown = change.get();
-      InstrumentForecast forecast = forecaster.apply(change.get());
+      reckon(change.get());
+    }
+  }
+
+  /** A string that cannot be so is named; what was reckoned before stays. */
+  private void reckon(InstrumentChange change) {
+    try {
+      InstrumentForecast forecast = forecaster.apply(change);
       table.show(forecast, words);
       panels.show(forecast, words);
+    } catch (Rejection rejected) {
+      wrong.setText(texts.say(rejected.reason()));
+      wrong.setManaged(true);
     }
   }
 

@@ -4,6 +4,7 @@ import javafx.beans.property.StringProperty;
 import sillet.desktop.bench.BenchScreen;
 import sillet.desktop.controls.Desk;
 import sillet.desktop.controls.Screen;
+import sillet.desktop.forecast.ForecastScreen;
 import sillet.desktop.frets.FretScreen;
 import sillet.desktop.history.HistoryScreen;
 import sillet.desktop.instruments.InstrumentsScreen;
@@ -50,6 +51,9 @@ final class AllScreens implements Screens {
     }
     if (place instanceof Place.AtVisit visit) {
       return new VisitScreen(desk, visit.ticket());
+    }
+    if (place instanceof Place.Forecast forecast) {
+      return new ForecastScreen(desk, forecast.ticket());
     }
     if (place instanceof Place.TakeIn takeIn) {
       return new IntakeScreen(desk, takeIn.instrumentId());

@@ -46,6 +46,7 @@ final class KeySheet {
     row(grid, "shell.key-passes", "shell.key-passes-does");
     row(grid, "shell.key-turn", "shell.key-turn-does");
     row(grid, "shell.key-log", "shell.key-log-does");
+    row(grid, "shell.key-forecast", "shell.key-forecast-does");
     row(grid, "shell.key-sheet", "shell.key-sheet-does");
     row(grid, "shell.key-hand-out", "shell.key-hand-out-does");
     return grid;

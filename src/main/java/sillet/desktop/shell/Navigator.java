@@ -62,6 +62,11 @@ final class Navigator implements GoTo {
   }
 
   @Override
+  public void forecast(int ticket) {
+    to(new Place.Forecast(ticket));
+  }
+
+  @Override
   public void history(UUID instrumentId) {
     to(new Place.History(instrumentId));
   }

@@ -23,6 +23,9 @@ sealed interface Place {
   /** One visit. */
   record AtVisit(int ticket) implements Place {}
 
+  /** What a change would ask of the instrument of a visit. */
+  record Forecast(int ticket) implements Place {}
+
   /** One instrument and its visits. */
   record History(UUID instrumentId) implements Place {}
 

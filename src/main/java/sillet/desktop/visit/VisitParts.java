@@ -1,6 +1,7 @@
 package sillet.desktop.visit;
 
 import java.time.LocalDate;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import javafx.scene.Node;
@@ -43,7 +44,6 @@ final class VisitParts {
   private final RoomPanel roomPanel;
   private final LogPart log;
   private final Button handOut;
-  private final Button jobSheet;
   private final MadeMode made;
   private final SectionWords sections;
   private final VisitPage page;
@@ -52,7 +52,7 @@ final class VisitParts {
   private boolean placed;
   private int shownPass;
 
-  VisitParts(VisitDesk desk, WordsOfVisit said, Runnable export, Runnable history) {
+  VisitParts(VisitDesk desk, WordsOfVisit said, List<Button> leadOn) {
     this.desk = desk;
     this.model = desk.model();
     this.texts = desk.texts();
@@ -79,12 +79,9 @@ final class VisitParts {
     this.handOut =
         KeyHint.button(texts.say("visit.hand-out"), texts.say("visit.key.hand-out"), this::handOut);
     handOut.setId("hand-out");
-    this.jobSheet =
-        KeyHint.button(texts.say("visit.job-sheet"), texts.say("visit.key.job-sheet"), export);
-    jobSheet.setId("job-sheet");
-    Button past =
-        KeyHint.button(texts.say("visit.history"), texts.say("visit.key.history"), history);
-    this.log = new LogPart(desk, List.of(past, jobSheet, handOut));
+    List<Button> buttons = new ArrayList<>(leadOn);
+    buttons.add(handOut);
+    this.log = new LogPart(desk, buttons);
     this.made = new MadeMode(desk, readings, this::refresh);
     this.sections = new SectionWords(sections());
     List<Region> below = List.of(checksPanel, findings, log.work());

@@ -1,12 +1,14 @@
 package sillet.desktop.visit;
 
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.beans.value.ChangeListener;
 import javafx.scene.Node;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.input.KeyCode;
@@ -16,6 +18,7 @@ import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.VBox;
 import org.jspecify.annotations.Nullable;
 import sillet.desktop.controls.Desk;
+import sillet.desktop.controls.KeyHint;
 import sillet.desktop.controls.Screen;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.actions.Action;
@@ -96,8 +99,7 @@ public final class VisitScreen implements Screen {
             this::kept);
     VisitDesk together = new VisitDesk(desk, visit, onTheWay);
     VisitParts made =
-        new VisitParts(
-            together, new WordsOfVisit(desk.texts(), advisor), this::export, this::history);
+        new VisitParts(together, new WordsOfVisit(desk.texts(), advisor), buttons());
     model = visit;
     saves = onTheWay;
     parts = made;
@@ -107,6 +109,26 @@ public final class VisitScreen implements Screen {
     if (shown) {
       begin(made);
     }
+  }
+
+  /** What leads on from the page. */
+  private List<Button> buttons() {
+    Button forecast =
+        KeyHint.button(
+            desk.texts().say("forecast.forecast"),
+            desk.texts().say("visit.key.forecast"),
+            this::forecast);
+    forecast.setId("forecast");
+    Button past =
+        KeyHint.button(
+            desk.texts().say("visit.history"), desk.texts().say("visit.key.history"), this::history);
+    Button sheet =
+        KeyHint.button(
+            desk.texts().say("visit.job-sheet"),
+            desk.texts().say("visit.key.job-sheet"),
+            this::export);
+    sheet.setId("job-sheet");
+    return List.of(forecast, past, sheet);
   }
 
   private void perform(Action action) {
@@ -169,6 +191,7 @@ public final class VisitScreen implements Screen {
     keys.put(shortcut(KeyCode.L), () -> with(VisitParts::focusWork));
     keys.put(shortcut(KeyCode.T), () -> with(VisitParts::focusNotes));
     keys.put(shortcut(KeyCode.H), this::history);
+    keys.put(shortcut(KeyCode.F), this::forecast);
     keys.put(shortcut(KeyCode.ENTER), () -> with(VisitParts::handOut));
     keys.put(new KeyCodeCombination(KeyCode.F4), () -> with(VisitParts::turnAbout));
     keys.put(new KeyCodeCombination(KeyCode.F5), () -> with(page -> page.aim().nextAim()));
@@ -211,6 +234,10 @@ public final class VisitScreen implements Screen {
       parts.focusStart();
       event.consume();
     }
+  }
+
+  private void forecast() {
+    desk.goTo().forecast(ticket);
   }
 
   private void history() {

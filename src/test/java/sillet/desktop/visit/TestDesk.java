@@ -98,6 +98,11 @@ public final class TestDesk implements Ask, AtBench, GoTo, SaveSign {
   }
 
   @Override
+  public void forecast(int ticket) {
+    went.add("forecast " + ticket);
+  }
+
+  @Override
   public void history(UUID instrumentId) {
     went.add("history");
   }
