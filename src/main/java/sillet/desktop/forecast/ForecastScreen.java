@@ -71,8 +71,7 @@ public final class ForecastScreen implements Screen {
   }
 
   private String name(VisitRecord record) {
-    return desk.texts()
-        .say("forecast.of", record.instrument().name(), Integer.toString(ticket));
+    return desk.texts().say("forecast.of", record.instrument().name(), Integer.toString(ticket));
   }
 
   @Override

@@ -98,8 +98,7 @@ public final class VisitScreen implements Screen {
             this::read,
             this::kept);
     VisitDesk together = new VisitDesk(desk, visit, onTheWay);
-    VisitParts made =
-        new VisitParts(together, new WordsOfVisit(desk.texts(), advisor), buttons());
+    VisitParts made = new VisitParts(together, new WordsOfVisit(desk.texts(), advisor), buttons());
     model = visit;
     saves = onTheWay;
     parts = made;
@@ -121,7 +120,9 @@ public final class VisitScreen implements Screen {
     forecast.setId("forecast");
     Button past =
         KeyHint.button(
-            desk.texts().say("visit.history"), desk.texts().say("visit.key.history"), this::history);
+            desk.texts().say("visit.history"),
+            desk.texts().say("visit.key.history"),
+            this::history);
     Button sheet =
         KeyHint.button(
             desk.texts().say("visit.job-sheet"),

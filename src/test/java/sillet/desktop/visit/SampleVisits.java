@@ -129,7 +129,7 @@ public final class SampleVisits {
     return strings;
   }
 
-  static List<Travel> travel(int strings, double back, double forward) {
+  public static List<Travel> travel(int strings, double back, double forward) {
     List<Travel> travel = new ArrayList<>();
     for (int string = 1; string <= strings; string++) {
       travel.add(new Travel(string, back, forward));
@@ -138,7 +138,7 @@ public final class SampleVisits {
   }
 
   /** Travel ends one millimetre before the nominal scale and seven behind it, on every string. */
-  static List<Travel> brackets(double... setbackMm) {
+  public static List<Travel> brackets(double... setbackMm) {
     List<Travel> travel = new ArrayList<>();
     for (int i = 0; i < setbackMm.length; i++) {
       travel.add(new Travel(i + 1, 7 - setbackMm[i], setbackMm[i] + 1));
