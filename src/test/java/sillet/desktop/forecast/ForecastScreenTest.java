@@ -72,8 +72,7 @@ class ForecastScreenTest {
     int[] size = {1280, 750};
     Seen now = look(Theme.LIGHT, 100, size, scene -> {});
     assertThat(now.words()).contains("Nothing changes yet.").doesNotContain("lighter");
-    Seen lower =
-        look(Theme.LIGHT, 100, size, scene -> type(scene, "#forecast-semitones", "-2"));
+    Seen lower = look(Theme.LIGHT, 100, size, scene -> type(scene, "#forecast-semitones", "-2"));
     assertThat(lower.words()).contains("lighter").doesNotContain("Nothing changes yet.");
     lower.picture().save("forecast-6");
   }

@@ -147,7 +147,7 @@ public final class SampleVisits {
   }
 
   /** Reads a fret on string after string; a blank is not read. */
-  SampleVisits read(int pass, int fret, String... cents) {
+  public SampleVisits read(int pass, int fret, String... cents) {
     List<Reading> readings = new ArrayList<>();
     for (int i = 0; i < cents.length; i++) {
       if (!cents[i].isEmpty()) {
@@ -171,7 +171,7 @@ public final class SampleVisits {
     return this;
   }
 
-  SampleVisits check(int strings) {
+  public SampleVisits check(int strings) {
     List<BenchCheck> checks =
         List.of(
             new BenchCheck(
