@@ -1,8 +1,6 @@
 package sillet.acoustics.findings;
 
 import java.util.Arrays;
-import org.hipparchus.linear.Array2DRowRealMatrix;
-import org.hipparchus.linear.CholeskyDecomposition;
 
 /**
  * Readings as a linear problem about the most likely lie: misfit = slopes x unknowns + noise, the
@@ -159,13 +157,24 @@ final class LinearNeck {
     }
     for (int k = 0; k < size; k++) {
       information[k][k] += 1;
-      for (int l = 0; l < k; l++) {
-        information[l][k] = information[k][l];
+    }
+    return rooted(information);
+  }
+
+  /** Cholesky's factor in the place of the lower triangle; 1 on the diagonal keeps it definite. */
+  private static double[][] rooted(double[][] lower) {
+    for (int i = 0; i < lower.length; i++) {
+      double[] row = lower[i];
+      for (int j = 0; j <= i; j++) {
+        double[] other = lower[j];
+        double sum = row[j];
+        for (int k = 0; k < j; k++) {
+          sum -= row[k] * other[k];
+        }
+        row[j] = i == j ? Math.sqrt(sum) : sum / other[j];
       }
     }
-    return new CholeskyDecomposition(new Array2DRowRealMatrix(information, false), 1e-9, 0)
-        .getL()
-        .getData();
+    return lower;
   }
 
   private void forward(double[] x) {
