@@ -48,7 +48,8 @@ final class NeckCases {
     NeckCases cases = new NeckCases(estimate);
     Linear linear = estimate.linear();
     Straying even = Straying.even(estimate.strayCents());
-    for (int round = 0; round < ROUNDS; round++) {
+    int rounds = linear.rows().isEmpty() ? 0 : ROUNDS;
+    for (int round = 0; round < rounds; round++) {
       List<Double> point = new Build(cases, linear, Spread.FAULTY, even).likely();
       Optional<Linear> there = estimate.linear(point);
       if (there.isEmpty()) {
@@ -65,6 +66,15 @@ final class NeckCases {
   private boolean low(int string, int fret) {
     double hz = estimate.lie(string).openHz() * EqualTemperament.ratio(fret);
     return hz < Straying.LOW_BELOW;
+  }
+
+  /** How often the note of a row was read in all; it strays alike each time. */
+  private int timesRead(int row) {
+    NeckCase.Row note = rows.get(row);
+    return (int)
+        rows.stream()
+            .filter(one -> one.string() == note.string() && one.fret() == note.fret())
+            .count();
   }
 
   private List<NeckCase.Row> rows(Linear linear) {
@@ -114,7 +124,8 @@ final class NeckCases {
       double learned = cases.estimate.strayCents();
       for (int i = 0; i < notes; i++) {
         misfit[i] = linear.rows().get(i).misfit().residual();
-        sd[i] = stray.in(linear.rows().get(i).misfit().sd(), learned, cases.rows.get(i).low());
+        double read = linear.rows().get(i).misfit().sd();
+        sd[i] = stray.in(read, learned, cases.rows.get(i).low(), cases.timesRead(i));
       }
       unknowns();
       heights();

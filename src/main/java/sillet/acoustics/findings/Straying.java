@@ -61,10 +61,13 @@ record Straying(double low, double high) {
     return together(true) > 0 || together(false) > 0;
   }
 
-  /** Sd of a reading with this straying, note by note, instead of an even one. */
-  double in(double sd, double even, boolean lowNote) {
+  /**
+   * Sd of a reading with this straying, note by note, instead of an even one. Readings of one note
+   * stray alike: each of so many takes that many times the variance, so that their mean keeps it.
+   */
+  double in(double sd, double even, boolean lowNote, int timesRead) {
     double cents = alone(lowNote);
-    return Math.sqrt(sd * sd - even * even + cents * cents);
+    return Math.sqrt(sd * sd - even * even + timesRead * cents * cents);
   }
 
   private static double of(NeckCase notes, double even, IntFunction<boolean[]> rows) {

@@ -129,6 +129,11 @@ class NeckFindingsTest {
   }
 
   @Test
+  void saysNothingWithoutAReading() {
+    assertThat(NeckFindings.of(new Readout(SOUND, 1).estimate(), FindingOptions.NONE)).isEmpty();
+  }
+
+  @Test
   void blamesTheActionOnlyAgainstATarget() {
     NeckEstimate estimate = new Readout(SOUND, 9).estimate(Readout.ALL);
     double action = estimate.actionAtTwelve(5).value();
