@@ -23,8 +23,10 @@ import sillet.acoustics.solve.Outcome;
 final class CurveLeastSquares {
   private static final int MOST_EVALUATIONS = 40;
 
-  /** Settled, as a share of the step for slopes. */
-  private static final double NEAR = 1e-4;
+  /**
+   * Settled, as a share of the step for slopes; where a curve has a kink, steps stay this small.
+   */
+  private static final double NEAR = 1e-2;
 
   /** Below this share two directions count as the same. */
   private static final double SINGULAR = 1e-12;
