@@ -11,12 +11,21 @@ final class RobustLoss {
   /** Standard deviations up to which a reading is believed. */
   private static final double BELIEVED = 2.5;
 
+  /** The same where a body's part is not taken off: resonances stand out. */
+  private static final double BELIEVED_OF_BODIES = 4;
+
+  /** Round from which on straying is learned: not from readings that are still to be let go. */
+  private static final int LEARN_FROM = 2;
+
   /** Round from which on a wild reading is let go. */
   private static final int LET_GO_FROM = 3;
 
   private static final double LEAST_WEIGHT = 1e-6;
-  private static final double LEAST_STRAY = 0.02;
-  private static final double LEAST_BODY = 0.02;
+
+  /** Of straying by itself and of a body's, cents; measured guitars stay well within. */
+  private static final double LEAST_CENTS = 0.02;
+
+  private static final double MOST_CENTS = 1;
 
   private final InstrumentModel model;
   private final Noise noise;
@@ -54,13 +63,30 @@ final class RobustLoss {
     if (round == 0) {
       return false;
     }
+    boolean letGo = round >= LET_GO_FROM;
     for (int row = 0; row < noise.readings().count(); row++) {
-      noise.weight(row, weight(rows.residual(row) / noise.sd(row), round >= LET_GO_FROM));
+      double byCurve = weight(rows.residual(row) / noise.sd(row), letGo);
+      noise.weight(row, Math.min(byCurve, withoutBody(rows, row, state, letGo)));
     }
-    noise.stray(stray(rows, posterior));
-    learnBody(posterior, state);
+    if (round >= LEARN_FROM) {
+      noise.stray(stray(rows, posterior));
+      learnBody(posterior, state);
+    }
     expect(state);
     return true;
+  }
+
+  /** A reading so far off that no body does it must not teach what the body does. */
+  private double withoutBody(Linearized rows, int row, State state, boolean letGo) {
+    double[] slopes = rows.slopes(row);
+    double cents = 0;
+    double squares = 0;
+    for (int place : model.body().places()) {
+      cents += slopes[place] * state.point()[place];
+      squares += slopes[place] * slopes[place];
+    }
+    double sd = Math.hypot(noise.sd(row), Math.sqrt(squares));
+    return weight((rows.residual(row) + cents) / sd * BELIEVED / BELIEVED_OF_BODIES, letGo);
   }
 
   private static double weight(double off, boolean letGo) {
@@ -88,26 +114,27 @@ final class RobustLoss {
           slopes[i] += weighed * own[i];
         }
       }
-      squares += strays * strays;
+      squares += Math.min(strays * strays, BELIEVED * BELIEVED * variance);
       determined += Math.max(0, 1 - (left + posterior.variance(slopes)) / variance);
     }
-    return Math.max(LEAST_STRAY, Math.sqrt(squares / determined));
+    return Math.min(MOST_CENTS, Math.max(LEAST_CENTS, Math.sqrt(squares / determined)));
   }
 
   /** How much the body yields, by the same fixed point. */
   private void learnBody(Posterior posterior, State state) {
     int[] places = model.body().places();
+    double sd = state.sds()[places[0]];
     double squares = Expectations.BODY_COUNT * Expectations.BODY * Expectations.BODY;
     double determined = Expectations.BODY_COUNT;
     double[] one = new double[expected.length];
     for (int place : places) {
       double value = state.value(place);
-      squares += value * value;
+      squares += Math.min(value * value, BELIEVED * BELIEVED * sd * sd);
       one[place] = 1;
       determined += Math.max(0, 1 - posterior.variance(one));
       one[place] = 0;
     }
-    double learned = Math.max(LEAST_BODY, Math.sqrt(squares / determined));
+    double learned = Math.min(MOST_CENTS, Math.max(LEAST_CENTS, Math.sqrt(squares / determined)));
     for (int place : places) {
       state.countIn(place, learned);
     }

@@ -5,23 +5,25 @@ import org.hipparchus.exception.MathIllegalArgumentException;
 import org.hipparchus.exception.MathIllegalStateException;
 import org.hipparchus.linear.Array2DRowRealMatrix;
 import org.hipparchus.linear.ArrayRealVector;
-import org.hipparchus.linear.QRDecomposer;
 import org.hipparchus.linear.RealMatrix;
 import org.hipparchus.linear.RealVector;
-import org.hipparchus.optim.nonlinear.vector.leastsquares.GaussNewtonOptimizer;
 import org.hipparchus.optim.nonlinear.vector.leastsquares.LeastSquaresBuilder;
 import org.hipparchus.optim.nonlinear.vector.leastsquares.LeastSquaresOptimizer.Optimum;
 import org.hipparchus.optim.nonlinear.vector.leastsquares.LeastSquaresProblem.Evaluation;
+import org.hipparchus.optim.nonlinear.vector.leastsquares.LevenbergMarquardtOptimizer;
 import org.hipparchus.util.Pair;
 import sillet.acoustics.solve.Outcome;
 
 /**
  * Least squares over smooth curves whose slopes are taken by central differences: Hipparchus'
- * Gauss-Newton with a cap, which curves as little bent as notes over a move settle in a few rounds,
- * and a failure instead of nonsense.
+ * Levenberg-Marquardt with a cap, done when a step is far below what slopes were taken over, and a
+ * failure instead of nonsense.
  */
 final class CurveLeastSquares {
-  private static final int MOST_EVALUATIONS = 40;
+  private static final int MOST_EVALUATIONS = 60;
+
+  /** Of the sum of squares and of the unknowns; slopes are good to 1e-7. */
+  private static final double TOLERANCE = 1e-9;
 
   /**
    * Settled, as a share of the step for slopes; where a curve has a kink, steps stay this small.
@@ -47,7 +49,9 @@ final class CurveLeastSquares {
     try {
       int rows = watched(values, start).length;
       Optimum optimum =
-          new GaussNewtonOptimizer(new QRDecomposer(SINGULAR), false)
+          new LevenbergMarquardtOptimizer()
+              .withCostRelativeTolerance(TOLERANCE)
+              .withParameterRelativeTolerance(TOLERANCE)
               .optimize(
                   new LeastSquaresBuilder()
                       .model(point -> valueAndSlopes(values, point.toArray(), step))

@@ -2,12 +2,7 @@ package sillet.acoustics.moves;
 
 import java.util.ArrayList;
 import java.util.List;
-import sillet.acoustics.estimate.HeightSds;
-import sillet.acoustics.estimate.InstrumentEvidence;
 import sillet.acoustics.estimate.NeckEstimate;
-import sillet.acoustics.estimate.NeckEstimator;
-import sillet.acoustics.estimate.Occasion;
-import sillet.acoustics.estimate.StringHistory;
 import sillet.acoustics.solve.NotSolved;
 import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.Solved;
@@ -70,40 +65,6 @@ public final class MoveSolver {
       throw new IllegalArgumentException("move is " + saddleMove);
     }
     return new OctaveMoves(estimate).left(string, saddleMove);
-  }
-
-  /** The best move of one string by itself. */
-  public static Outcome<MoveEstimate> solve(MoveTask task) {
-    NutFreedom nut = task.nutFree() ? NutFreedom.EACH : NutFreedom.FIXED;
-    return estimate(List.of(task))
-        .flatMap(estimate -> solve(estimate, task.aim(), nut))
-        .map(moves -> moves.get(0));
-  }
-
-  /** The best moves of strings on one nut, for the whole neck. */
-  public static Outcome<List<MoveEstimate>> solveWholeNut(List<MoveTask> tasks) {
-    if (tasks.isEmpty()) {
-      throw new IllegalArgumentException("no string on the nut");
-    }
-    return estimate(tasks).flatMap(estimate -> solve(estimate, Aim.NECK, NutFreedom.WHOLE));
-  }
-
-  /** What a saddle move of one string by itself leaves at fret 12. */
-  public static Outcome<Double> cents12At(MoveTask task, double saddleMove) {
-    if (!Double.isFinite(saddleMove)) {
-      throw new IllegalArgumentException("move is " + saddleMove);
-    }
-    return estimate(List.of(task)).flatMap(estimate -> cents12At(estimate, 0, saddleMove));
-  }
-
-  private static Outcome<NeckEstimate> estimate(List<MoveTask> tasks) {
-    List<StringHistory> strings = new ArrayList<>();
-    for (MoveTask task : tasks) {
-      strings.add(
-          StringHistory.of(
-              Occasion.first(task.lie(), HeightSds.measured(), task.against(), task.readings())));
-    }
-    return NeckEstimator.estimate(new InstrumentEvidence(strings));
   }
 
   /** One result a string, or the first reason why there is none. */

@@ -57,7 +57,10 @@ final class NeckMoves {
       }
       for (Map.Entry<Integer, Double> one : aim.weights().entrySet()) {
         int fret = one.getKey();
-        double cents = string.estimated(fret) + string.change(after, fret);
+        double cents =
+            aim == Aim.OCTAVE
+                ? string.octave().value() + string.octaveChange(after)
+                : string.estimated(fret) + string.change(after, fret);
         notes[row++] = Math.sqrt(one.getValue()) * cents;
       }
     }

@@ -86,7 +86,7 @@ class NeckMoveTest {
       mean += solve(task).nutMove() / lies.size();
     }
 
-    List<MoveEstimate> whole = MoveSolver.solveWholeNut(tasks).orElseThrow();
+    List<MoveEstimate> whole = MoveTask.solveWholeNut(tasks).orElseThrow();
 
     assertThat(whole).hasSize(3);
     for (MoveEstimate estimate : whole) {
@@ -143,7 +143,7 @@ class NeckMoveTest {
     for (int fret = 1; fret <= 12; fret++) {
       harmonic.add(new FretReading(fret, FrettedPitch.centsAgainstHarmonic(lie, fret), 0.1));
     }
-    MoveTask task = new MoveTask(lie, harmonic, Reference.HARMONIC, Aim.NECK, false, 0);
+    MoveTask task = new MoveTask(lie, harmonic, Reference.HARMONIC, Aim.NECK, false);
 
     MoveEstimate byHarmonic = solve(task);
     MoveEstimate byOpen = solve(Strings.neck(lie, false, model(lie, 0.1)));
@@ -172,9 +172,9 @@ class NeckMoveTest {
     StringLie rod = Strings.lie(new StringConstants(1e-3, 1e5, 1e3, 0), 30);
     List<FretReading> readings = List.of(new FretReading(12, 5, 0.5));
 
-    assertThat(MoveSolver.solve(Strings.neck(rod, true, readings))).isInstanceOf(NotSolved.class);
+    assertThat(Strings.neck(rod, true, readings).solve()).isInstanceOf(NotSolved.class);
     assertThat(
-            MoveSolver.solveWholeNut(
+            MoveTask.solveWholeNut(
                 List.of(
                     Strings.neck(Strings.thin(), true, readings),
                     Strings.neck(rod, true, readings))))
@@ -183,7 +183,7 @@ class NeckMoveTest {
 
   @Test
   void rejectsANutWithoutStrings() {
-    assertThatThrownBy(() -> MoveSolver.solveWholeNut(List.of()))
+    assertThatThrownBy(() -> MoveTask.solveWholeNut(List.of()))
         .isInstanceOf(IllegalArgumentException.class);
   }
 
@@ -215,6 +215,6 @@ class NeckMoveTest {
   }
 
   private static MoveEstimate solve(MoveTask task) {
-    return MoveSolver.solve(task).orElseThrow();
+    return task.solve().orElseThrow();
   }
 }

@@ -97,7 +97,7 @@ class OctaveMoveTest {
   void addsTheVariancesOfReadingAndModel() {
     FretReading reading = new FretReading(12, 5, 0.3);
     MoveTask task =
-        new MoveTask(Strings.thin(), List.of(reading), Reference.OPEN, Aim.OCTAVE, false, 0.02);
+        new MoveTask(Strings.thin(), List.of(reading), Reference.OPEN, Aim.OCTAVE, false);
 
     MoveEstimate estimate = solve(task);
 
@@ -132,8 +132,7 @@ class OctaveMoveTest {
   void makesFretTwelveTrueAgainstTheReferenceItWasReadAgainst() {
     StringLie lie = Strings.wound();
     FretReading zero = new FretReading(12, 0, 0.1);
-    MoveTask harmonic =
-        new MoveTask(lie, List.of(zero), Reference.HARMONIC, Aim.OCTAVE, false, 0.005);
+    MoveTask harmonic = new MoveTask(lie, List.of(zero), Reference.HARMONIC, Aim.OCTAVE, false);
     MoveEstimate estimate = solve(harmonic);
 
     assertThat(estimate.saddleMove()).isCloseTo(0, within(1e-8));
@@ -159,7 +158,7 @@ class OctaveMoveTest {
   @Test
   void doesNotSolveWhatNoSaddleExplains() {
     Outcome<MoveEstimate> outcome =
-        MoveSolver.solve(Strings.octave(Strings.thin(), new FretReading(12, 5000, 0.5)));
+        Strings.octave(Strings.thin(), new FretReading(12, 5000, 0.5)).solve();
 
     assertThat(outcome).isInstanceOf(NotSolved.class);
   }
@@ -169,17 +168,17 @@ class OctaveMoveTest {
     StringLie rod = Strings.lie(new StringConstants(1e-3, 1e5, 1e3, 0), 30);
     FretReading reading = new FretReading(12, 5, 0.5);
 
-    assertThat(MoveSolver.solve(Strings.octave(rod, reading))).isInstanceOf(NotSolved.class);
-    assertThat(MoveSolver.solve(Strings.octave(rod))).isInstanceOf(NotSolved.class);
-    assertThat(MoveSolver.cents12At(Strings.octave(rod, reading), 0)).isInstanceOf(NotSolved.class);
+    assertThat(Strings.octave(rod, reading).solve()).isInstanceOf(NotSolved.class);
+    assertThat(Strings.octave(rod).solve()).isInstanceOf(NotSolved.class);
+    assertThat(Strings.octave(rod, reading).cents12At(0)).isInstanceOf(NotSolved.class);
   }
 
   @Test
   void refusesAMoveThatIsNoNumber() {
     MoveTask task = Strings.octave(Strings.thin(), new FretReading(12, 5, 0.5));
-    assertThatThrownBy(() -> MoveSolver.cents12At(task, Double.NaN))
+    assertThatThrownBy(() -> task.cents12At(Double.NaN))
         .isInstanceOf(IllegalArgumentException.class);
-    assertThat(MoveSolver.cents12At(task, -1)).isInstanceOf(NotSolved.class);
+    assertThat(task.cents12At(-1)).isInstanceOf(NotSolved.class);
   }
 
   private static MoveEstimate fiveSharp(StringLie lie) {
@@ -187,10 +186,10 @@ class OctaveMoveTest {
   }
 
   private static MoveEstimate solve(MoveTask task) {
-    return MoveSolver.solve(task).orElseThrow();
+    return task.solve().orElseThrow();
   }
 
   private static double left(MoveTask task, double move) {
-    return MoveSolver.cents12At(task, move).orElseThrow();
+    return task.cents12At(move).orElseThrow();
   }
 }

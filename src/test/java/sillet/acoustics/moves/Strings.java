@@ -34,10 +34,10 @@ final class Strings {
 
   /** A task of the usual kind. */
   static MoveTask octave(StringLie lie, FretReading... readings) {
-    return new MoveTask(lie, List.of(readings), Reference.OPEN, Aim.OCTAVE, false, 0);
+    return new MoveTask(lie, List.of(readings), Reference.OPEN, Aim.OCTAVE, false);
   }
 
   static MoveTask neck(StringLie lie, boolean nutFree, List<FretReading> readings) {
-    return new MoveTask(lie, readings, Reference.OPEN, Aim.NECK, nutFree, 0);
+    return new MoveTask(lie, readings, Reference.OPEN, Aim.NECK, nutFree);
   }
 }

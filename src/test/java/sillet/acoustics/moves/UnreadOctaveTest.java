@@ -64,10 +64,8 @@ class UnreadOctaveTest {
     MoveTask task = Strings.octave(Strings.thin(), THREE, FIVE, SEVEN);
 
     MoveEstimate whole = solve(task);
-    assertThat(MoveSolver.cents12At(task, 0).orElseThrow())
-        .isCloseTo(whole.cents12Before(), within(1e-9));
-    assertThat(MoveSolver.cents12At(task, whole.saddleMove()).orElseThrow())
-        .isCloseTo(0, within(1e-5));
+    assertThat(task.cents12At(0).orElseThrow()).isCloseTo(whole.cents12Before(), within(1e-9));
+    assertThat(task.cents12At(whole.saddleMove()).orElseThrow()).isCloseTo(0, within(1e-5));
   }
 
   private static double width(MoveEstimate estimate) {
@@ -75,6 +73,6 @@ class UnreadOctaveTest {
   }
 
   private static MoveEstimate solve(MoveTask task) {
-    return MoveSolver.solve(task).orElseThrow();
+    return task.solve().orElseThrow();
   }
 }

@@ -1,7 +1,6 @@
 package sillet.acoustics.moves;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.ArrayList;
@@ -10,8 +9,6 @@ import java.util.Random;
 import java.util.SortedSet;
 import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
 import sillet.acoustics.neck.StringLie;
 import sillet.acoustics.readings.FretReading;
 import sillet.acoustics.readings.Reference;
@@ -19,34 +16,7 @@ import sillet.acoustics.solve.Outcome;
 import sillet.acoustics.solve.Solved;
 import sillet.acoustics.wire.StringConstants;
 
-class MoveTaskTest {
-  @Test
-  void findsAReadingByItsFret() {
-    FretReading five = new FretReading(5, 1, 0.5);
-    MoveTask task = Strings.octave(Strings.thin(), new FretReading(12, 2, 0.5), five);
-
-    assertThat(task.at(5)).isEqualTo(five);
-    assertThat(task.at(7)).isNull();
-  }
-
-  @Test
-  void rejectsAFretReadTwice() {
-    assertThatThrownBy(
-            () ->
-                Strings.octave(
-                    Strings.thin(), new FretReading(5, 1, 0.5), new FretReading(5, 2, 0.5)))
-        .isInstanceOf(IllegalArgumentException.class)
-        .hasMessageContaining("fret 5");
-  }
-
-  @ParameterizedTest
-  @ValueSource(doubles = {-0.01, 1.01, Double.NaN})
-  void rejectsAShareOutOfRange(double share) {
-    assertThatThrownBy(
-            () -> new MoveTask(Strings.thin(), List.of(), Reference.OPEN, Aim.OCTAVE, false, share))
-        .isInstanceOf(IllegalArgumentException.class);
-  }
-
+class AnyReadingsTest {
   @Test
   void trustsAKnownStringMore() {
     assertThat(share(0)).isCloseTo(0.005, within(1e-12));
@@ -66,9 +36,8 @@ class MoveTaskTest {
       StringLie lie = lies.get(random.nextInt(lies.size()));
       Aim aim = random.nextBoolean() ? Aim.OCTAVE : Aim.NECK;
       Reference against = random.nextBoolean() ? Reference.OPEN : Reference.HARMONIC;
-      MoveTask task =
-          new MoveTask(lie, anyReadings(random), against, aim, random.nextBoolean(), 0.005);
-      Outcome<MoveEstimate> outcome = MoveSolver.solve(task);
+      MoveTask task = new MoveTask(lie, anyReadings(random), against, aim, random.nextBoolean());
+      Outcome<MoveEstimate> outcome = task.solve();
       if (outcome instanceof Solved<MoveEstimate> answer) {
         solved++;
         MoveEstimate estimate = answer.value();
@@ -97,6 +66,6 @@ class MoveTaskTest {
   }
 
   private static double share(double relativeSd) {
-    return MoveTask.modelShareOf(new StringConstants(1e-3, 1e4, 1e-4, relativeSd));
+    return ModelShare.of(new StringConstants(1e-3, 1e4, 1e-4, relativeSd));
   }
 }
