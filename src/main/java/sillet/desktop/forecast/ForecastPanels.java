@@ -48,15 +48,15 @@ final class ForecastPanels {
     }
     all.getChildren()
         .setAll(head(texts.say("forecast.all")), sentence(words.pull(forecast), Looks.SENTENCE));
+    words
+        .cautions(forecast)
+        .forEach(caution -> all.getChildren().add(sentence(caution, Looks.CAUTION)));
     for (StringForecast string : forecast.strings()) {
       String number = Integer.toString(string.then().number());
       for (String note : words.line(string).notes()) {
         all.getChildren().add(sentence(texts.say("forecast.note", number, note), Looks.TIGHT));
       }
     }
-    words
-        .cautions(forecast)
-        .forEach(caution -> all.getChildren().add(sentence(caution, Looks.CAUTION)));
   }
 
   private static Label head(String text) {

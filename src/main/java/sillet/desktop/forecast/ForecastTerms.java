@@ -41,7 +41,13 @@ final class ForecastTerms extends FlowPane {
               changed.run();
             });
     TextField semitones = field(model.semitones(), "semitones", texts.say("forecast.tune"));
-    semitones.textProperty().addListener((property, before, now) -> model.tune());
+    semitones
+        .textProperty()
+        .addListener(
+            (property, before, now) -> {
+              model.tune();
+              changed.run();
+            });
     TextField reference = field(model.reference(), "reference", texts.say("forecast.reference"));
     reference.setPromptText(model.referenceNow());
     Button clear = new Button(texts.say("forecast.clear"));

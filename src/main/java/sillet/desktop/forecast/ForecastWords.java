@@ -1,6 +1,7 @@
 package sillet.desktop.forecast;
 
 import java.util.List;
+import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import sillet.logbook.forecast.InstrumentForecast;
 import sillet.logbook.forecast.StringForecast;
@@ -15,6 +16,16 @@ final class ForecastWords {
   private static final int MM_DECIMALS = 2;
   private static final double PERCENT = 100;
   private static final double NEWTONS_PER_KILOGRAM = 9.80665;
+
+  /** Sentences that say again what the figures of the row say. */
+  private static final Set<String> IN_THE_ROW =
+      Set.of(
+          "outlook.lighter",
+          "outlook.same",
+          "outlook.heavier",
+          "outlook.leave",
+          "outlook.away",
+          "outlook.toward");
 
   private final Texts texts;
 
@@ -36,7 +47,10 @@ final class ForecastWords {
         interval(figures),
         nut(figures),
         string.verdict() != Verdict.LEAVE || figures == null,
-        string.notes().stream().map(texts::say).toList());
+        string.notes().stream()
+            .filter(note -> !IN_THE_ROW.contains(note.key()))
+            .map(texts::say)
+            .toList());
   }
 
   private static String newtons(double tensionN) {

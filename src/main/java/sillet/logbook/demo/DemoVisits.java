@@ -96,6 +96,7 @@ final class DemoVisits {
         new TakeIn(visit(id, DemoShop.OPEN_TICKET, arrival, lapwingStrings(day.minusDays(7)))));
     actions.add(checks(id, Moment.RECEIVED, new double[] {0.31, 1.6, 2.1, 0.42, 0.56}));
     actions.add(readings(id, 1, at, "4.9/5.0/5.2", "3.2", "7.7/7.8/8.0", "0.3", "2.1", "-2.6"));
+    actions.add(alongTheNeck(id, at));
     return told(actions, at);
   }
 
@@ -163,6 +164,29 @@ final class DemoVisits {
   private static BenchCheck check(CheckKind kind, int string, int fret, Moment moment, double mm) {
     CheckMethod method = kind == CheckKind.RELIEF ? CheckMethod.STRAIGHTEDGE : CheckMethod.OPEN;
     return new BenchCheck(kind, string, fret, method, moment, mm, Double.toString(mm));
+  }
+
+  /** The slot of string 2 is high and fret 7 stands a little toward the bridge. */
+  private static RecordReadings alongTheNeck(UUID id, Instant at) {
+    List<Reading> readings = new ArrayList<>();
+    readings.addAll(at(1, at, "0.6", "7.4", "0.9", "0.4", "0.3", "0.1"));
+    readings.addAll(at(2, at, "0.9", "5.1", "1.2", "0.5", "0.5", "0.0"));
+    readings.addAll(at(3, at, "1.2", "4.0", "1.8", "0.4", "0.8", "-0.2"));
+    readings.addAll(at(5, at, "1.8", "3.0", "2.9", "0.3", "1.0", "-0.7"));
+    readings.addAll(at(7, at, "5.2", "5.1", "6.9", "3.0", "4.2", "1.6"));
+    readings.addAll(at(9, at, "3.4", "2.6", "5.4", "0.3", "1.6", "-1.6"));
+    readings.addAll(at(15, at, "6.9", "4.2", "10.3", "0.4", "2.9", "-3.5"));
+    readings.addAll(at(17, at, "8.4", "4.8", "12.6", "0.5", "3.4", "-4.2"));
+    return new RecordReadings(id, readings);
+  }
+
+  private static List<Reading> at(int fret, Instant at, String... cents) {
+    List<Reading> readings = new ArrayList<>();
+    for (int i = 0; i < cents.length; i++) {
+      Tries tries = Tries.parse(cents[i]);
+      readings.add(new Reading(1, i + 1, fret, tries, Reference.OPEN, TENTH_TUNER_SD_CENTS, at));
+    }
+    return readings;
   }
 
   private static RecordReadings readings(UUID id, int pass, Instant at, String... cents12) {
