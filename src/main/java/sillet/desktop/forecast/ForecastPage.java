@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Function;
+import javafx.application.Platform;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.HBox;
@@ -29,6 +30,7 @@ final class ForecastPage extends ScrollPane {
   private final ForecastPanels panels;
   private final Label wrong = new Label();
   private @Nullable InstrumentChange shown;
+  private boolean due;
 
   /**
    * A page.
@@ -65,7 +67,7 @@ final class ForecastPage extends ScrollPane {
     setHbarPolicy(ScrollBarPolicy.NEVER);
     getStylesheets().add(SHEET);
     getStyleClass().add("forecast-pane");
-    changed();
+    look();
   }
 
   private static String sheet() {
@@ -88,8 +90,17 @@ final class ForecastPage extends ScrollPane {
     return line;
   }
 
-  /** Reckons anew, if something that can be read has changed. */
+  /** Several fields may change at once, as with a tuning: they are reckoned once. */
   private void changed() {
+    if (!due) {
+      due = true;
+      Platform.runLater(this::look);
+    }
+  }
+
+  /** Reckons anew, if something that can be read has changed. */
+  private void look() {
+    due = false;
     Optional<InstrumentChange> change = model.change();
     wrong.setText(model.problem().map(texts::say).orElse(""));
     wrong.setManaged(!wrong.getText().isEmpty());

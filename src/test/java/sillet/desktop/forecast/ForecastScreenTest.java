@@ -31,36 +31,45 @@ class ForecastScreenTest {
   private record Seen(Picture picture, String words) {}
 
   private static Seen look(Theme theme, int percent, int[] size, Consumer<Scene> hand) {
-    return Picture.onFxThread(
-        () -> {
-          try (Logbook logbook = Logbook.inMemory()) {
-            SampleVisits visits = new SampleVisits(logbook);
-            visits.takeIn(
-                SampleVisits.six(),
-                SampleVisits.sixStrings(648),
-                SampleVisits.brackets(-0.3, 0.6, 0.6, 1.4, 1.4, 3.1));
-            visits.check(6).read(1, 12, "5.0", "3.2", "7.8", "0.3", "2.1", "-2.6");
-            ForecastScreen screen =
-                new ForecastScreen(new TestDesk(logbook, new AtOnce()).desk(), 2417);
-            Scene scene = new Scene(new StackPane(screen.node()), size[0], size[1]);
-            theme.applyTo(scene);
-            new TextSize(percent).applyTo(scene);
-            Stage stage = new Stage();
-            stage.setScene(scene);
-            stage.show();
-            screen.shown();
-            hand.accept(scene);
-            scene.getRoot().applyCss();
-            scene.getRoot().layout();
-            String words =
-                scene.getRoot().lookupAll(".label").stream()
-                    .map(node -> ((Labeled) node).getText())
-                    .collect(Collectors.joining("\n"));
-            Seen seen = new Seen(Picture.of(scene), words);
-            stage.hide();
-            return seen;
-          }
-        });
+    try (Logbook logbook = Logbook.inMemory()) {
+      SampleVisits visits = new SampleVisits(logbook);
+      visits.takeIn(
+          SampleVisits.six(),
+          SampleVisits.sixStrings(648),
+          SampleVisits.brackets(-0.3, 0.6, 0.6, 1.4, 1.4, 3.1));
+      visits.check(6).read(1, 12, "5.0", "3.2", "7.8", "0.3", "2.1", "-2.6");
+      Stage stage = Picture.onFxThread(() -> show(logbook, theme, percent, size));
+      Picture.onFxThread(
+          () -> {
+            hand.accept(stage.getScene());
+            return stage;
+          });
+      return Picture.onFxThread(() -> seen(stage));
+    }
+  }
+
+  private static Stage show(Logbook logbook, Theme theme, int percent, int[] size) {
+    ForecastScreen screen = new ForecastScreen(new TestDesk(logbook, new AtOnce()).desk(), 2417);
+    Scene scene = new Scene(new StackPane(screen.node()), size[0], size[1]);
+    theme.applyTo(scene);
+    new TextSize(percent).applyTo(scene);
+    Stage stage = new Stage();
+    stage.setScene(scene);
+    stage.show();
+    screen.shown();
+    return stage;
+  }
+
+  private static Seen seen(Stage stage) {
+    stage.getScene().getRoot().applyCss();
+    stage.getScene().getRoot().layout();
+    String words =
+        stage.getScene().getRoot().lookupAll(".label").stream()
+            .map(node -> ((Labeled) node).getText())
+            .collect(Collectors.joining("\n"));
+    Seen seen = new Seen(Picture.of(stage.getScene()), words);
+    stage.hide();
+    return seen;
   }
 
   private static void type(Scene scene, String field, String text) {
