@@ -13,6 +13,7 @@ import sillet.acoustics.virtual.Luck;
 import sillet.acoustics.virtual.SetChange;
 import sillet.acoustics.virtual.VirtualInstrument;
 import sillet.acoustics.virtual.Workshop;
+import sillet.acoustics.wire.StringSpec;
 
 /**
  * An instrument gets other gauges, another tuning and another action at once; each saddle is set
@@ -23,6 +24,7 @@ final class ForecastTask implements Task {
   static final Row MEASURED = new Row(TASK, "nine frets read, heights measured");
   static final Row SAME_MAKE = new Row(TASK, "of these, same make of strings");
   static final Row OTHER_MAKE = new Row(TASK, "of these, another make");
+  static final Row NO_GUESS = new Row(TASK, "of these, plain or core known in both sets");
   static final Row UNMEASURED = new Row(TASK, "nine frets read, heights not measured");
   static final Row OCTAVE_READ = new Row(TASK, "fret 12 read, heights measured");
   static final Row UNREAD = new Row(TASK, "nothing read, heights measured");
@@ -52,7 +54,7 @@ final class ForecastTask implements Task {
       }
       if (heights) {
         Row make = change.sameMake() ? SAME_MAKE : OTHER_MAKE;
-        set(score, List.of(MEASURED, make), strings, nine, changes, after);
+        set(score, List.of(MEASURED, make, NO_GUESS), strings, nine, changes, after);
         set(score, List.of(OCTAVE_READ), strings, twelve, changes, after);
         set(score, List.of(UNREAD), strings, none, changes, after);
       } else {
@@ -88,11 +90,21 @@ final class ForecastTask implements Task {
       // nothing read: the saddle is set by rule from its nominal place
       Figure figure = absolute ? forecasts.get(i).setbackThen() : forecasts.get(i).saddleMove();
       double from = absolute ? 0 : string.found();
+      boolean guess = guessed(changes.get(i).now()) || guessed(changes.get(i).then());
       for (Row row : rows) {
+        if (guess && row.equals(NO_GUESS)) {
+          continue;
+        }
         Tally tally = score.of(row, string.kind());
         tally.error(then.cents(12, Reference.OPEN, from + figure.value()));
         tally.interval(figure.low(), then.bestForOctave(Reference.OPEN) - from, figure.high());
       }
     }
+  }
+
+  /** Whether the thickness of the core had to be guessed. */
+  private static boolean guessed(Stringing stringing) {
+    StringSpec spec = stringing.spec();
+    return spec.construction().wound() && spec.core() == null;
   }
 }

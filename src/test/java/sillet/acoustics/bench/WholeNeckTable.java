@@ -41,6 +41,7 @@ public final class WholeNeckTable {
     print.forecast(ForecastTask.MEASURED, true);
     print.forecast(ForecastTask.SAME_MAKE, false);
     print.forecast(ForecastTask.OTHER_MAKE, false);
+    print.forecast(ForecastTask.NO_GUESS, false);
     print.forecast(ForecastTask.UNMEASURED, false);
     print.forecast(ForecastTask.OCTAVE_READ, false);
     print.forecast(ForecastTask.UNREAD, false);
