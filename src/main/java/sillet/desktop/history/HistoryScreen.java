@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.UUID;
+import javafx.beans.binding.Bindings;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -74,7 +75,7 @@ public final class HistoryScreen implements Screen {
     Narrow narrow = new Narrow(page);
     this.panels =
         new VisitPanels(texts, words, desk.atBench().clock().getZone(), narrow.narrowProperty());
-    this.learned = new LearnedPanel(texts, this::forget);
+    this.learned = new LearnedPanel(texts, narrow.narrowProperty(), this::forget);
     this.openVisit =
         KeyHint.button(
             texts.say("history.open-visit"), texts.say("history.open-visit-key"), this::openVisit);
@@ -86,7 +87,7 @@ public final class HistoryScreen implements Screen {
     newVisit.getStyleClass().add(Looks.PRIMARY);
     this.head = new HistoryHead(texts, words, narrow.narrowProperty(), openVisit, newVisit);
     list.setCellFactory(view -> new VisitCell(texts, words));
-    this.body = new HBox(visitsPanel(), right());
+    this.body = new HBox(visitsPanel(narrow), right());
     body.getStyleClass().add("panel-row");
     said.setId("history-said");
     said.setWrapText(true);
@@ -140,7 +141,7 @@ public final class HistoryScreen implements Screen {
     say();
   }
 
-  private VBox visitsPanel() {
+  private VBox visitsPanel(Narrow narrow) {
     Label name = new Label(texts.say("history.visits-head"));
     name.getStyleClass().add(Looks.PANEL_HEAD);
     Label order = new Label(texts.say("history.newest-first"));
@@ -152,7 +153,11 @@ public final class HistoryScreen implements Screen {
     list.setAccessibleText(texts.say("history.visits-head"));
     VBox.setVgrow(list, Priority.ALWAYS);
     declined.getStyleClass().add("declined");
-    VBox panel = new VBox(line, list, declined, parts());
+    FlowPane parts = parts();
+    // in a tight page the list needs the room; the keys lead there all the same
+    parts.visibleProperty().bind(Bindings.not(narrow.tightProperty()));
+    parts.managedProperty().bind(parts.visibleProperty());
+    VBox panel = new VBox(line, list, declined, parts);
     panel.getStyleClass().addAll(Looks.PANEL, "visits-panel");
     return panel;
   }

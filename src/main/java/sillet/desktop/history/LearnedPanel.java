@@ -1,6 +1,7 @@
 package sillet.desktop.history;
 
 import java.util.Optional;
+import javafx.beans.value.ObservableBooleanValue;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.layout.GridPane;
@@ -8,6 +9,8 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
+import sillet.desktop.controls.Columns;
+import sillet.desktop.controls.KeyHint;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.learned.LearnedInstrument;
 import sillet.logbook.text.Texts;
@@ -20,27 +23,30 @@ final class LearnedPanel extends VBox {
   private final VBox shared = new VBox();
   private final GridPane strings = new GridPane();
 
-  LearnedPanel(Texts texts, Runnable reset) {
+  LearnedPanel(Texts texts, ObservableBooleanValue narrow, Runnable reset) {
     this.texts = texts;
     Label head = new Label(texts.say("history.learned"));
     head.getStyleClass().add(Looks.PANEL_HEAD);
     head.setMinWidth(Region.USE_PREF_SIZE);
     from.getStyleClass().add(Looks.SOFT);
     from.setMinWidth(0);
+    from.setMinHeight(USE_PREF_SIZE);
+    from.setWrapText(true);
     this.forget = new Button(texts.say("history.forget"));
     forget.setId("forget-learned");
-    forget.setMinWidth(Region.USE_PREF_SIZE);
     forget.setOnAction(pressed -> reset.run());
     Region apart = new Region();
     HBox.setHgrow(apart, Priority.ALWAYS);
-    HBox line = new HBox(head, from, apart, forget);
+    HBox line = new HBox(head, apart, KeyHint.line(forget));
     line.getStyleClass().add("panel-line");
     strings.getStyleClass().add("learned-strings");
-    HBox both = new HBox(strings, shared);
-    HBox.setHgrow(shared, Priority.ALWAYS);
+    shared.setMinWidth(0);
+    strings.setMinWidth(0);
+    Columns both = new Columns(narrow, 50, 50);
+    both.show(strings, shared);
     both.getStyleClass().add("learned-both");
     getStyleClass().addAll(Looks.PANEL, "learned");
-    getChildren().addAll(line, both);
+    getChildren().addAll(line, from, both);
   }
 
   /** Shows it; nothing where no reading teaches. */
@@ -77,13 +83,16 @@ final class LearnedPanel extends VBox {
   }
 
   private void head(String text, int column) {
-    figure(text, Looks.NOTE, column, 0);
+    Label label = figure(text, Looks.NOTE, column, 0);
+    label.setWrapText(true);
+    label.setMinWidth(0);
   }
 
-  private void figure(String text, String look, int column, int line) {
+  private Label figure(String text, String look, int column, int line) {
     Label label = new Label(text);
     label.getStyleClass().add(look);
     label.setMinWidth(Region.USE_PREF_SIZE);
     strings.add(label, column, line);
+    return label;
   }
 }
