@@ -43,6 +43,15 @@ final class Linearized {
     return new Linearized(residuals, slopes);
   }
 
+  /** Counts the unknowns in other sds, each so many times what it was; nothing else changes. */
+  void countIn(double[] factors) {
+    for (double[] row : slopes) {
+      for (int i = 0; i < row.length; i++) {
+        row[i] *= factors[i];
+      }
+    }
+  }
+
   double residual(int row) {
     return residuals[row];
   }

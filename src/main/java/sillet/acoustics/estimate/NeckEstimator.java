@@ -60,9 +60,7 @@ public final class NeckEstimator {
         return NeckEstimate.of(new Solution(model, noise, state, here, posterior));
       }
       here = step(here, posterior.step());
-      if (loss.learn(round, here, posterior, state)) {
-        here = at(state.point());
-      }
+      here.countIn(loss.learn(round, here, posterior, state));
     }
     return Outcome.notSolved("no lie of the strings was found for these readings");
   }

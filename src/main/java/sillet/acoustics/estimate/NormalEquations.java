@@ -17,10 +17,14 @@ final class NormalEquations {
   private final double[][] matrix;
   private final double[] right;
 
+  /** Of the unknowns that a row touches; used again for every row. */
+  private final int[] places;
+
   private NormalEquations(double[] point) {
     this.count = point.length;
     this.matrix = new double[count][count];
     this.right = new double[count];
+    this.places = new int[count];
     for (int i = 0; i < count; i++) {
       matrix[i][i] = 1;
       right[i] = -point[i];
@@ -36,6 +40,10 @@ final class NormalEquations {
   }
 
   private void add(Linearized rows, Noise noise, int[] note) {
+    if (note.length == 1) {
+      addOne(rows, noise, note);
+      return;
+    }
     double[] together = new double[count];
     double residual = 0;
     for (int row : note) {
@@ -55,14 +63,30 @@ final class NormalEquations {
     }
   }
 
-  private void rankOne(double[] slopes, double factor) {
+  /** The same for a note that was read once, in one go. */
+  private void addOne(Linearized rows, Noise noise, int[] note) {
+    double precision = noise.precision(note[0]);
+    double joint = precision - noise.strayLeft(note) * precision * precision;
+    double[] slopes = rows.slopes(note[0]);
+    double residual = joint * rows.residual(note[0]);
+    rankOne(slopes, joint);
     for (int i = 0; i < count; i++) {
-      double one = factor * slopes[i];
-      if (one != 0) {
-        double[] row = matrix[i];
-        for (int j = 0; j <= i; j++) {
-          row[j] += one * slopes[j];
-        }
+      right[i] += residual * slopes[i];
+    }
+  }
+
+  private void rankOne(double[] slopes, double factor) {
+    int touched = 0;
+    for (int i = 0; i < count; i++) {
+      if (slopes[i] != 0) {
+        places[touched++] = i;
+      }
+    }
+    for (int i = 0; i < touched; i++) {
+      double[] row = matrix[places[i]];
+      double one = factor * slopes[places[i]];
+      for (int j = 0; j <= i; j++) {
+        row[places[j]] += one * slopes[places[j]];
       }
     }
   }

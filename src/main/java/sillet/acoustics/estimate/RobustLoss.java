@@ -1,5 +1,7 @@
 package sillet.acoustics.estimate;
 
+import java.util.ArrayList;
+import java.util.List;
 import sillet.acoustics.pitch.Cents;
 
 /**
@@ -20,6 +22,9 @@ final class RobustLoss {
   /** Round from which on a wild reading is let go. */
   private static final int LET_GO_FROM = 3;
 
+  /** Change, as a share, below which straying is known well enough. */
+  private static final double SETTLED = 2e-3;
+
   private static final double LEAST_WEIGHT = 1e-6;
 
   /** Of straying by itself and of a body's, cents; measured guitars stay well within. */
@@ -30,6 +35,7 @@ final class RobustLoss {
   private final InstrumentModel model;
   private final Noise noise;
   private final double[] expected;
+  private boolean settled;
 
   RobustLoss(InstrumentModel model, Noise noise) {
     this.model = model;
@@ -58,22 +64,38 @@ final class RobustLoss {
     return Math.hypot(unknown.sd(), noise.stray() * scale / Cents.PER_UNIT);
   }
 
-  /** Whether slopes and point have to be reckoned anew. */
-  boolean learn(int round, Linearized rows, Posterior posterior, State state) {
-    if (round == 0) {
-      return false;
+  /** Learns; gives for each unknown how many times what it was its sd is now. */
+  double[] learn(int round, Linearized rows, Posterior posterior, State state) {
+    double[] factors = state.sds().clone();
+    if (round > 0) {
+      weigh(rows, state, round >= LET_GO_FROM);
+      if (round >= LEARN_FROM && !settled) {
+        learnStraying(rows, posterior, state);
+      }
+      expect(state);
     }
-    boolean letGo = round >= LET_GO_FROM;
+    for (int i = 0; i < factors.length; i++) {
+      factors[i] = state.sds()[i] / factors[i];
+    }
+    return factors;
+  }
+
+  private void weigh(Linearized rows, State state, boolean letGo) {
     for (int row = 0; row < noise.readings().count(); row++) {
       double byCurve = weight(rows.residual(row) / noise.sd(row), letGo);
       noise.weight(row, Math.min(byCurve, withoutBody(rows, row, state, letGo)));
     }
-    if (round >= LEARN_FROM) {
-      noise.stray(stray(rows, posterior));
-      learnBody(posterior, state);
-    }
-    expect(state);
-    return true;
+  }
+
+  private void learnStraying(Linearized rows, Posterior posterior, State state) {
+    int body = model.body().places()[0];
+    double strayBefore = noise.stray();
+    double bodyBefore = state.sds()[body];
+    noise.stray(stray(rows, posterior));
+    learnBody(posterior, state);
+    settled =
+        Math.abs(noise.stray() / strayBefore - 1) < SETTLED
+            && Math.abs(state.sds()[body] / bodyBefore - 1) < SETTLED;
   }
 
   /** A reading so far off that no body does it must not teach what the body does. */
@@ -102,22 +124,35 @@ final class RobustLoss {
     double squares = Expectations.STRAY_COUNT * Expectations.STRAY_CENTS * Expectations.STRAY_CENTS;
     double determined = Expectations.STRAY_COUNT;
     double variance = noise.stray() * noise.stray();
-    for (int[] note : noise.readings().notes()) {
-      double left = noise.strayLeft(note);
-      double[] slopes = new double[expected.length];
-      double strays = 0;
-      for (int row : note) {
-        double weighed = left * noise.precision(row);
-        strays += weighed * rows.residual(row);
-        double[] own = rows.slopes(row);
-        for (int i = 0; i < slopes.length; i++) {
-          slopes[i] += weighed * own[i];
-        }
-      }
+    List<int[]> notes = noise.readings().notes();
+    List<double[]> slopes = new ArrayList<>(notes.size());
+    for (int[] note : notes) {
+      double[] pulled = new double[expected.length];
+      double strays = strays(rows, note, pulled);
+      slopes.add(pulled);
       squares += Math.min(strays * strays, BELIEVED * BELIEVED * variance);
-      determined += Math.max(0, 1 - (left + posterior.variance(slopes)) / variance);
+    }
+    double[] byUnknowns = posterior.variances(slopes);
+    for (int i = 0; i < byUnknowns.length; i++) {
+      double unsure = noise.strayLeft(notes.get(i)) + byUnknowns[i];
+      determined += Math.max(0, 1 - unsure / variance);
     }
     return Math.min(MOST_CENTS, Math.max(LEAST_CENTS, Math.sqrt(squares / determined)));
+  }
+
+  /** What a note strays by, and how the unknowns pull at that. */
+  private double strays(Linearized rows, int[] note, double[] pulled) {
+    double left = noise.strayLeft(note);
+    double strays = 0;
+    for (int row : note) {
+      double weighed = left * noise.precision(row);
+      strays += weighed * rows.residual(row);
+      double[] own = rows.slopes(row);
+      for (int i = 0; i < pulled.length; i++) {
+        pulled[i] += weighed * own[i];
+      }
+    }
+    return strays;
   }
 
   /** How much the body yields, by the same fixed point. */
