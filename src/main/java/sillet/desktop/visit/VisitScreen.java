@@ -31,6 +31,7 @@ import sillet.logbook.visits.VisitRecord;
 /** The page of one visit. */
 public final class VisitScreen implements Screen {
   private static final String SHEET = sheet();
+  private static final KeyCombination HISTORY = shortcut(KeyCode.H);
 
   private final Desk desk;
   private final int ticket;
@@ -60,6 +61,7 @@ public final class VisitScreen implements Screen {
     blank.getStyleClass().add(Looks.PAGE);
     pane.setContent(blank);
     pane.addEventHandler(KeyEvent.KEY_PRESSED, this::escape);
+    pane.addEventFilter(KeyEvent.KEY_PRESSED, this::historyFirst);
     desk.background().run(this::readWithPast, this::loaded, why -> waiting.setText(say(why)));
   }
 
@@ -191,7 +193,7 @@ public final class VisitScreen implements Screen {
     keys.put(shortcut(KeyCode.S), this::saveAgain);
     keys.put(shortcut(KeyCode.L), () -> with(VisitParts::focusWork));
     keys.put(shortcut(KeyCode.T), () -> with(VisitParts::focusNotes));
-    keys.put(shortcut(KeyCode.H), this::history);
+    keys.put(HISTORY, this::history);
     keys.put(shortcut(KeyCode.F), this::forecast);
     keys.put(shortcut(KeyCode.ENTER), () -> with(VisitParts::handOut));
     keys.put(new KeyCodeCombination(KeyCode.F4), () -> with(VisitParts::turnAbout));
@@ -226,6 +228,14 @@ public final class VisitScreen implements Screen {
     var scene = pane.getScene();
     if (parts != null && scene != null && scene.getFocusOwner() != null) {
       parts.walk(scene.getFocusOwner(), step);
+    }
+  }
+
+  /** A text field would take this key for a backspace and wipe the reading it stands in. */
+  private void historyFirst(KeyEvent event) {
+    if (HISTORY.match(event)) {
+      history();
+      event.consume();
     }
   }
 

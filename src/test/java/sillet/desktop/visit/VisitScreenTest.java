@@ -6,6 +6,8 @@ import java.util.concurrent.TimeoutException;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.Test;
+import sillet.logbook.moves.AimChoice;
+import sillet.logbook.moves.NutMovable;
 import sillet.logbook.visits.CheckKind;
 import sillet.logbook.visits.CheckMethod;
 import sillet.logbook.visits.Moment;
@@ -109,6 +111,56 @@ class VisitScreenTest {
       window.press(KeyCode.UP);
       window.press(KeyCode.ENTER);
       assertThat(window.record().readings()).isEmpty();
+    }
+  }
+
+  @Test
+  void goesToTheHistoryWithoutWipingTheReadingInHand() throws TimeoutException {
+    try (VisitWindow window = VisitWindow.blank()) {
+      window.type("5.0");
+      window.press(KeyCode.ENTER);
+      window.press(KeyCode.SHIFT, KeyCode.ENTER);
+      window.press(KeyCode.CONTROL, KeyCode.H);
+      assertThat(window.desk.went).containsExactly("history");
+      assertThat(window.field("#cell-1-12")).isEqualTo("+5.0");
+      window.press(KeyCode.CONTROL, KeyCode.F);
+      assertThat(window.desk.went).containsExactly("history", "forecast 2417");
+    }
+  }
+
+  @Test
+  void choosesTheAimByKeyAndKeepsItWithTheVisit() throws TimeoutException {
+    try (VisitWindow window = VisitWindow.blank()) {
+      window.press(KeyCode.F5);
+      assertThat(window.record().aim().aim()).isEqualTo(AimChoice.NECK);
+      assertThat(window.says("for frets 1 to 12")).isTrue();
+      window.press(KeyCode.F5);
+      assertThat(window.record().aim().aim().word()).isEqualTo("1 5 7 12");
+      window.press(KeyCode.SHIFT, KeyCode.F5);
+      assertThat(window.record().aim().nut()).isEqualTo(NutMovable.EACH);
+      window.focus("#aim-own");
+      window.press(KeyCode.CONTROL, KeyCode.A);
+      window.type("1 5:2 12");
+      window.press(KeyCode.ENTER);
+      assertThat(window.record().aim().aim().word()).isEqualTo("1 5:2 12");
+    }
+  }
+
+  @Test
+  void opensTheCellsOfOneFretWhereManyAreRead() throws TimeoutException {
+    try (VisitWindow window = VisitWindow.blank()) {
+      window.focus("#shown-frets");
+      window.press(KeyCode.CONTROL, KeyCode.A);
+      window.type("1 2 3 5 7 9 12 15 17");
+      window.press(KeyCode.ENTER);
+      assertThat(window.now(() -> window.node("#cell-1-12").getParent().isVisible())).isTrue();
+      assertThat(window.now(() -> window.node("#cell-1-2").getParent().isVisible())).isFalse();
+      window.focus("#cell-1-12");
+      window.type("5.0");
+      window.press(KeyCode.TAB);
+      assertThat(window.focused()).isEqualTo("cell-1-15");
+      assertThat(window.now(() -> window.node("#cell-1-12").getParent().isVisible())).isFalse();
+      assertThat(window.says("frets 1 to 12:")).isTrue();
     }
   }
 
