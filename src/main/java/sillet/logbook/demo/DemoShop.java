@@ -24,6 +24,12 @@ public final class DemoShop {
   /** The ticket of the finished visit, with a second pass that proved it. */
   public static final int FINISHED_TICKET = 1007;
 
+  /** The ticket of an instrument read along its whole neck. */
+  public static final int NECK_TICKET = 1013;
+
+  /** The ticket of the same instrument, back and open on the bench. */
+  public static final int NECK_AGAIN_TICKET = 1044;
+
   /** The technician of the story. */
   public static final String TECHNICIAN = "Ilse (demo)";
 
@@ -58,6 +64,8 @@ public final class DemoShop {
         .forEach(i -> story.add(new DemoAction(start, TECHNICIAN, new AddInstrument(i))));
     story.addAll(DemoVisits.finished(today.minusMonths(20)));
     story.addAll(DemoParts.lapwing(today.minusMonths(20)));
+    story.addAll(DemoNeck.first(today.minusMonths(14)));
+    story.addAll(DemoNeck.again(today.minusDays(1)));
     story.addAll(DemoVisits.open(today));
     story.addAll(DemoVisits.arrived(today));
     return List.copyOf(story);

@@ -121,7 +121,7 @@ final class DemoVisits {
     return told(List.of(new TakeIn(visit)), DemoShop.morning(day));
   }
 
-  private static List<DemoAction> told(List<Action> actions, Instant at) {
+  static List<DemoAction> told(List<Action> actions, Instant at) {
     List<DemoAction> story = new ArrayList<>();
     Instant time = at;
     for (Action action : actions) {

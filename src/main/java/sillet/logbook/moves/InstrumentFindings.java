@@ -23,6 +23,11 @@ public final class InstrumentFindings {
    * @return causes that a saddle cannot cure; empty for a sound instrument
    */
   public static List<FindingReport> of(KnownNeck neck) {
+    List<BenchHistory> now = neck.strings().stream().map(BenchHistory::ofNow).toList();
+    return found(now.equals(neck.strings()) ? neck : KnownNeck.of(now));
+  }
+
+  private static List<FindingReport> found(KnownNeck neck) {
     Map<FindingOptions.Note, Message> odd = new HashMap<>();
     List<FindingReport> reports = new ArrayList<>();
     for (int i = 0; i < neck.strings().size(); i++) {

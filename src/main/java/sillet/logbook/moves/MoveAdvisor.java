@@ -58,7 +58,7 @@ public final class MoveAdvisor {
     for (int i = 0; i < strings.size(); i++) {
       advice.add(advice(neck, i, moves.get(i), findings));
     }
-    return new InstrumentAdvice(advice, findings, null);
+    return new InstrumentAdvice(advice, findings, StraightBridge.of(neck, advice, aim));
   }
 
   private MoveAdvice advice(

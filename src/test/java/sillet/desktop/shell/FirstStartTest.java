@@ -94,7 +94,7 @@ class FirstStartTest {
     try (TestWindow window = TestWindow.over(folder)) {
       window.untilShown("#open-demo");
       window.press(KeyCode.CONTROL, KeyCode.D);
-      window.untilRows("#bench-list", 2);
+      window.untilRows("#bench-list", 3);
 
       assertThat(window.shown("#demo-mark")).isTrue();
       assertThat(window.own().file()).doesNotExist();

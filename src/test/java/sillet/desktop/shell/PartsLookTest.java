@@ -45,7 +45,7 @@ class PartsLookTest {
       window.untilShown("#shop-name");
       window.until(() -> window.scene().getStylesheets().stream().anyMatch(s -> s.contains(theme)));
       window.press(KeyCode.CONTROL, KeyCode.D);
-      window.untilRows("#bench-list", 2);
+      window.untilRows("#bench-list", 3);
       sets(window, size, shape);
       instrument(window, size, shape);
     }

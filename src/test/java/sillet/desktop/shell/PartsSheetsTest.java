@@ -76,7 +76,7 @@ class PartsSheetsTest {
     TestWindow window = TestWindow.over(folder);
     window.untilShown("#open-demo");
     window.press(KeyCode.CONTROL, KeyCode.D);
-    window.untilRows("#bench-list", 2);
+    window.untilRows("#bench-list", 3);
     window.press(KeyCode.F3);
     window.type(instrument);
     window.untilRows("#instrument-list", 1);

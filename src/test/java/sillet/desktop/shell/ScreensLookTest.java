@@ -56,7 +56,7 @@ class ScreensLookTest {
       window.press(KeyCode.CONTROL, KeyCode.ENTER);
       keep(window, size, "first-start-" + shape);
       window.press(KeyCode.CONTROL, KeyCode.D);
-      window.untilRows("#bench-list", 2);
+      window.untilRows("#bench-list", 3);
       keep(window, size, "bench-demo-" + shape);
       window.press(KeyCode.F3);
       window.type("lapwing");

@@ -92,7 +92,7 @@ class SearchAndHistoryTest {
     TestWindow window = TestWindow.over(folder);
     window.untilShown("#open-demo");
     window.press(KeyCode.CONTROL, KeyCode.D);
-    window.untilRows("#bench-list", 2);
+    window.untilRows("#bench-list", 3);
     return window;
   }
 }

@@ -95,7 +95,7 @@ class StringSetsTest {
     TestWindow window = TestWindow.over(folder);
     window.untilShown("#open-demo");
     window.press(KeyCode.CONTROL, KeyCode.D);
-    window.untilRows("#bench-list", 2);
+    window.untilRows("#bench-list", 3);
     window.press(KeyCode.CONTROL, KeyCode.DIGIT3);
     window.untilRows("#set-list", 4);
     return window;

@@ -39,7 +39,7 @@ class WindowLookTest {
     try (TestWindow window = TestWindow.over(folder)) {
       window.untilShown("#open-demo");
       window.press(KeyCode.CONTROL, KeyCode.D);
-      window.untilRows("#bench-list", 2);
+      window.untilRows("#bench-list", 3);
       // a folder that is not empty cannot be moved away: no file comes to lie there
       Path inTheWay = Files.createDirectory(new SettingsFile(folder).file());
       Files.writeString(inTheWay.resolve("full"), "");

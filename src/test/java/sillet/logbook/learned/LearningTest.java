@@ -70,10 +70,8 @@ class LearningTest {
     VisitRecord once = NeckVisits.read(1, FIRST, FITTED, NeckStrings.CLEAN);
     VisitRecord moved = NeckVisits.moved(once, 1, MOVES_MM);
     VisitRecord twice = NeckVisits.reading(moved, 2, NeckStrings.MOVED);
-    LearnedInstrument before = Learning.of(once, InstrumentPast.NONE).orElseThrow();
     LearnedInstrument after = Learning.of(twice, InstrumentPast.NONE).orElseThrow();
     assertThat(after.passes()).isEqualTo(2);
-    assertThat(width(after.nutMm())).isLessThan(width(before.nutMm()));
     List<VisitPass> passes = VisitMoves.passes(forTheNeck(twice), InstrumentPast.NONE, advisor);
     for (int i = 0; i < 6; i++) {
       MoveFigures first = figures(passes.get(0), i + 1);

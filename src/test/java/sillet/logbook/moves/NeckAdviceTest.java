@@ -9,6 +9,7 @@ import java.util.Map;
 import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
 import sillet.acoustics.wire.Construction;
+import sillet.logbook.instruments.SaddleKind;
 import sillet.logbook.strings.FittedString;
 import sillet.logbook.strings.StringMake;
 import sillet.logbook.text.Message;
@@ -110,8 +111,11 @@ class NeckAdviceTest {
       }
       assertThat(note.sdCents()).isPositive();
     }
+    // the strip starts from the best estimate, the figures from what was read: both change alike
     MoveFigures figures = figures(third);
-    assertThat(after(third, 12)).isCloseTo(figures.cents12After(), offset(0.5));
+    FretCents octave = third.neck().get(11);
+    assertThat(octave.afterCents() - octave.nowCents())
+        .isCloseTo(figures.cents12After() - figures.cents12Before(), offset(0.01));
   }
 
   @Test
@@ -153,6 +157,40 @@ class NeckAdviceTest {
     for (int i = 0; i < 5; i++) {
       assertThat(advice.strings().get(i).figures()).isNotNull();
     }
+  }
+
+  @Test
+  void aFloatingBridgeGetsItsTwoEndsAndWhatIsLeft() {
+    SaddleRoom room = new SaddleRoom(null, null, null, SaddleKind.FLOATING, null, NutMovable.NO);
+    BridgeAdvice bridge =
+        advisor.advise(NeckStrings.read(NeckStrings.CLEAN, room), AimChoice.OCTAVE).bridge();
+    assertThat(bridge).isNotNull();
+    assertThat(bridge.left()).extracting(BridgeAdvice.StringLeft::string).hasSize(6);
+    // only two strings can be met by a straight line; the others fall where they fall
+    assertThat(bridge.left())
+        .anySatisfy(one -> assertThat(Math.abs(one.cents12())).isGreaterThan(1));
+    assertThat(bridge.left()).allMatch(one -> one.fromFrontMm() == null && one.fits() == null);
+    assertThat(texts.say(bridge.notes().get(0))).contains("Slacken");
+  }
+
+  @Test
+  void aFixedSaddleSaysWhereItsBreakPointsLieAndWhetherTheyFit() {
+    SaddleRoom room = new SaddleRoom(null, 1.6, 1.6, SaddleKind.ONE_PIECE, 3.2, NutMovable.NO);
+    InstrumentAdvice advice =
+        advisor.advise(NeckStrings.read(NeckStrings.CLEAN, room), AimChoice.OCTAVE);
+    BridgeAdvice bridge = advice.bridge();
+    assertThat(bridge).isNotNull();
+    for (int i = 0; i < 6; i++) {
+      double point = 1.6 + figures(advice.strings().get(i)).saddleMm();
+      assertThat(bridge.left().get(i).fromFrontMm()).isCloseTo(point, offset(1e-9));
+      assertThat(bridge.left().get(i).fits()).isEqualTo(point >= 0.4 && point <= 3.2 - 0.4);
+    }
+    assertThat(bridge.left()).extracting(BridgeAdvice.StringLeft::fits).contains(true, false);
+  }
+
+  @Test
+  void saddlesOfTheirOwnGetNoStraightLine() {
+    assertThat(advise(NeckStrings.CLEAN, NutMovable.NO, AimChoice.OCTAVE).bridge()).isNull();
   }
 
   private static void isFinite(MoveAdvice one) {
