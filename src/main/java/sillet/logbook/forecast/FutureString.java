@@ -83,10 +83,20 @@ record FutureString(BenchString now, FittedString then, @Nullable Outlook outloo
         (forecast.setbackThen().value() - move.value()) * MM_PER_M);
   }
 
-  /** Leave it where zero lies in the interval; otherwise it must fit into the travel. */
+  /** Whether the string would break before it is tuned. */
+  boolean breaks() {
+    return outlook != null && outlook.forecast().then().shareOfBreaking().orElse(0) >= 1;
+  }
+
+  /**
+   * Leave it where zero lies in the interval, and where the string breaks; otherwise it must fit
+   * into the travel.
+   */
   Verdict verdict() {
     MoveFigures figures = figures();
-    return figures == null ? Verdict.LEAVE : MoveAdvisor.forecastVerdict(now.room(), figures);
+    return figures == null || breaks()
+        ? Verdict.LEAVE
+        : MoveAdvisor.forecastVerdict(now.room(), figures);
   }
 
   List<FretCents> neck() {

@@ -33,6 +33,9 @@ final class StringOutlookWords {
     }
     tension(tension);
     strain(tension);
+    if (future.breaks()) {
+      return notes;
+    }
     saddle(figures);
     action(outlook);
     nutSlot();

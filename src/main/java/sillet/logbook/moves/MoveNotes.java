@@ -17,6 +17,9 @@ final class MoveNotes {
    */
   private static final double SUSPECT_STRING_MM = 3;
 
+  /** Less of a nut move than a hand can file is not said (common practice, no source). */
+  private static final double SMALLEST_NUT_MM = 0.05;
+
   private final BenchString string;
   private final List<Message> notes = new ArrayList<>();
 
@@ -44,7 +47,8 @@ final class MoveNotes {
     String stays = centsLeft == null ? "" : Figures.fixed(Math.abs(centsLeft), 1);
     boolean away = figures.direction() == Direction.AWAY;
     switch (verdict) {
-      case LEAVE -> notes.add(Message.of("move.leave"));
+      case LEAVE ->
+          notes.add(movesNut(figures) ? Message.of("move.leave-saddle") : Message.of("move.leave"));
       case NO_ROOM ->
           notes.add(
               Message.of(away ? "move.no-room-away" : "move.no-room-toward", mm, roomMm, stays));
@@ -52,6 +56,7 @@ final class MoveNotes {
           notes.add(Message.of(away ? "move.slot-away" : "move.slot-toward", mm, roomMm, stays));
       case MOVE -> move(figures, mm, away);
     }
+    nut(figures);
     unread();
     if (verdict != Verdict.LEAVE && Math.abs(figures.saddleMm()) > SUSPECT_STRING_MM) {
       notes.add(Message.of("move.suspect-string"));
@@ -67,6 +72,25 @@ final class MoveNotes {
     } else {
       String turned = Figures.fixed(turns, 2);
       notes.add(Message.of(away ? "move.away-turns" : "move.toward-turns", mm, turned));
+    }
+  }
+
+  private static boolean movesNut(MoveFigures figures) {
+    Double nut = figures.nutMm();
+    return nut != null && Math.abs(nut) >= SMALLEST_NUT_MM;
+  }
+
+  /** A nut is cut once: its figure never stands alone, and is called a guess where it is one. */
+  private void nut(MoveFigures figures) {
+    Double nut = figures.nutMm();
+    if (nut == null || !movesNut(figures)) {
+      return;
+    }
+    String mm = Figures.fixed(Math.abs(nut), 2);
+    if (!string.readings().knowTheNut()) {
+      notes.add(Message.of("move.nut-guess", mm));
+    } else {
+      notes.add(Message.of(nut > 0 ? "move.nut-toward-bridge" : "move.nut-away", mm));
     }
   }
 

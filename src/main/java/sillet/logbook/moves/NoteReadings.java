@@ -21,6 +21,8 @@ public record NoteReadings(
   /** Standard deviation of one reading where nothing else is said, cents. */
   public static final double USUAL_SD_CENTS = 0.5;
 
+  private static final int LAST_FRET_BESIDE_NUT = 5;
+
   /** Copies the map. */
   public NoteReadings {
     frets = java.util.Collections.unmodifiableSortedMap(new TreeMap<>(frets));
@@ -35,6 +37,15 @@ public record NoteReadings(
   public @Nullable NoteRead at(int fret) {
     Tries tries = frets.get(fret);
     return tries == null ? null : BenchEvidence.read(tries, this);
+  }
+
+  /**
+   * Whether enough was read beside the nut to say where its edge should be: two of frets 1 to 5.
+   *
+   * @return false where a nut figure is a guess from the model
+   */
+  public boolean knowTheNut() {
+    return frets.headMap(LAST_FRET_BESIDE_NUT + 1).size() >= 2;
   }
 
   /**

@@ -6,6 +6,7 @@ import java.util.LinkedHashSet;
 import java.util.Set;
 import java.util.stream.Collectors;
 import sillet.logbook.moves.Direction;
+import sillet.logbook.moves.Finding;
 import sillet.logbook.moves.FindingReport;
 import sillet.logbook.moves.MoveAdvice;
 import sillet.logbook.text.Message;
@@ -41,18 +42,30 @@ public final class AdviceCells {
         .collect(Collectors.joining(";"));
   }
 
-  /** The sentences for people, one after the other: the move, then each finding. */
+  /**
+   * The sentences for people, one after the other: what puts the move itself in doubt, the move,
+   * then what else was found.
+   */
   public static String note(MoveAdvice advice, Texts texts) {
-    Set<Message> said = new LinkedHashSet<>(advice.notes());
-    for (FindingReport finding : advice.findings()) {
-      said.add(finding.evidence());
-      said.add(finding.whatToDo());
-      Message caution = finding.caution();
-      if (caution != null) {
-        said.add(caution);
-      }
-    }
+    Set<Message> said = new LinkedHashSet<>();
+    advice.findings().stream().filter(AdviceCells::doubtful).forEach(one -> say(one, said));
+    said.addAll(advice.notes());
+    advice.findings().forEach(one -> say(one, said));
     return sentences(said, texts);
+  }
+
+  /** A suspect reading or string is looked at before anything is moved. */
+  private static boolean doubtful(FindingReport finding) {
+    return finding.kind() == Finding.READING || finding.kind() == Finding.STRING;
+  }
+
+  private static void say(FindingReport finding, Set<Message> said) {
+    said.add(finding.evidence());
+    said.add(finding.whatToDo());
+    Message caution = finding.caution();
+    if (caution != null) {
+      said.add(caution);
+    }
   }
 
   /** Sentences one after the other, in the signs of a file: no true minus. */

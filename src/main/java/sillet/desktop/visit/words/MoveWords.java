@@ -73,12 +73,12 @@ public final class MoveWords {
               StringWords.Kind.LEAVE,
               Direction.STAY,
               null,
-              nut(figures).isEmpty()
+              nut(string, figures).isEmpty()
                   ? texts.say("visit.words.leave")
                   : texts.say("visit.words.leave-saddle"),
               mm(Math.abs(figures.saddleMm())),
               "",
-              nut(figures),
+              nut(string, figures),
               "",
               texts.say("visit.words.less"));
       case MOVE -> move(string, figures);
@@ -99,7 +99,7 @@ public final class MoveWords {
         way(figures.direction()),
         mm(size),
         texts.say("visit.words.range", mm(least), mm(most)),
-        nut(figures),
+        nut(string, figures),
         room == null ? "" : Figures.fixed(Math.max(0, room - size), LEFT_DECIMALS),
         "");
   }
@@ -127,7 +127,7 @@ public final class MoveWords {
         way(figures.direction()),
         mm(possible),
         "",
-        nut(figures),
+        nut(string, figures),
         "",
         sentence);
   }
@@ -185,10 +185,13 @@ public final class MoveWords {
   }
 
   /** What the nut shall do, where it can and that is enough to be seen. */
-  private String nut(MoveFigures figures) {
+  private String nut(StringPass string, MoveFigures figures) {
     Double nut = figures.nutMm();
     if (nut == null || mm(Math.abs(nut)).equals(mm(0))) {
       return "";
+    }
+    if (!string.string().readings().knowTheNut()) {
+      return texts.say("visit.words.nut-guess");
     }
     return nut > 0
         ? texts.say("visit.words.nut-toward-bridge", mm(nut))
