@@ -11,6 +11,9 @@ import sillet.acoustics.wire.StringConstants;
 final class OccasionModel {
   private static final int BODY_JOINT = Fretting.USUAL.bodyJoint();
 
+  /** Largest logarithm of a factor that is tried: far beyond any string, far from overflow. */
+  private static final double FARTHEST = 30;
+
   private final int string;
   private final Occasion occasion;
   private final Sum[] sums;
@@ -61,19 +64,26 @@ final class OccasionModel {
                 of(quantities, Quantity.GAP),
                 of(quantities, Quantity.RELIEF)),
             ends(of(quantities, Quantity.HELD), of(quantities, Quantity.HELD_OPEN)));
-    double grip = 1 / (1 + Math.exp(of(quantities, Quantity.AFTER_LENGTH)));
-    double press = Math.exp(of(quantities, Quantity.PRESS));
+    double grip = 1 / (1 + factor(of(quantities, Quantity.AFTER_LENGTH)));
+    double press = factor(of(quantities, Quantity.PRESS));
     return new StringSituation(
         lie, new Fretting(grip, 0, Expectations.FINGER_SHARE, press, BODY_JOINT), frets);
+  }
+
+  /**
+   * Kept finite, so that a trial step of contradictory readings ends in words, not in an accident.
+   */
+  private static double factor(double logarithm) {
+    return Math.exp(Math.max(-FARTHEST, Math.min(FARTHEST, logarithm)));
   }
 
   private static StringConstants constants(StringConstants typed, double[] quantities) {
     double core = of(quantities, Quantity.CORE);
     double modulus = of(quantities, Quantity.MODULUS);
     return new StringConstants(
-        typed.unitMass() * Math.exp(of(quantities, Quantity.MASS)),
-        typed.axialStiffness() * Math.exp(2 * core + modulus),
-        typed.bendingStiffness() * Math.exp(4 * core + modulus + of(quantities, Quantity.BENDING)),
+        typed.unitMass() * factor(of(quantities, Quantity.MASS)),
+        typed.axialStiffness() * factor(2 * core + modulus),
+        typed.bendingStiffness() * factor(4 * core + modulus + of(quantities, Quantity.BENDING)),
         typed.relativeSd(),
         typed.spread());
   }
