@@ -1,9 +1,11 @@
 package sillet.logbook.moves;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.OptionalInt;
 import sillet.acoustics.estimate.NeckEstimate;
 import sillet.acoustics.findings.FindingOptions;
@@ -41,13 +43,25 @@ public final class InstrumentFindings {
       }
     }
     NeckEstimate estimate = neck.estimate();
-    if (estimate != null) {
+    if (estimate != null && !severalFrets(neck)) {
+      odd.keySet().stream()
+          .sorted(Comparator.comparingInt(FindingOptions.Note::string))
+          .map(note -> oddTries(neck.number(note.string()), odd(note, odd)))
+          .forEach(reports::add);
+    } else if (estimate != null) {
       FindingOptions options = new FindingOptions(Map.of(), odd.keySet());
       for (NeckFinding found : NeckFindings.of(estimate, options)) {
         reports.add(report(found, neck, odd));
       }
     }
     return reports;
+  }
+
+  /** One fret a string names no cause, whatever it reads; that is most of what comes to a bench. */
+  private static boolean severalFrets(KnownNeck neck) {
+    return neck.strings().stream()
+        .flatMap(string -> string.occasions().stream())
+        .anyMatch(one -> one.string().readings().frets().size() > 1);
   }
 
   /** Tries that disagree explain a reading better than its distance from the others. */
@@ -57,12 +71,17 @@ public final class InstrumentFindings {
     OptionalInt fret = found.fret();
     if (found.kind() == Kind.READING && string.isPresent() && fret.isPresent()) {
       int place = string.getAsInt();
-      Message said = odd.get(new FindingOptions.Note(place, fret.getAsInt()));
-      if (said != null) {
-        return oddTries(neck.number(place), new Disagreements.Odd(fret.getAsInt(), said));
+      FindingOptions.Note note = new FindingOptions.Note(place, fret.getAsInt());
+      if (odd.containsKey(note)) {
+        return oddTries(neck.number(place), odd(note, odd));
       }
     }
     return new FindingWords(found, neck).report();
+  }
+
+  private static Disagreements.Odd odd(
+      FindingOptions.Note note, Map<FindingOptions.Note, Message> odd) {
+    return new Disagreements.Odd(note.fret(), Objects.requireNonNull(odd.get(note)));
   }
 
   private static FindingReport oddTries(int number, Disagreements.Odd odd) {
