@@ -10,8 +10,12 @@ public final class DatabaseUrl {
   /** What H2 adds to the path in its address. */
   public static final String SUFFIX = ".mv.db";
 
-  /** Every commit is written at once; the file stays open until it is closed on purpose. */
-  private static final String WORKING = ";WRITE_DELAY=0;DB_CLOSE_DELAY=-1;TRACE_LEVEL_FILE=0";
+  /**
+   * Every commit is written at once, and only ever at the end of the file: one that went into freed
+   * space was not found again after a kill. The file stays open until it is closed on purpose.
+   */
+  private static final String WORKING =
+      ";WRITE_DELAY=0;REUSE_SPACE=FALSE;DB_CLOSE_DELAY=-1;TRACE_LEVEL_FILE=0";
 
   private DatabaseUrl() {}
 
