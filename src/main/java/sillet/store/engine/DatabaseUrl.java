@@ -10,12 +10,11 @@ public final class DatabaseUrl {
   /** What H2 adds to the path in its address. */
   public static final String SUFFIX = ".mv.db";
 
-  /**
-   * Every commit is written at once, and only ever at the end of the file: one that went into freed
-   * space was not found again after a kill. The file stays open until it is closed on purpose.
-   */
-  private static final String WORKING =
-      ";WRITE_DELAY=0;REUSE_SPACE=FALSE;DB_CLOSE_DELAY=-1;TRACE_LEVEL_FILE=0";
+  /** Every commit is written at once; the database stays open until it is closed on purpose. */
+  private static final String WORKING = ";WRITE_DELAY=0;DB_CLOSE_DELAY=-1;TRACE_LEVEL_FILE=0";
+
+  /** Only ever at the end of the file: what went into freed space was not found after a kill. */
+  private static final String AT_THE_END = ";REUSE_SPACE=FALSE";
 
   private DatabaseUrl() {}
 
@@ -34,11 +33,11 @@ public final class DatabaseUrl {
   }
 
   static String toWork(Path file, String scheme) {
-    return plain(file, scheme) + WORKING + ";IFEXISTS=TRUE";
+    return plain(file, scheme) + WORKING + AT_THE_END + ";IFEXISTS=TRUE";
   }
 
   static String toCreate(Path file, String scheme) {
-    return plain(file, scheme) + WORKING;
+    return plain(file, scheme) + WORKING + AT_THE_END;
   }
 
   static String toLook(Path file, String scheme) {
