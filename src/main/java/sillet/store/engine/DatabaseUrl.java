@@ -10,6 +10,8 @@ public final class DatabaseUrl {
   /** What H2 adds to the path in its address. */
   public static final String SUFFIX = ".mv.db";
 
+  private static final String FILE = "jdbc:h2:file:";
+
   /** Every commit is written at once; the database stays open until it is closed on purpose. */
   private static final String WORKING = ";WRITE_DELAY=0;DB_CLOSE_DELAY=-1;TRACE_LEVEL_FILE=0";
 
@@ -37,7 +39,17 @@ public final class DatabaseUrl {
   }
 
   static String toCreate(Path file, String scheme) {
-    return plain(file, scheme) + WORKING + AT_THE_END;
+    return plain(file, scheme) + WORKING;
+  }
+
+  /** Whether an address is that of a file. */
+  static boolean ofAFile(String url) {
+    return url.startsWith(FILE);
+  }
+
+  /** To give back freed space, from an address without settings. */
+  static String toTidy(String url) {
+    return url + WORKING + ";IFEXISTS=TRUE";
   }
 
   static String toLook(Path file, String scheme) {
@@ -53,6 +65,6 @@ public final class DatabaseUrl {
     if (!path.endsWith(SUFFIX) || !allows(path, file.getFileSystem().getSeparator())) {
       throw new LogbookProblem(ProblemKind.BAD_PLACE, path, null);
     }
-    return "jdbc:h2:file:" + scheme + path.substring(0, path.length() - SUFFIX.length());
+    return FILE + scheme + path.substring(0, path.length() - SUFFIX.length());
   }
 }

@@ -74,6 +74,20 @@ final class Databases {
     }
   }
 
+  /**
+   * Closes the database, then opens and closes it once more so that freed space is given back:
+   * while it works it only appends ({@link DatabaseUrl#toWork}).
+   */
+  static void shutDownTidily(Connection connection) throws SQLException {
+    String tidying = connection.isClosed() ? "" : connection.getMetaData().getURL();
+    shutDown(connection);
+    if (DatabaseUrl.ofAFile(tidying)) {
+      try (Connection again = source(DatabaseUrl.toTidy(tidying)).getConnection()) {
+        shutDown(again);
+      }
+    }
+  }
+
   private static void bringUpToDate(
       Connection connection, DataSource source, String place, int version) throws SQLException {
     try {

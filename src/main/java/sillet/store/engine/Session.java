@@ -132,7 +132,7 @@ public final class Session implements AutoCloseable {
 
   private void shutDown() {
     try (connection) {
-      Databases.shutDown(connection);
+      Databases.shutDownTidily(connection);
     } catch (SQLException trouble) {
       throw ProblemSigns.read(trouble, place);
     }
