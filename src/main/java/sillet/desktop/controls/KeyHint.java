@@ -1,6 +1,7 @@
 package sillet.desktop.controls;
 
 import javafx.scene.control.Button;
+import javafx.scene.control.ButtonBase;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ToggleButton;
@@ -20,15 +21,7 @@ public final class KeyHint {
    * @param action what happens
    */
   public static Button button(String name, String key, Runnable action) {
-    Button button = new Button(name);
-    Label hint = new Label(key);
-    hint.getStyleClass().add(Looks.KEY_HINT);
-    button.setGraphic(hint);
-    button.setContentDisplay(ContentDisplay.RIGHT);
-    button.setMnemonicParsing(false);
-    button.setAccessibleText(name + ", " + key);
-    button.setOnAction(pressed -> action.run());
-    return button;
+    return hinted(new Button(name), key, action);
   }
 
   /**
@@ -39,13 +32,16 @@ public final class KeyHint {
    * @param action what happens
    */
   public static ToggleButton toggle(String name, String key, Runnable action) {
-    ToggleButton button = new ToggleButton(name);
+    return hinted(new ToggleButton(name), key, action);
+  }
+
+  private static <B extends ButtonBase> B hinted(B button, String key, Runnable action) {
     Label hint = new Label(key);
     hint.getStyleClass().add(Looks.KEY_HINT);
     button.setGraphic(hint);
     button.setContentDisplay(ContentDisplay.RIGHT);
     button.setMnemonicParsing(false);
-    button.setAccessibleText(name + ", " + key);
+    button.setAccessibleText(button.getText() + ", " + key);
     button.setOnAction(pressed -> action.run());
     return button;
   }

@@ -13,6 +13,7 @@ import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import sillet.desktop.controls.TypedCell;
 import sillet.desktop.controls.TypedFieldModel;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Texts;
@@ -119,29 +120,12 @@ final class FretTable extends GridPane {
 
   private TextField field(int fret, Runnable changed) {
     TypedFieldModel<Length> place = model.place(fret);
-    TextField field = new TextField();
+    TextField field = TypedCell.of(place);
     field.setId("fret-" + fret);
     field.getStyleClass().addAll(Looks.FIGURE, "fret-field");
     field.setAccessibleText(texts.say("frets.field", Integer.toString(fret)));
-    field.textProperty().bindBidirectional(place.typedProperty());
     place.typedProperty().addListener((property, before, now) -> changed.run());
-    field
-        .focusedProperty()
-        .addListener(
-            (property, before, now) -> {
-              if (now) {
-                field.selectAll();
-              } else {
-                place.leave();
-              }
-            });
-    place
-        .problemProperty()
-        .addListener(
-            (property, before, now) -> {
-              field.pseudoClassStateChanged(Looks.ERROR, now.isPresent());
-              sayProblem();
-            });
+    place.problemProperty().addListener((property, before, now) -> sayProblem());
     field.addEventFilter(KeyEvent.KEY_PRESSED, key -> walk(key, fret));
     return field;
   }

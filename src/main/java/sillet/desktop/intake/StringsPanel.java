@@ -2,7 +2,6 @@ package sillet.desktop.intake;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
@@ -12,12 +11,11 @@ import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
 import sillet.acoustics.wire.Construction;
+import sillet.desktop.controls.ConstructionNames;
 import sillet.desktop.controls.Desk;
 import sillet.desktop.controls.TypedFieldModel;
 import sillet.desktop.theme.Looks;
-import sillet.logbook.strings.ConstructionWords;
 import sillet.logbook.strings.StringSet;
 import sillet.logbook.strings.Tuning;
 import sillet.logbook.text.Texts;
@@ -203,7 +201,7 @@ final class StringsPanel extends VBox {
     box.setId("construction-" + line.number());
     box.getStyleClass().add("construction-cell");
     box.getItems().setAll(Construction.values());
-    box.setConverter(new Words());
+    box.setConverter(new ConstructionNames());
     box.setValue(line.construction());
     box.setAccessibleText(
         texts.say("intake.strings.construction-of", Integer.toString(line.number())));
@@ -231,19 +229,6 @@ final class StringsPanel extends VBox {
                   key.consume();
                 }
               });
-    }
-  }
-
-  /** The words of the files, without their hyphen. */
-  private static final class Words extends StringConverter<Construction> {
-    @Override
-    public String toString(Construction construction) {
-      return construction == null ? "" : ConstructionWords.of(construction).replace('-', ' ');
-    }
-
-    @Override
-    public Construction fromString(String typed) {
-      throw new UnsupportedOperationException(typed.toLowerCase(Locale.ROOT));
     }
   }
 }

@@ -4,6 +4,7 @@ import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Region;
+import sillet.desktop.controls.TypedCell;
 import sillet.desktop.controls.TypedFieldModel;
 import sillet.desktop.theme.Looks;
 import sillet.logbook.text.Texts;
@@ -72,25 +73,10 @@ final class PickupFields extends GridPane {
   }
 
   private TextField field(TypedFieldModel<?> model, String id, String what) {
-    TextField input = new TextField();
+    TextField input = TypedCell.of(model);
     input.setId(id);
     input.setAccessibleText(what);
-    input.textProperty().bindBidirectional(model.typedProperty());
     model.typedProperty().addListener((property, before, now) -> changed.run());
-    input
-        .focusedProperty()
-        .addListener(
-            (property, before, now) -> {
-              if (now) {
-                input.selectAll();
-              } else {
-                model.leave();
-              }
-            });
-    model
-        .problemProperty()
-        .addListener(
-            (property, before, now) -> input.pseudoClassStateChanged(Looks.ERROR, now.isPresent()));
     return input;
   }
 }

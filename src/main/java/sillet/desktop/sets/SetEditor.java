@@ -1,7 +1,6 @@
 package sillet.desktop.sets;
 
 import java.util.Arrays;
-import java.util.Locale;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
@@ -10,13 +9,13 @@ import javafx.scene.control.TextField;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
 import sillet.acoustics.wire.Construction;
+import sillet.desktop.controls.ConstructionNames;
 import sillet.desktop.controls.KeyHint;
+import sillet.desktop.controls.TypedCell;
 import sillet.desktop.controls.TypedField;
 import sillet.desktop.controls.TypedFieldModel;
 import sillet.desktop.theme.Looks;
-import sillet.logbook.strings.ConstructionWords;
 import sillet.logbook.text.Texts;
 
 /** The fields of a set that is typed; at the end of each string what is wrong with it. */
@@ -130,26 +129,10 @@ final class SetEditor extends VBox {
   }
 
   private TextField field(TypedFieldModel<?> model, String id, String number, String what) {
-    TextField input = new TextField();
+    TextField input = TypedCell.of(model);
     input.setId(id + number);
     input.getStyleClass().addAll(Looks.FIGURE, "set-figure-field");
     input.setAccessibleText(texts.say("sets.cell", number, what));
-    input.textProperty().bindBidirectional(model.typedProperty());
-    input
-        .focusedProperty()
-        .addListener(
-            (property, before, now) -> {
-              if (now) {
-                input.selectAll();
-              } else {
-                model.leave();
-              }
-            });
-    model
-        .problemProperty()
-        .addListener(
-            (property, before, now) -> input.pseudoClassStateChanged(Looks.ERROR, now.isPresent()));
-    input.pseudoClassStateChanged(Looks.ERROR, model.problemProperty().get().isPresent());
     return input;
   }
 
@@ -158,7 +141,7 @@ final class SetEditor extends VBox {
     box.setId("set-made-" + number);
     box.getStyleClass().add("set-made-field");
     box.getItems().setAll(Arrays.asList(Construction.values()));
-    box.setConverter(new Words());
+    box.setConverter(new ConstructionNames());
     box.setValue(line.construction());
     box.setAccessibleText(
         texts.say("sets.cell", Integer.toString(number), texts.say("sets.construction")));
@@ -169,18 +152,5 @@ final class SetEditor extends VBox {
           }
         });
     return box;
-  }
-
-  /** The words of the files, without their hyphen. */
-  private static final class Words extends StringConverter<Construction> {
-    @Override
-    public String toString(Construction construction) {
-      return construction == null ? "" : ConstructionWords.of(construction).replace('-', ' ');
-    }
-
-    @Override
-    public Construction fromString(String typed) {
-      throw new UnsupportedOperationException(typed.toLowerCase(Locale.ROOT));
-    }
   }
 }
